@@ -1,0 +1,24 @@
+/** What is wrong with one field of an input: which, why, and the bound with its unit where there is one. */
+export interface FieldIssue {
+  readonly field: string;
+  readonly message: string;
+  readonly received?: unknown;
+  readonly bound?: number;
+  readonly unit?: string;
+}
+
+/** The input cannot be used; every field at fault is listed. Maps to HTTP 422. */
+export class InvalidInput extends Error {
+  constructor(readonly issues: readonly FieldIssue[]) {
+    super(issues.map((issue) => `${issue.field}: ${issue.message}`).join('; '));
+    this.name = 'InvalidInput';
+  }
+}
+
+/** What was asked for does not exist. Maps to HTTP 404. */
+export class NotFound extends Error {
+  constructor(readonly what: string) {
+    super(`${what} was not found`);
+    this.name = 'NotFound';
+  }
+}

@@ -1,0 +1,39 @@
+import type { Placement, Vec3 } from './kernel';
+
+export const IDENTITY: Placement = [1, 0, 0, 0, 0, 1, 0, 0, 0, 0, 1, 0, 0, 0, 0, 1];
+
+export const translation = ([x, y, z]: Vec3): Placement => [1, 0, 0, 0, 0, 1, 0, 0, 0, 0, 1, 0, x, y, z, 1];
+
+/** Rotation by an angle in radians about an axis through the origin (right-hand rule). */
+export function rotation(axis: 'x' | 'y' | 'z', angle: number): Placement {
+  const c = Math.cos(angle);
+  const s = Math.sin(angle);
+  if (axis === 'x') return [1, 0, 0, 0, 0, c, s, 0, 0, -s, c, 0, 0, 0, 0, 1];
+  if (axis === 'y') return [c, 0, -s, 0, 0, 1, 0, 0, s, 0, c, 0, 0, 0, 0, 1];
+  return [c, s, 0, 0, -s, c, 0, 0, 0, 0, 1, 0, 0, 0, 0, 1];
+}
+
+/** Placement that applies the last one first: compose(a, b) moves by b, then by a. */
+export function compose(...placements: readonly Placement[]): Placement {
+  return placements.reduce((left, right) => multiply(left, right), IDENTITY);
+}
+
+function multiply(a: Placement, b: Placement): Placement {
+  const out: number[] = [];
+  for (let column = 0; column < 4; column += 1) {
+    for (let row = 0; row < 4; row += 1) {
+      let sum = 0;
+      for (let k = 0; k < 4; k += 1) sum += a[k * 4 + row]! * b[column * 4 + k]!;
+      out.push(sum);
+    }
+  }
+  return out;
+}
+
+export function movePoint(at: Placement, [x, y, z]: Vec3): Vec3 {
+  return [
+    at[0]! * x + at[4]! * y + at[8]! * z + at[12]!,
+    at[1]! * x + at[5]! * y + at[9]! * z + at[13]!,
+    at[2]! * x + at[6]! * y + at[10]! * z + at[14]!,
+  ];
+}

@@ -1,0 +1,37 @@
+import type { Config } from 'tailwindcss';
+
+const token = (name: string) => `var(--${name})`;
+
+export default {
+  content: ['./app/**/*.{ts,tsx}', './components/**/*.{ts,tsx}'],
+  theme: {
+    extend: {
+      colors: {
+        paper: token('paper'),
+        sheet: token('sheet'),
+        ink: token('ink'),
+        muted: token('muted'),
+        hair: token('hair'),
+        edge: token('edge'),
+        petrol: token('petrol'),
+        'petrol-soft': token('petrol-soft'),
+        marker: token('marker'),
+        clay: token('clay'),
+        ok: token('ok'),
+        'ok-soft': token('ok-soft'),
+        near: token('near'),
+        'near-soft': token('near-soft'),
+        over: token('over'),
+        'over-soft': token('over-soft'),
+        unknown: token('unknown'),
+        'unknown-soft': token('unknown-soft'),
+      },
+      fontFamily: {
+        heading: ['var(--font-heading)', 'sans-serif'],
+        text: ['var(--font-text)', 'sans-serif'],
+        mono: ['var(--font-mono)', 'monospace'],
+      },
+      borderRadius: { sheet: '4px', field: '3px' },
+    },
+  },
+} satisfies Config;

@@ -1,0 +1,17 @@
+import { fileURLToPath } from 'node:url';
+import { defineConfig } from 'vitest/config';
+
+const here = (path: string) => fileURLToPath(new URL(path, import.meta.url));
+
+export default defineConfig({
+  resolve: {
+    tsconfigPaths: true,
+    alias: { 'server-only': here('./tests/support/server-only.ts') },
+  },
+  test: {
+    include: ['tests/{architecture,unit,reference,integration}/**/*.test.{ts,tsx}'],
+    setupFiles: ['tests/support/fail-on-console-error.ts'],
+    testTimeout: 60_000,
+    hookTimeout: 60_000,
+  },
+});
