@@ -92,10 +92,16 @@ export interface Material {
   readonly yieldStrain: Quantity | null;
   readonly tensileStrength: Quantity | null;
   readonly tensileStrengthAcross: Quantity | null;
-  /** permissible short-time strain at 23 °C */
+  /** elongation at break along and across the layers */
+  readonly breakStrain?: Quantity | null;
+  readonly breakStrainAcross?: Quantity | null;
+  /** permissible short-time strain at 23 °C, along the layers */
   readonly allowableOnce: Quantity | null;
   readonly allowableOften: Quantity | null;
+  /** as `allowableOnce`, where the strain pulls the layers apart */
   readonly allowableAcross: Quantity | null;
+  /** given by the user for the use at hand: stands in place of limit, use, layers and temperature */
+  readonly allowableFinal?: Quantity | null;
   /** friction of the plastic on itself */
   readonly friction: Band;
   readonly density: Quantity | null;
@@ -112,6 +118,8 @@ export interface Material {
   /** true for plastics whose thin webs are drawn and oriented by the first fold (PP, PE) */
   readonly drawsWhenFolded: boolean;
   readonly price: Price | null;
+  /** why a figure of this plastic is not known, by property, where there is more to say than "not found" */
+  readonly gaps?: Readonly<Partial<Record<string, string>>>;
 }
 
 export type Opening = 'once' | 'sometimes' | 'often';

@@ -1,0 +1,92 @@
+import type { Material } from '../types';
+import {
+  celsius,
+  density,
+  expansion,
+  folds,
+  fraction,
+  friction,
+  hours,
+  middle,
+  modulus,
+  price,
+  rated,
+  strain,
+  strength,
+  temperature,
+} from './quantity';
+import { ASSUMED } from './secant-models';
+import {
+  BEAM_BOOKS,
+  DRYING_TABLES,
+  detail,
+  EXPANSION_LISTS,
+  FLEXURE_NOTES,
+  FOLDING_STUDY,
+  GUIDE_FRICTION,
+  OPEN_TABLES,
+  PRACTICE,
+  PRINTED_GUIDE,
+  PRINTED_SHEET,
+  PRINTED_SHRINKAGE,
+} from './sources';
+
+const COMPUTED = { ...PRINTED_GUIDE, mark: 'computed' } as const;
+const CONFLICT =
+  'sources conflict: 1-1.5 %, 2.5 % and 6-7 % are published for ABS, from design value to near yield';
+
+export const abs: Material = {
+  id: 'abs',
+  name: 'ABS, printed',
+  shortName: 'ABS',
+  process: 'printed',
+  summary: 'Takes more heat than PETG; needs an enclosure, fumes need ventilation.',
+  flexuralModulus: modulus(2127, PRINTED_SHEET),
+  tensileModulus: modulus(2247, PRINTED_SHEET),
+  tensileModulusAcross: modulus(2081, PRINTED_SHEET),
+  secant: ASSUMED,
+  poisson: fraction(0.35, BEAM_BOOKS),
+  yieldStrain: middle(strain, [0.025, 0.035], detail(FLEXURE_NOTES, 'moulded')),
+  tensileStrength: middle(strength, [30, 33], PRINTED_SHEET),
+  tensileStrengthAcross: strength(
+    29.7,
+    detail(PRINTED_SHEET, 'one study 3.15 across against 26.4 along'),
+    [3.15, 29.7],
+  ),
+  breakStrain: strain(0.179, PRINTED_SHEET),
+  breakStrainAcross: strain(0.031, PRINTED_SHEET),
+  allowableOnce: strain(0.009, detail(COMPUTED, CONFLICT)),
+  allowableOften: strain(0.0055, detail(COMPUTED, `60 % of the single value; ${CONFLICT}`)),
+  allowableAcross: strain(0.003, detail(COMPUTED, 'a third of the value along the layers')),
+  friction: friction(
+    0.34,
+    0.69,
+    1.03,
+    detail(GUIDE_FRICTION, '0.50-0.65 x 1.2 = 0.60-0.78; band +- 50 % for printed faces'),
+  ),
+  density: density(1.12, PRINTED_SHEET),
+  heatDeflection: temperature(100, detail(PRINTED_SHEET, 'at 0.45 MPa')),
+  glassTransition: temperature(101, PRINTED_SHEET),
+  continuousService: temperature(80, OPEN_TABLES),
+  thermalExpansion: expansion(
+    81.5e-6,
+    detail(EXPANSION_LISTS, '53-110, 70-150 in another list'),
+    [53e-6, 150e-6],
+  ),
+  shrinkage: middle(fraction, [0.007, 0.008], PRINTED_SHRINKAGE),
+  print: {
+    nozzle: celsius(230, 280, OPEN_TABLES),
+    bed: celsius(85, 110, OPEN_TABLES),
+    enclosure: 'needed',
+    bedSurface: 'PEI with glue stick, or ABS slurry',
+    drying: { temperature: celsius(55, 80, DRYING_TABLES), hours: hours(8, 8, DRYING_TABLES) },
+    warp: 'high',
+    source: detail(PRACTICE, 'warp listed as medium to high'),
+  },
+  weather: rated('poor', 'Yellows and embrittles in the sun.'),
+  chemicals: rated('fair', 'Stands weak acids and alkalis; acetone dissolves it, oils and fuels craze it.'),
+  gluing: rated('good', 'Acetone, ABS cement, cyanoacrylate and epoxy hold well.'),
+  foldEndurance: folds('unknown', 'ABS is not among the hinges tested.', FOLDING_STUDY),
+  drawsWhenFolded: false,
+  price: price(22),
+};
