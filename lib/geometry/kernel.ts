@@ -70,6 +70,7 @@ export interface Kernel {
   place(solid: Solid, at: Placement): Solid;
   union(solids: readonly Solid[]): Solid;
   subtract(from: Solid, cutters: readonly Solid[]): Solid;
+  /** may be empty, of volume 0; an empty body is refused when the build ends */
   intersect(solids: readonly Solid[]): Solid;
   /** mm3 */
   volume(solid: Solid): number;

@@ -37,3 +37,15 @@ export function movePoint(at: Placement, [x, y, z]: Vec3): Vec3 {
     at[2]! * x + at[6]! * y + at[10]! * z + at[14]!,
   ];
 }
+
+/** True for a rotation and translation: no scale, shear, mirror or perspective (to 1e-9). */
+export function isRigid(at: Placement): boolean {
+  if (at.length !== 16 || !at.every(Number.isFinite)) return false;
+  const [x, y, z] = [0, 4, 8].map((start) => at.slice(start, start + 3) as unknown as Vec3);
+  const dot = (a: Vec3, b: Vec3) => a[0] * b[0] + a[1] * b[1] + a[2] * b[2];
+  const products = [dot(x!, x!) - 1, dot(y!, y!) - 1, dot(z!, z!) - 1, dot(x!, y!), dot(y!, z!), dot(z!, x!)];
+  const rest = [at[3]!, at[7]!, at[11]!, at[15]! - 1];
+  const handed = x![0] * (y![1] * z![2] - y![2] * z![1]) - x![1] * (y![0] * z![2] - y![2] * z![0]);
+  const determinant = handed + x![2] * (y![0] * z![1] - y![1] * z![0]);
+  return determinant > 0 && [...products, ...rest].every((value) => Math.abs(value) < 1e-9);
+}
