@@ -1,4 +1,5 @@
 import type { About, Family, Guide } from './contract';
+import { about as livingHinge } from './living-hinge/about';
 
 /** What the list knows of a family before it is loaded. */
 export interface FamilyEntry {
@@ -8,7 +9,13 @@ export interface FamilyEntry {
 }
 
 /** The families, in the order they are offered. A new family is a folder and a line here. */
-export const FAMILIES: readonly FamilyEntry[] = [];
+export const FAMILIES: readonly FamilyEntry[] = [
+  {
+    about: livingHinge,
+    load: () => import('./living-hinge').then((m) => m.default),
+    loadGuide: () => import('./living-hinge/guide').then((m) => m.default),
+  },
+];
 
 export const familyEntry = (id: string): FamilyEntry | undefined =>
   FAMILIES.find((entry) => entry.about.id === id);
