@@ -29,7 +29,7 @@ const node = (title, file, args, env) => step(title, process.execPath, [file, ..
 
 /** Runs a TypeScript file of the server rooms. */
 const script = (title, file, env = {}) =>
-  step(title, process.execPath, ['--conditions=react-server', TSX, file], env);
+  step(title, process.execPath, [TSX, '--conditions=react-server', file], env);
 
 function hashOf(files) {
   const hash = createHash('sha256');
