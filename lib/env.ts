@@ -1,0 +1,51 @@
+import { z } from 'zod';
+
+const whole = (name: string, min: number, max: number, fallback: number) =>
+  z
+    .string()
+    .regex(/^\d+$/, `${name} must be a whole number`)
+    .transform(Number)
+    .pipe(z.number().min(min, `${name} must be at least ${min}`).max(max, `${name} must be at most ${max}`))
+    .default(fallback);
+
+const perMinute = (name: string, fallback: number) => whole(name, 1, 1_000_000, fallback);
+
+const envSchema = z.object({
+  NODE_ENV: z
+    .enum(['development', 'production', 'test'], 'NODE_ENV must be development, production or test')
+    .default('development'),
+  HOSTNAME: z.string().max(253, 'HOSTNAME must have at most 253 characters').default('127.0.0.1'),
+  PORT: whole('PORT', 0, 65_535, 3000),
+  DATABASE_PATH: z
+    .string()
+    .min(1, 'DATABASE_PATH must name a file')
+    .max(1000, 'DATABASE_PATH must have at most 1000 characters')
+    .default('./data/bendwell.sqlite'),
+  LOG_LEVEL: z
+    .enum(
+      ['debug', 'info', 'warn', 'error', 'silent'],
+      'LOG_LEVEL must be debug, info, warn, error or silent',
+    )
+    .default('info'),
+  RATE_READS_PER_MINUTE: perMinute('RATE_READS_PER_MINUTE', 600),
+  RATE_CHECKS_PER_MINUTE: perMinute('RATE_CHECKS_PER_MINUTE', 600),
+  RATE_EXPORTS_PER_MINUTE: perMinute('RATE_EXPORTS_PER_MINUTE', 60),
+});
+
+export type Env = Readonly<z.infer<typeof envSchema>>;
+
+/** Reads the environment; an error names every variable that cannot be used. Empty counts as not set. */
+export function readEnv(variables: Readonly<Record<string, string | undefined>>): Env {
+  const set = Object.fromEntries(Object.entries(variables).filter(([, value]) => value !== ''));
+  const result = envSchema.safeParse(set);
+  if (result.success) return result.data;
+  const faults = result.error.issues.map((issue) => `- ${issue.message}`);
+  throw new Error(`The environment cannot be used:\n${faults.join('\n')}`);
+}
+
+let checked: Env | undefined;
+
+export function env(): Env {
+  checked ??= readEnv(process.env);
+  return checked;
+}
