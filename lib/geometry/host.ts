@@ -112,6 +112,10 @@ function createKernel(module: ManifoldModule, shelf: Shelf, quality: Quality): K
     intersect: (solids) =>
       shelf.keep('intersect', module.Manifold.intersection(several('intersect', solids)), true),
     volume: (solid) => shelf.get('volume', solid).volume(),
+    bounds(solid) {
+      const { min, max } = shelf.get('bounds', solid).boundingBox();
+      return [...min, ...max];
+    },
   };
 }
 

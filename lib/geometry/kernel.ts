@@ -74,6 +74,7 @@ export interface Kernel {
   intersect(solids: readonly Solid[]): Solid;
   /** mm3 */
   volume(solid: Solid): number;
+  bounds(solid: Solid): Bounds;
 }
 
 export interface NamedSolid {
@@ -89,12 +90,14 @@ export interface MeshFault {
   readonly count: number;
 }
 
+/** Least x, y, z, then greatest x, y, z, mm. */
+export type Bounds = readonly [number, number, number, number, number, number];
+
 export interface BuiltBody {
   readonly name: string;
   readonly mesh: TriMesh;
   readonly volume: number;
-  /** min xyz, max xyz */
-  readonly bounds: readonly [number, number, number, number, number, number];
+  readonly bounds: Bounds;
 }
 
 export class KernelError extends Error {

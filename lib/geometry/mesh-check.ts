@@ -1,9 +1,7 @@
-import type { BuiltBody, MeshFault, TriMesh } from './kernel';
+import type { Bounds, MeshFault, TriMesh } from './kernel';
 
 /** A facet whose height over its longest edge is below this (mm) has no direction in float32. */
 export const MIN_FACET_HEIGHT = 1e-6;
-
-type Bounds = BuiltBody['bounds'];
 
 const tableSize = (entries: number) => 2 ** Math.ceil(Math.log2(Math.max(8, entries * 2)));
 

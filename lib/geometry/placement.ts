@@ -49,3 +49,12 @@ export function isRigid(at: Placement): boolean {
   const determinant = handed + x![2] * (y![0] * z![1] - y![1] * z![0]);
   return determinant > 0 && [...products, ...rest].every((value) => Math.abs(value) < 1e-9);
 }
+
+/** The positions (xyz per vertex) of a moved body. */
+export function movePositions(at: Placement, positions: Float32Array): Float32Array {
+  const moved = new Float32Array(positions.length);
+  for (let start = 0; start < positions.length; start += 3) {
+    moved.set(movePoint(at, [positions[start]!, positions[start + 1]!, positions[start + 2]!]), start);
+  }
+  return moved;
+}

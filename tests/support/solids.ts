@@ -37,7 +37,8 @@ function smallerMoves(field: Field, move: number): number[] {
 
 /**
  * Random valid values of a family. Fields are moved from their defaults one after the other in a random order; a move
- * that a relation refuses is made smaller until it is accepted, and tried again when the others have moved. So every draw is valid and none is thrown away.
+ * that a relation refuses is made smaller until it is accepted, and tried again when the others have moved. So every
+ * draw is valid and none is thrown away.
  */
 export function arbitraryParameters<P>(parameters: Parameters<P>): fc.Arbitrary<P> {
   const fields = Object.entries<Field>(parameters.fields as Record<string, Field>);
