@@ -1,3 +1,4 @@
+import { about as cantileverHook } from './cantilever-hook/about';
 import type { About, Family, Guide } from './contract';
 import { about as livingHinge } from './living-hinge/about';
 
@@ -10,6 +11,11 @@ export interface FamilyEntry {
 
 /** The families, in the order they are offered. A new family is a folder and a line here. */
 export const FAMILIES: readonly FamilyEntry[] = [
+  {
+    about: cantileverHook,
+    load: () => import('./cantilever-hook').then((m) => m.default),
+    loadGuide: () => import('./cantilever-hook/guide').then((m) => m.default),
+  },
   {
     about: livingHinge,
     load: () => import('./living-hinge').then((m) => m.default),

@@ -1,0 +1,95 @@
+import { type Arm, guideStrain } from '@/lib/mechanics/beam';
+import { filletConcentration } from '@/lib/mechanics/fillet';
+import {
+  type BentArm,
+  bendArm,
+  compliance,
+  type FlexibleArm,
+  highestStrain,
+  strainAt,
+} from '@/lib/mechanics/large-deflection';
+import { blockSprings, type RootSection, type RootSpring, wallSprings } from '@/lib/mechanics/root';
+import { wallStrain } from '@/lib/mechanics/thin-wall';
+import type { HookValues } from './schema';
+
+export const armOf = (v: HookValues): Arm => ({
+  length: v.armLength,
+  rootThickness: v.rootThickness,
+  tipThickness: v.tipThickness,
+  rootWidth: v.rootWidth,
+  tipWidth: v.tipWidth,
+});
+
+const sectionOf = (v: HookValues): RootSection => ({
+  thickness: v.rootThickness,
+  width: v.rootWidth,
+  fillet: v.rootFillet,
+});
+
+const wallOf = (v: HookValues) => ({ thickness: v.wallThickness, span: v.wallSpan, width: v.wallWidth });
+
+function springsOf(v: HookValues): readonly RootSpring[] {
+  if (v.root === 'wall') return wallSprings(wallOf(v), sectionOf(v));
+  return blockSprings(v.baseWidth, sectionOf(v));
+}
+
+/** The arm on what it stands on, for a Poisson's ratio. */
+export const flexibleArm = (v: HookValues, poisson: number): FlexibleArm => ({
+  arm: armOf(v),
+  fillet: v.rootFillet,
+  springs: springsOf(v),
+  poisson,
+});
+
+/** Strains of the arm bent by some deflection at its tip; all fractions, tension positive. */
+export interface HookStrain {
+  readonly deflection: number;
+  readonly bent: BentArm;
+  /** nominal outer-fibre strain where the root fillet ends: sets the working modulus */
+  readonly nominal: number;
+  /** the same with the concentration of the fillet */
+  readonly fillet: number;
+  /** highest on the arm: at the fillet or further along */
+  readonly arm: number;
+  /** at the fillet's end in the wall; null where the arm does not stand on a wall */
+  readonly wall: number | null;
+}
+
+export function strainOf(v: HookValues, flexible: FlexibleArm, deflection: number): HookStrain {
+  const bent = bendArm(flexible, deflection);
+  const { arm } = flexible;
+  const nominal = strainAt(arm, bent, v.rootFillet);
+  const atFillet = filletConcentration(v.rootFillet / v.rootThickness) * nominal;
+  const alongArm = highestStrain(arm, bent, v.rootFillet);
+  const wall =
+    v.root === 'wall' ? wallStrain(wallOf(v), sectionOf(v), v.armLength, bent.forcePerModulus) : null;
+  return { deflection, bent, nominal, fillet: atFillet, arm: Math.max(atFillet, alongArm), wall };
+}
+
+export const peakOf = (strain: HookStrain): number => Math.max(strain.arm, strain.wall ?? 0);
+
+/** Deflection in mm at which the peak strain reaches `allowed`; null past the reach of the formulas. */
+export function permissibleDeflection(v: HookValues, flexible: FlexibleArm, allowed: number): number | null {
+  const furthest = MOST_DEFLECTION * v.armLength;
+  let y = Math.min(allowed / guideStrain(armOf(v), 1), furthest);
+  for (let turn = 0; turn < 12; turn += 1) {
+    const next = Math.min((y * allowed) / peakOf(strainOf(v, flexible, y)), furthest);
+    if (Math.abs(next - y) < 1e-6 * y) return next < furthest ? next : null;
+    y = next;
+  }
+  return null;
+}
+
+/** Share of the tip's give that comes from the root turning, 0 to 1. */
+export function rootShare(flexible: FlexibleArm): number {
+  return 1 - compliance({ ...flexible, springs: [] }) / compliance(flexible);
+}
+
+/** Corrected figures hold to this deflection over length, and from this slenderness on. */
+export const MOST_DEFLECTION = 0.5;
+export const LEAST_SLENDERNESS = 2;
+/** The plain formulas are not used past this deflection over length (common practice). */
+export const GUIDE_MOST_DEFLECTION = 0.3;
+
+export const slenderness = (v: HookValues): number => v.armLength / v.rootThickness;
+export const deflectionRatio = (v: HookValues): number => v.undercut / v.armLength;

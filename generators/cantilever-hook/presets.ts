@@ -1,0 +1,55 @@
+import type { Preset } from '../contract';
+import type { HookValues } from './schema';
+
+export const presets: readonly Preset<HookValues>[] = [
+  {
+    id: 'battery-hatch',
+    name: 'Battery hatch hook',
+    purpose: 'Holds the battery hatch of a glider and is pulled open at every flight.',
+    material: 'petg',
+    use: { opening: 'often', layers: 'along', temperature: 23 },
+    values: {},
+  },
+  {
+    id: 'receiver-box-lid',
+    name: 'Receiver box lid catch',
+    purpose: 'Keeps spray out of the receiver box of a sailing boat; stands on the thin wall of the lid.',
+    material: 'asa',
+    use: { opening: 'sometimes', layers: 'along', temperature: 40 },
+    values: {
+      armLength: 22,
+      rootThickness: 1.8,
+      tipThickness: 1,
+      rootWidth: 10,
+      tipWidth: 10,
+      undercut: 1.2,
+      rootFillet: 1,
+      root: 'wall',
+      wallThickness: 2.4,
+      wallSpan: 40,
+      wallWidth: 30,
+      baseThickness: 3,
+    },
+  },
+  {
+    id: 'stand-leg-lock',
+    name: 'Bench stand lock',
+    purpose: 'Locks the leg of a boat stand for good: a square catch that pulling does not open.',
+    material: 'pla',
+    use: { opening: 'once', layers: 'along', temperature: 23 },
+    values: {
+      armLength: 24,
+      rootThickness: 2.4,
+      tipThickness: 1.4,
+      rootWidth: 12,
+      tipWidth: 12,
+      undercut: 1.4,
+      rootFillet: 1.4,
+      returnAngle: 90,
+      landLength: 1.2,
+      baseLength: 20,
+      baseWidth: 18,
+      baseThickness: 5,
+    },
+  },
+];

@@ -1,0 +1,54 @@
+import { type AllowableStrain, allowableStrain } from '@/lib/materials/allowable';
+import { secantModulus } from '@/lib/materials/secant';
+import type { Material, Use } from '@/lib/materials/types';
+import type { FlexibleArm } from '@/lib/mechanics/large-deflection';
+import {
+  deflectionRatio,
+  flexibleArm,
+  GUIDE_MOST_DEFLECTION,
+  type HookStrain,
+  LEAST_SLENDERNESS,
+  MOST_DEFLECTION,
+  slenderness,
+  strainOf,
+} from './mechanics';
+import type { HookValues } from './schema';
+
+/** Everything the figures of one check are made from. */
+export interface Subject {
+  readonly values: HookValues;
+  readonly material: Material;
+  readonly allowable: AllowableStrain;
+  readonly flexible: FlexibleArm;
+  /** bent by the whole undercut */
+  readonly strain: HookStrain;
+  /** why the corrected figures do not hold for these values; null where they do */
+  readonly trouble: string | null;
+}
+
+function troubleOf(v: HookValues): string | null {
+  if (deflectionRatio(v) > MOST_DEFLECTION) return 'the arm bends by more than half its length';
+  if (slenderness(v) < LEAST_SLENDERNESS) return 'the arm is shorter than twice its thickness';
+  return null;
+}
+
+export function subjectOf(values: HookValues, material: Material, use: Use): Subject {
+  const flexible = flexibleArm(values, material.poisson.value);
+  return {
+    values,
+    material,
+    allowable: allowableStrain(material, use),
+    flexible,
+    strain: strainOf(values, flexible, values.undercut),
+    trouble: troubleOf(values),
+  };
+}
+
+/** The plain formula is for small deflections; past 0.3 of the length it is not used. */
+export const inGuideRange = (v: HookValues): boolean => deflectionRatio(v) <= GUIDE_MOST_DEFLECTION;
+
+/** Force in N of the arm bent so far, with the modulus at its nominal root strain; null where no modulus is known. */
+export function forceOf(material: Material, strain: HookStrain): number | null {
+  const modulus = secantModulus(material, strain.nominal);
+  return modulus && modulus.value * strain.bent.forcePerModulus;
+}
