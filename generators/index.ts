@@ -1,6 +1,7 @@
 import { about as cantileverHook } from './cantilever-hook/about';
 import type { About, Family, Guide } from './contract';
 import { about as livingHinge } from './living-hinge/about';
+import { about as rodClip } from './rod-clip/about';
 
 /** What the list knows of a family before it is loaded. */
 export interface FamilyEntry {
@@ -20,6 +21,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: livingHinge,
     load: () => import('./living-hinge').then((m) => m.default),
     loadGuide: () => import('./living-hinge/guide').then((m) => m.default),
+  },
+  {
+    about: rodClip,
+    load: () => import('./rod-clip').then((m) => m.default),
+    loadGuide: () => import('./rod-clip/guide').then((m) => m.default),
   },
 ];
 
