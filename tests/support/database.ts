@@ -14,7 +14,7 @@ export function emptyDatabase(): Connection {
 }
 
 /** Points the application at a seeded database file of its own for the tests of this file. */
-export function useSeededDatabase(): Connection {
+export function seededDatabase(): Connection {
   const folder = mkdtempSync(path.join(tmpdir(), 'bendwell-'));
   vi.stubEnv('DATABASE_PATH', path.join(folder, 'test.sqlite'));
   vi.stubEnv('LOG_LEVEL', 'silent');
