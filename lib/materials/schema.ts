@@ -16,8 +16,8 @@ export const quantitySchema = z
   .strictObject({
     value: z.number(),
     unit,
-    low: z.number().exactOptional(),
-    high: z.number().exactOptional(),
+    low: z.number().optional(),
+    high: z.number().optional(),
     source: sourceSchema,
   })
   .refine(ordered, OUTSIDE);
@@ -78,8 +78,8 @@ export const materialSchema = z.strictObject({
   yieldStrain: known,
   tensileStrength: known,
   tensileStrengthAcross: known,
-  breakStrain: known.exactOptional(),
-  breakStrainAcross: known.exactOptional(),
+  breakStrain: known.optional(),
+  breakStrainAcross: known.optional(),
   allowableOnce: known,
   allowableOften: known,
   allowableAcross: known,
@@ -101,5 +101,5 @@ export const materialSchema = z.strictObject({
   }),
   drawsWhenFolded: z.boolean(),
   price: priceSchema.nullable(),
-  gaps: z.record(z.string().max(60), text(300)).exactOptional(),
+  gaps: z.record(z.string().max(60), text(300)).optional(),
 }) satisfies z.ZodType<Material>;

@@ -1,0 +1,9 @@
+import { checkDesign } from '@/lib/access/check';
+import { route } from '@/lib/http/route';
+import { CHECK_UNITS, checkRequest } from '@/lib/http/v1/requests';
+
+export const POST = route({
+  rateLimit: 'checks',
+  schemas: { body: checkRequest, units: CHECK_UNITS },
+  handler: ({ body }) => checkDesign(body),
+});

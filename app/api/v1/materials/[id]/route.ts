@@ -1,0 +1,9 @@
+import { getMaterial } from '@/lib/access/materials';
+import { route } from '@/lib/http/route';
+import { idParams } from '@/lib/http/v1/requests';
+
+export const GET = route({
+  rateLimit: 'reads',
+  schemas: { params: idParams },
+  handler: ({ params }) => getMaterial(params.id),
+});

@@ -1,0 +1,78 @@
+import { z } from 'zod';
+import { USE_FIELDS } from '@/generators/url-state';
+import type { FieldUnits } from '../issues';
+
+const familyId = z
+  .string({ error: 'family must be the id of a part family' })
+  .min(1, 'family must be the id of a part family')
+  .max(60, 'family must have at most 60 characters')
+  .meta({ description: 'Id of a part family, see GET /api/v1/families', examples: ['cantilever-hook'] });
+
+const materialId = z
+  .string({ error: 'material must be the id of a material, or an object with its id' })
+  .min(1, 'material must be the id of a material')
+  .max(60, 'material must have at most 60 characters');
+
+const bounded = (name: string, unit: string, min: number, max: number) => {
+  const withUnit = unit === '' ? '' : ` ${unit}`;
+  return z
+    .number({ error: `${name} must be a number${unit && ` in ${unit}`}` })
+    .min(min, `${name} must be at least ${min}${withUnit}`)
+    .max(max, `${name} must be at most ${max}${withUnit}`)
+    .meta({ unit });
+};
+
+const frictionFigure = bounded('Friction', '', 0.01, 2);
+const frictionBand = z
+  .strictObject({ value: frictionFigure, low: frictionFigure, high: frictionFigure })
+  .refine(({ value, low, high }) => low <= value && value <= high, 'Friction must lie inside its band');
+
+const materialWithOverrides = z
+  .strictObject({
+    id: materialId,
+    secantModulus: bounded('Secant modulus', 'MPa', 0.1, 20_000).optional(),
+    friction: z
+      .union([frictionFigure, frictionBand], {
+        error: 'friction must be a number, or a band of value, low and high',
+      })
+      .optional(),
+    allowableStrain: bounded('Allowable strain', 'as a fraction', 0.0001, 2).optional(),
+  })
+  .meta({
+    description:
+      'A material with single properties given: secant modulus (MPa, used as it stands), friction (one figure carries a band of +- 50 %), allowable strain (fraction, final: no factor for use, layers or temperature is applied to it).',
+  });
+
+const parameters = z
+  .record(z.string().max(60), z.unknown())
+  .refine((given) => Object.keys(given).length <= 200, 'parameters must have at most 200 entries')
+  .meta({ description: 'By name, as in the JSON Schema of the family; left out ones take the default.' });
+
+const { temperature } = USE_FIELDS;
+const use = z
+  .strictObject({
+    opening: z
+      .enum(['once', 'sometimes', 'often'], 'opening must be one of once, sometimes, often')
+      .optional(),
+    layers: z.enum(['along', 'across'], 'layers must be one of along, across').optional(),
+    temperature: bounded('Temperature', '°C', temperature.min, temperature.max).optional(),
+  })
+  .meta({ description: 'How the part is used; left out: opened often, layers along the strain, 23 °C.' });
+
+export const checkRequest = z.strictObject({
+  family: familyId,
+  parameters: parameters.optional(),
+  material: z.union([materialId, materialWithOverrides], {
+    error: 'material must be the id of a material, or an object with its id',
+  }),
+  use: use.optional(),
+});
+
+export const CHECK_UNITS: FieldUnits = {
+  'use.temperature': 'degC',
+  'material.secantModulus': 'MPa',
+  'material.allowableStrain': 'strain',
+  'material.friction': 'ratio',
+};
+
+export const idParams = z.object({ id: z.string().min(1).max(60, 'The id must have at most 60 characters') });

@@ -1,0 +1,137 @@
+import { z } from 'zod';
+import { KIND_NAME, type Kind } from '@/generators/contract';
+import type { CheckResult } from '@/lib/access/check';
+import type { FamilyDescription } from '@/lib/access/families';
+import { materialSchema, sourceSchema } from '@/lib/materials/schema';
+import { UNIT_SYMBOL, type Unit } from '@/lib/units';
+import type { Problem } from '../problem';
+
+const unit = z
+  .enum(Object.keys(UNIT_SYMBOL) as [Unit, ...Unit[]])
+  .meta({ description: 'Strain is a fraction, angles are degrees.' });
+const source = sourceSchema;
+const layers = z.enum(['along', 'across']);
+const use = z.strictObject({
+  opening: z.enum(['once', 'sometimes', 'often']),
+  layers,
+  temperature: z.number(),
+});
+const verdict = z.enum(['within-limit', 'close-to-limit', 'over-limit', 'not-known']);
+const known = z.number().nullable();
+const values = z.record(z.string(), z.unknown());
+
+const figure = z.strictObject({
+  id: z.string(),
+  label: z.string(),
+  unit,
+  value: known.meta({ description: 'Corrected figure, on which the verdict stands; null: not known' }),
+  handbook: known.meta({ description: 'Closed form as printed' }),
+  low: known,
+  high: known,
+  limit: known,
+  limitKind: z.enum(['max', 'min']),
+  verdict: verdict.nullable(),
+  because: z.string(),
+  source,
+});
+
+const axis = z.strictObject({ label: z.string(), unit });
+const points = z.array(z.tuple([known, known]));
+const curve = z.strictObject({
+  id: z.string(),
+  label: z.string(),
+  x: axis,
+  y: axis,
+  points,
+  band: points.optional(),
+});
+
+const allowable = z.strictObject({
+  value: known,
+  factors: z.array(
+    z.strictObject({
+      id: z.enum(['short-term', 'use', 'layers', 'temperature']),
+      label: z.string(),
+      value: known,
+      source,
+      note: z.string().optional(),
+    }),
+  ),
+  because: z.string(),
+});
+
+export const checkResponse = z.strictObject({
+  verdict,
+  governing: z.string().meta({ description: 'Id of the figure shown on the strain band' }),
+  headline: z.array(z.string()),
+  figures: z.array(figure),
+  curves: z.array(curve),
+  allowable,
+  warnings: z.array(z.strictObject({ id: z.string(), field: z.string(), message: z.string() })),
+  family: z.string(),
+  parameters: values,
+  material: z.string(),
+  use,
+}) satisfies z.ZodType<CheckResult>;
+
+export const familyResponse = z.strictObject({
+  id: z.string(),
+  kind: z.enum(Object.keys(KIND_NAME) as [Kind, ...Kind[]]),
+  name: z.string(),
+  summary: z.string(),
+  rightWhen: z.string(),
+  wrongWhen: z.string(),
+  bendsBy: z.string(),
+  parameters: values.meta({ description: 'JSON Schema with title, unit, bounds, step, group, default' }),
+  groups: z.array(z.strictObject({ id: z.string(), label: z.string() })),
+  relations: z.array(
+    z.strictObject({
+      id: z.string(),
+      field: z.string(),
+      severity: z.enum(['refuse', 'warn']),
+      text: z.string(),
+    }),
+  ),
+  presets: z.array(
+    z.strictObject({
+      id: z.string(),
+      name: z.string(),
+      purpose: z.string(),
+      material: z.string(),
+      use,
+      values,
+    }),
+  ),
+  stances: z.array(z.strictObject({ id: z.string(), label: z.string(), because: z.string(), layers })),
+}) satisfies z.ZodType<FamilyDescription>;
+
+export const materialResponse = materialSchema.meta({
+  description: 'A plastic in one state. Null: not known, the reason under gaps where there is one.',
+});
+export const familiesResponse = z.strictObject({ families: z.array(familyResponse) });
+export const materialsResponse = z.strictObject({ materials: z.array(materialResponse) });
+
+export const healthResponse = z.strictObject({ status: z.literal('ok'), materials: z.int() });
+
+export const problemSchema = z
+  .strictObject({
+    type: z.string(),
+    title: z.string(),
+    status: z.int(),
+    detail: z.string(),
+    instance: z.string(),
+    requestId: z.string(),
+    errors: z
+      .array(
+        z.strictObject({
+          field: z.string(),
+          message: z.string(),
+          bound: z.number().optional(),
+          unit: z.string().optional(),
+          min: z.number().optional(),
+          max: z.number().optional(),
+        }),
+      )
+      .optional(),
+  })
+  .meta({ description: 'Problem details as of RFC 9457.' }) satisfies z.ZodType<Problem>;
