@@ -22,3 +22,19 @@ export class NotFound extends Error {
     this.name = 'NotFound';
   }
 }
+
+/** The answer would be larger than allowed. Maps to HTTP 413. */
+export class TooLarge extends Error {
+  constructor(message: string) {
+    super(message);
+    this.name = 'TooLarge';
+  }
+}
+
+/** The server cannot do it now but may a little later. Maps to HTTP 503. */
+export class Unavailable extends Error {
+  constructor(message: string) {
+    super(message);
+    this.name = 'Unavailable';
+  }
+}
