@@ -26,8 +26,8 @@ export interface DrawnDimension {
 const ARROW = 8;
 const GAP = 3;
 const OVERSHOOT = 5;
-/** A dimension seen end on cannot be read and is left out. */
-const SHORTEST = 7;
+/** A dimension seen nearly end on, as a share of its true length, cannot be read and is left out. */
+const END_ON = 0.16;
 const LABEL_HEIGHT = 20;
 const CHARACTER = 7.4;
 
@@ -86,11 +86,23 @@ interface Laid {
   readonly extensions: readonly Segment[];
 }
 
-function lay(callout: Callout, project: Project): Laid | null {
+/** Of a parallel projection: the three axes' lengths on the screen, squared, add up to twice the scale squared. */
+function pixelsPerMm(project: Project): number {
+  const origin = project([0, 0, 0]);
+  const axes: Vec3[] = [
+    [1, 0, 0],
+    [0, 1, 0],
+    [0, 0, 1],
+  ];
+  return Math.sqrt(axes.reduce((sum, axis) => sum + towards(origin, project(axis)).size ** 2, 0) / 2);
+}
+
+function lay(callout: Callout, project: Project, scale: number): Laid | null {
   const [from, to] = [project(callout.from), project(callout.to)];
   const [a, b] = [project(add(callout.from, callout.offset)), project(add(callout.to, callout.offset))];
   const along = towards(a, b);
-  if (along.size < SHORTEST) return null;
+  const length = Math.hypot(...[0, 1, 2].map((k) => callout.to[k]! - callout.from[k]!));
+  if (along.size < Math.max(0.5, END_ON * length * scale)) return null;
   const away = towards(
     { ...from, x: (from.x + to.x) / 2, y: (from.y + to.y) / 2 },
     {
@@ -180,8 +192,9 @@ export function drawDimensions(
 ): DrawnDimension[] {
   const order = [...callouts].sort((a, b) => Number(b.field === emphasis) - Number(a.field === emphasis));
   const taken: Label[] = [];
+  const scale = pixelsPerMm(project);
   return order.flatMap((callout) => {
-    const laid = lay(callout, project);
+    const laid = lay(callout, project, scale);
     if (!laid) return [];
     const text = textOf(callout);
     const label = placed(laid, text, taken, size);

@@ -1,6 +1,6 @@
 import type { Motion, Posed } from '@/generators/contract';
 import type { BuiltBody, TriMesh } from '@/lib/geometry/kernel';
-import { bentBy, posedLike, refine } from './refine';
+import { bentBy, posedLike, REFINE_LIMITS, refine } from './refine';
 import { type Shading, shadingOf } from './shading';
 
 /** A body ready to be drawn and moved. `mesh` is at rest, fine enough to bend where the motion bends it. */
@@ -17,15 +17,20 @@ const STRAIN_SHARE = 0.03;
 
 const sizeOf = ({ bounds: b }: BuiltBody): number => Math.hypot(b[3] - b[0], b[4] - b[1], b[5] - b[2]);
 
-function fineEnough(body: BuiltBody, motion: Motion | null): TriMesh {
+function fineEnough(body: BuiltBody, motion: Motion | null, maxTriangles: number): TriMesh {
   if (!motion) return body.mesh;
   const strainStep = Math.max(motion.peakStrain * STRAIN_SHARE, 1e-6);
-  return refine(body.mesh, bentBy(motion, body.name, sizeOf(body) * SAG_SHARE, strainStep));
+  const rule = bentBy(motion, body.name, sizeOf(body) * SAG_SHARE, strainStep);
+  return refine(body.mesh, rule, { ...REFINE_LIMITS, maxTriangles });
 }
 
 /** Pass the motion where the part will be moved; without it the mesh is drawn as built. */
-export function prepare(body: BuiltBody, motion: Motion | null): PreparedBody {
-  const mesh = fineEnough(body, motion);
+export function prepare(
+  body: BuiltBody,
+  motion: Motion | null,
+  maxTriangles = REFINE_LIMITS.maxTriangles,
+): PreparedBody {
+  const mesh = fineEnough(body, motion, maxTriangles);
   return { name: body.name, mesh, shading: shadingOf(mesh) };
 }
 

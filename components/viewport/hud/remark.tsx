@@ -1,0 +1,27 @@
+import type { ViewportState } from '../types';
+
+interface RemarkProps {
+  readonly state: ViewportState;
+  /** mm between the layer lines shown; null off the bed */
+  readonly layerStep: number | null;
+}
+
+function wordsOf({ status, message }: ViewportState, layerStep: number | null): string | null {
+  if (status === 'loading') return 'Making the shape…';
+  if (message) return message;
+  return layerStep === null
+    ? null
+    : `Layers lie level: a line every ${layerStep} mm of height. Bed squares are 10 mm.`;
+}
+
+/** What there is to say about the picture. */
+export function Remark({ state, layerStep }: RemarkProps) {
+  return (
+    <p
+      role="status"
+      className="pointer-events-none absolute top-15 left-3 max-w-[60%] rounded-field bg-sheet/90 px-2 py-1 text-[13px] text-muted empty:hidden"
+    >
+      {wordsOf(state, layerStep)}
+    </p>
+  );
+}

@@ -1,0 +1,91 @@
+'use client';
+import { useEffect, useLayoutEffect, useMemo } from 'react';
+import type { Plane } from 'three';
+import type { Moved } from '../mesh/arrange';
+import { bodyColour } from '../palette';
+import type { BodyStyle, PictureProps } from '../scene-props';
+import { bodyModel } from './body-model';
+import { rampTexture, type SurfaceLook, surfaceMaterial } from './surface-material';
+
+interface BodyProps {
+  readonly moved: Moved;
+  readonly style: BodyStyle;
+  readonly look: SurfaceLook;
+  readonly ramp: ReturnType<typeof rampTexture>;
+}
+
+function Body({ moved, style, look, ramp }: BodyProps) {
+  const model = useMemo(() => bodyModel(moved.body), [moved.body]);
+  const surface = useMemo(() => surfaceMaterial(ramp), [ramp]);
+  useEffect(() => () => model.dispose(), [model]);
+  useEffect(() => () => surface.material.dispose(), [surface]);
+  useLayoutEffect(() => model.show(moved), [model, moved]);
+  surface.apply(look);
+  const seeThrough = style === 'see-through';
+  return (
+    <group visible={style !== 'hidden'}>
+      <mesh
+        geometry={model.faces}
+        material={surface.material}
+        frustumCulled={false}
+        renderOrder={seeThrough ? 4 : 1}
+      />
+      <lineSegments geometry={model.creases} frustumCulled={false} renderOrder={seeThrough ? 5 : 2}>
+        <lineBasicMaterial
+          color={look.ink}
+          transparent
+          opacity={seeThrough ? 0.45 : 0.85}
+          clippingPlanes={look.planes}
+        />
+      </lineSegments>
+    </group>
+  );
+}
+
+type BodiesProps = Pick<
+  PictureProps,
+  'moved' | 'styles' | 'palette' | 'paint' | 'scaleEnd' | 'allowable' | 'bed'
+> & { readonly planes: Plane[] };
+
+export function Bodies({ moved, styles, palette, paint, scaleEnd, allowable, bed, planes }: BodiesProps) {
+  const ramp = useMemo(rampTexture, []);
+  useEffect(() => () => ramp.dispose(), [ramp]);
+  return moved.map((one, index) => {
+    const style = styles[one.body.name] ?? 'solid';
+    return (
+      <Body
+        key={one.body.name}
+        moved={one}
+        style={style}
+        ramp={ramp}
+        look={{
+          colour: bodyColour(palette, index),
+          ink: palette.ink,
+          over: palette.over,
+          seeThrough: style === 'see-through',
+          strained: paint === 'strain',
+          scaleEnd,
+          allowable: allowable ?? Infinity,
+          layerStep: bed?.layerStep ?? 0,
+          planes,
+        }}
+      />
+    );
+  });
+}
+
+/** Where the part was before it bent. */
+export function Ghost({ ghost, palette }: Pick<PictureProps, 'ghost' | 'palette'>) {
+  return ghost.map((one) => <GhostBody key={one.body.name} moved={one} colour={palette.petrol} />);
+}
+
+function GhostBody({ moved, colour }: { moved: Moved; colour: string }) {
+  const model = useMemo(() => bodyModel(moved.body), [moved.body]);
+  useEffect(() => () => model.dispose(), [model]);
+  useLayoutEffect(() => model.show(moved), [model, moved]);
+  return (
+    <lineSegments geometry={model.creases} frustumCulled={false} renderOrder={3}>
+      <lineBasicMaterial color={colour} transparent opacity={0.5} depthWrite={false} />
+    </lineSegments>
+  );
+}

@@ -1,0 +1,156 @@
+'use client';
+import { useCallback, useEffect, useId, useMemo, useRef, useState } from 'react';
+import { describePicture } from './describe';
+import { scaleEnd } from './drawing/ramp';
+import type { ViewCommands } from './drawing/views';
+import { BodyChips } from './hud/body-chips';
+import { CutControl } from './hud/cut-control';
+import { Overlay } from './hud/overlay';
+import { Remark } from './hud/remark';
+import { StrainLegend } from './hud/strain-legend';
+import { ViewButtons } from './hud/view-buttons';
+import { viewKey } from './keys';
+import { bodyColour, usePalette } from './palette';
+import { Picture } from './picture';
+import type { BodyStyle } from './scene-props';
+import type { BodyFacts, ViewportProps, ViewportState } from './types';
+import { useArrangement } from './use-arrangement';
+import { type Build, type BuildState, useBuild } from './use-build';
+import { useCut } from './use-cut';
+import { type Drawing, REMARKS, useDrawing } from './use-drawing';
+import { useOverlay } from './use-overlay';
+
+const INSTRUCTIONS = '3-D view. Arrow keys turn, plus and minus zoom, F fits, 1 to 7 give standard views.';
+
+function factsOf(build: Build | null): BodyFacts[] {
+  return (build?.bodies ?? []).map(({ name, mesh, volume, bounds: b }) => ({
+    name,
+    triangles: mesh.indices.length / 3,
+    volume,
+    size: [b[3] - b[0], b[4] - b[1], b[5] - b[2]],
+  }));
+}
+
+/** Bodies after the first are seen through, so that what moves inside them shows; not on the bed or cut open. */
+function stylesOf(
+  facts: readonly BodyFacts[],
+  chosen: Readonly<Record<string, BodyStyle>>,
+  allSolid: boolean,
+): Record<string, BodyStyle> {
+  const usual = (index: number): BodyStyle => (index > 0 && !allSolid ? 'see-through' : 'solid');
+  return Object.fromEntries(facts.map(({ name }, index) => [name, chosen[name] ?? usual(index)]));
+}
+
+function stateOf({ build, message, buildMs }: BuildState, drawing: Drawing): ViewportState {
+  const bodies = factsOf(build);
+  const remark = message ?? REMARKS[drawing];
+  const drawn = drawing === 'works' ? 'ready' : 'no-webgl';
+  const status = message ? 'failed' : build && drawing !== 'unknown' ? drawn : 'loading';
+  return { status, bodies, ...(remark && { message: remark }), ...(buildMs !== null && { buildMs }) };
+}
+
+function useReported(built: BuildState, drawing: Drawing, onState: ViewportProps['onState']): ViewportState {
+  const state = useMemo(() => stateOf(built, drawing), [built, drawing]);
+  useEffect(() => {
+    onState?.(state);
+  }, [onState, state]);
+  return state;
+}
+
+/**
+ * The part in 3-D. `motion` and `callouts` belong to `values`: pass the same objects as long as the values are the
+ * same, for each new one is worked out and drawn afresh.
+ */
+export default function Viewport(props: ViewportProps) {
+  const { family, values, motion, flex, paint, strainScale, showDimensions, cut, onBed, callouts } = props;
+  const stage = useRef<HTMLDivElement>(null);
+  const descriptionId = useId();
+  const palette = usePalette(stage);
+  const { drawing, lose } = useDrawing();
+  const [commands, setCommands] = useState<ViewCommands | null>(null);
+  const [chosen, setChosen] = useState<Readonly<Record<string, BodyStyle>>>({});
+
+  const built = useBuild(family, values, { motion, callouts });
+  const state = useReported(built, drawing, props.onState);
+  const flat = drawing === 'none' || drawing === 'lost';
+  const shown = useArrangement(built.build, {
+    flex,
+    onBed,
+    stance: props.stance,
+    flat,
+    ghosted: showDimensions,
+  });
+  const knife = useCut(cut, shown?.now ?? null);
+  const { overlay, onFrame } = useOverlay(built, shown, props, stage);
+  const facts = state.bodies ?? [];
+  const styles = useMemo(() => stylesOf(facts, chosen, onBed || cut), [facts, chosen, onBed, cut]);
+  const end = scaleEnd(built.build?.motion?.peakStrain ?? 0, strainScale);
+  const choose = useCallback((name: string, style: BodyStyle) => {
+    setChosen((now) => ({ ...now, [name]: style }));
+  }, []);
+
+  return (
+    <section
+      aria-label="Part in 3-D"
+      className="relative h-full min-h-64 w-full overflow-hidden bg-linear-to-b from-sheet to-paper"
+    >
+      <div
+        ref={stage}
+        role="application"
+        aria-label={INSTRUCTIONS}
+        aria-describedby={descriptionId}
+        // biome-ignore lint/a11y/noNoninteractiveTabindex: an application is worked by its keys, so it takes focus
+        tabIndex={0}
+        data-viewport={state.status}
+        className="absolute inset-0 focus-visible:outline-offset-[-3px]"
+        onKeyDown={(event) => viewKey(event, commands)}
+      >
+        {palette && shown && drawing !== 'unknown' && (
+          <Picture
+            {...shown}
+            flat={flat}
+            stage={stage}
+            styles={styles}
+            palette={palette}
+            paint={onBed ? 'solid' : paint}
+            scaleEnd={end}
+            allowable={strainScale}
+            section={knife.section}
+            fitKey={`${family} ${onBed} ${flat}`}
+            label={`${facts.map(({ name }) => name).join(' and ')}, drawn to scale`}
+            describedBy={descriptionId}
+            onCommands={setCommands}
+            onFrame={onFrame}
+            onLost={lose}
+          />
+        )}
+        <Overlay {...overlay} />
+      </div>
+      <p id={descriptionId} className="sr-only">
+        {describePicture({
+          bodies: facts,
+          moment: motion && { label: motion.label, share: flex },
+          peak: shown?.peak ?? null,
+          allowable: strainScale,
+          onBed,
+          cut,
+        })}
+      </p>
+      <ViewButtons commands={commands} />
+      {paint === 'strain' && !onBed && (
+        <StrainLegend scaleEnd={end} allowable={strainScale} peak={Math.abs(shown?.peak?.strain ?? 0)} />
+      )}
+      <div className="absolute right-3 bottom-3 left-3 flex flex-wrap items-end justify-between gap-2">
+        {palette && facts.length > 1 && (
+          <BodyChips
+            bodies={facts.map(({ name }, index) => ({ name, colour: bodyColour(palette, index) }))}
+            styles={styles}
+            onStyle={choose}
+          />
+        )}
+        {knife.section && <CutControl choice={knife.choice} at={knife.section.at} onChoice={knife.choose} />}
+      </div>
+      <Remark state={state} layerStep={shown?.bed?.layerStep ?? null} />
+    </section>
+  );
+}
