@@ -32,13 +32,19 @@ const finite = (value: number | null): number | null =>
   value !== null && Number.isFinite(value) ? value : null;
 const finitePoints = (points: Curve['points']): Point[] => points.map(([x, y]) => [finite(x), finite(y)]);
 
-const figureOf = (figure: Figure): Figure => ({
-  ...figure,
-  value: finite(figure.value),
-  handbook: finite(figure.handbook),
-  low: finite(figure.low),
-  high: finite(figure.high),
-  limit: finite(figure.limit),
+const figureOf = ({ id, label, unit, ...rest }: Figure): Figure => ({
+  id,
+  label,
+  value: finite(rest.value),
+  unit,
+  handbook: finite(rest.handbook),
+  low: finite(rest.low),
+  high: finite(rest.high),
+  limit: finite(rest.limit),
+  limitKind: rest.limitKind,
+  verdict: rest.verdict,
+  because: rest.because,
+  source: rest.source,
 });
 
 const curveOf = ({ points, band, ...curve }: Curve) => ({
@@ -55,13 +61,16 @@ export async function checkDesign(request: CheckRequest): Promise<CheckResult> {
   const use: Use = { ...DEFAULT_USE, ...request.use };
   const report = family.check(parameters, material, use);
   return {
-    ...report,
+    verdict: report.verdict,
+    governing: report.governing,
+    headline: report.headline,
+    figures: report.figures.map(figureOf),
+    curves: report.curves.map(curveOf),
+    allowable: report.allowable,
+    warnings: warnings(family.parameters, parameters),
     family: request.family,
     parameters,
     material: material.id,
     use,
-    figures: report.figures.map(figureOf),
-    curves: report.curves.map(curveOf),
-    warnings: warnings(family.parameters, parameters),
   };
 }

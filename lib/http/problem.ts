@@ -4,6 +4,7 @@ import type { FieldIssue } from '@/lib/errors';
 export const PROBLEMS = {
   'malformed-json': { status: 400, title: 'The body is not JSON' },
   'not-found': { status: 404, title: 'Not found' },
+  'method-not-allowed': { status: 405, title: 'This address does not take that method' },
   'too-large': { status: 413, title: 'The body is too large' },
   'uri-too-long': { status: 414, title: 'The address is too long' },
   'unsupported-media-type': { status: 415, title: 'The body must be application/json' },

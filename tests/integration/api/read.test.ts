@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { GET as health } from '@/app/api/health/route';
+import { GET as health, POST as postHealth } from '@/app/api/health/route';
 import { DELETE as nowhere } from '@/app/api/v1/[...rest]/route';
 import { GET as family } from '@/app/api/v1/families/[id]/route';
 import { GET as families } from '@/app/api/v1/families/route';
@@ -86,4 +86,10 @@ it('says that it is well, and how many plastics its database holds', async () =>
 it('answers an address that leads nowhere with a problem, whatever the method', async () => {
   const { detail } = await problemOf(await get(nowhere, '/api/v1/teapots'), 'not-found');
   expect(detail).toBe('The address /api/v1/teapots was not found.');
+});
+
+it('names the methods an address takes to one who uses another', async () => {
+  const answer = await get(postHealth, '/api/health');
+  expect(answer.headers.get('allow')).toBe('GET');
+  await problemOf(answer, 'method-not-allowed');
 });

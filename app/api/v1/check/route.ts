@@ -7,3 +7,9 @@ export const POST = route({
   schemas: { body: checkRequest, units: CHECK_UNITS },
   handler: ({ body }) => checkDesign(body),
 });
+export {
+  takesPost as DELETE,
+  takesPost as GET,
+  takesPost as PATCH,
+  takesPost as PUT,
+} from '@/lib/http/methods';

@@ -5,3 +5,4 @@ export const GET = route({
   rateLimit: 'reads',
   handler: async () => ({ families: await describeFamilies() }),
 });
+export { takesGet as DELETE, takesGet as PATCH, takesGet as POST, takesGet as PUT } from '@/lib/http/methods';

@@ -6,3 +6,4 @@ export const GET = route({
   rateLimit: 'reads',
   handler: async () => openApiDocument(await describeFamilies()),
 });
+export { takesGet as DELETE, takesGet as PATCH, takesGet as POST, takesGet as PUT } from '@/lib/http/methods';

@@ -7,3 +7,4 @@ export const GET = route({
   schemas: { params: idParams },
   handler: ({ params }) => getMaterial(params.id),
 });
+export { takesGet as DELETE, takesGet as PATCH, takesGet as POST, takesGet as PUT } from '@/lib/http/methods';
