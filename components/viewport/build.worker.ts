@@ -48,7 +48,8 @@ async function loadFamily(id: string): Promise<Family> {
 }
 
 function because(error: unknown): string {
-  if (error instanceof InvalidInput || error instanceof NotFound) return error.message;
+  if (error instanceof InvalidInput) return error.issues.map((issue) => `${issue.message}.`).join(' ');
+  if (error instanceof NotFound) return `${error.message}.`;
   if (error instanceof KernelError) return `These dimensions do not make a closed solid (${error.message}).`;
   return `The part could not be built (${error instanceof Error ? error.message : String(error)}).`;
 }

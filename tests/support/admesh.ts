@@ -17,6 +17,8 @@ export interface AdmeshReport {
   readonly facets: number;
   readonly parts: number;
   readonly volume: number;
+  /** least x, y, z */
+  readonly least: readonly [number, number, number];
   /** everything it had to mend, by its own words; empty for a sound file */
   readonly mended: Readonly<Record<string, number>>;
 }
@@ -33,11 +35,13 @@ export function admesh(bytes: Uint8Array): AdmeshReport {
       if (!found) throw new Error(`admesh reports no "${label}":\n${report}`);
       return Number(found[1]);
     };
+    const leastOf = (axis: string) => Number(new RegExp(`Min ${axis}\\s*=\\s*(-?[\\d.]+)`).exec(report)?.[1]);
     const mended = FIXES.map((label) => [label, numberAfter(label)] as const).filter(([, n]) => n !== 0);
     return {
       facets: numberAfter('Number of facets'),
       parts: numberAfter('Number of parts'),
       volume: numberAfter('Volume'),
+      least: [leastOf('X'), leastOf('Y'), leastOf('Z')],
       mended: Object.fromEntries(mended),
     };
   } finally {
