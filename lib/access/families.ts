@@ -89,11 +89,13 @@ function withBounds(
   return field?.type === 'number' ? { ...issue, unit: field.unit, min: field.min, max: field.max } : issue;
 }
 
+/** What is wrong with the parameters, with the bounds of each number. */
+export const boundedIssues = (family: Family, issues: readonly FieldIssue[]): FieldIssue[] =>
+  issues.map((issue) => withBounds(issue, family.parameters.fields[issue.field]));
+
 /** Parameters of a family from unknown input; left out ones take the default. */
 export function readParameters(family: Family, input: unknown): Record<string, unknown> {
   const parsed = parseParameters(family.parameters, input);
   if (parsed.ok) return parsed.values;
-  throw new InvalidInput(
-    parsed.issues.map((issue) => withBounds(issue, family.parameters.fields[issue.field])),
-  );
+  throw new InvalidInput(boundedIssues(family, parsed.issues));
 }

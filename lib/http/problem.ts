@@ -5,11 +5,12 @@ export const PROBLEMS = {
   'malformed-json': { status: 400, title: 'The body is not JSON' },
   'not-found': { status: 404, title: 'Not found' },
   'method-not-allowed': { status: 405, title: 'This address does not take that method' },
-  'too-large': { status: 413, title: 'The body is too large' },
+  'too-large': { status: 413, title: 'Too large' },
   'uri-too-long': { status: 414, title: 'The address is too long' },
   'unsupported-media-type': { status: 415, title: 'The body must be application/json' },
   'invalid-input': { status: 422, title: 'The input cannot be used' },
   'too-many-requests': { status: 429, title: 'Too many requests' },
+  unavailable: { status: 503, title: 'Busy, try again shortly' },
   internal: { status: 500, title: 'Something went wrong on our side' },
 } as const;
 

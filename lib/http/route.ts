@@ -1,5 +1,5 @@
 import type { z } from 'zod';
-import { InvalidInput, NotFound } from '@/lib/errors';
+import { InvalidInput, NotFound, TooLarge, Unavailable } from '@/lib/errors';
 import { type FieldUnits, issuesOf } from './issues';
 import { BODY_LIMIT, limiter, type RateName, URL_LIMIT } from './limits';
 import { log } from './log';
@@ -32,7 +32,7 @@ interface RouteSpec<B, P> {
 type Handler = (request: Request, context: { params: Promise<unknown> }) => Promise<Response>;
 
 const GUARDS: Readonly<Record<string, string>> = {
-  'Content-Security-Policy': "default-src 'none'; frame-ancestors 'none'; sandbox",
+  'Content-Security-Policy': "default-src 'none'; frame-ancestors 'none'",
   'X-Content-Type-Options': 'nosniff',
   'X-Frame-Options': 'DENY',
   'Referrer-Policy': 'no-referrer',
@@ -83,6 +83,11 @@ function failure(error: unknown, at: { instance: string; requestId: string }): R
     const errors = error.issues.slice(0, MOST_ERRORS);
     const detail = errors.map((issue) => issue.message).join('; ');
     return problemResponse({ kind: 'invalid-input', detail, errors }, at);
+  }
+  if (error instanceof TooLarge)
+    return problemResponse({ kind: 'too-large', detail: `${error.message}.` }, at);
+  if (error instanceof Unavailable) {
+    return problemResponse({ kind: 'unavailable', detail: `${error.message}.` }, at, { 'Retry-After': '5' });
   }
   log().error({ err: error, ...at }, 'request failed');
   const detail = 'The fault is logged under this request id.';

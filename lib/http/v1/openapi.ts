@@ -1,7 +1,8 @@
 import { z } from 'zod';
 import type { FamilyDescription } from '@/lib/access/families';
-import { PROBLEMS, type ProblemKind } from '../problem';
-import { checkRequest } from './requests';
+import { PROBLEMS } from '../problem';
+import { ALWAYS, type Json, json, type Operation, PATHS, type SchemaName } from './openapi-paths';
+import { checkRequest, exportRequest } from './requests';
 import {
   checkResponse,
   familiesResponse,
@@ -12,8 +13,6 @@ import {
   problemSchema,
 } from './responses';
 
-type Json = Readonly<Record<string, unknown>>;
-
 const SCHEMAS = {
   Problem: problemSchema,
   Family: familyResponse,
@@ -22,94 +21,11 @@ const SCHEMAS = {
   Materials: materialsResponse,
   CheckRequest: checkRequest,
   CheckResult: checkResponse,
+  ExportRequest: exportRequest,
   Health: healthResponse,
-} as const;
+} as const satisfies Record<SchemaName, z.ZodType>;
 
-type SchemaName = keyof typeof SCHEMAS;
-
-interface Operation {
-  readonly operationId: string;
-  readonly summary: string;
-  readonly body?: SchemaName;
-  readonly parameters?: readonly Json[];
-  readonly answer: Json;
-  readonly problems?: readonly ProblemKind[];
-}
-
-const json = (schema: SchemaName) => ({
-  'application/json': { schema: { $ref: `#/components/schemas/${schema}` } },
-});
-const answers = (description: string, schema: SchemaName): Json => ({ description, content: json(schema) });
-
-const ID: Json = {
-  name: 'id',
-  in: 'path',
-  required: true,
-  schema: { type: 'string', minLength: 1, maxLength: 60 },
-};
-const ALWAYS: readonly ProblemKind[] = ['uri-too-long', 'too-many-requests', 'internal'];
-const BY_ID: readonly ProblemKind[] = ['not-found', 'invalid-input'];
-const WITH_BODY: readonly ProblemKind[] = [...BY_ID, 'malformed-json', 'too-large', 'unsupported-media-type'];
-
-const PATHS: Readonly<Record<string, Readonly<Record<string, Operation>>>> = {
-  '/api/v1/families': {
-    get: {
-      operationId: 'listFamilies',
-      summary: 'Part families with their parameters',
-      answer: answers('All part families', 'Families'),
-    },
-  },
-  '/api/v1/families/{id}': {
-    get: {
-      operationId: 'getFamily',
-      summary: 'One part family',
-      parameters: [ID],
-      answer: answers('The part family', 'Family'),
-      problems: BY_ID,
-    },
-  },
-  '/api/v1/materials': {
-    get: {
-      operationId: 'listMaterials',
-      summary: 'Plastics, every figure with its source',
-      answer: answers('All plastics', 'Materials'),
-    },
-  },
-  '/api/v1/materials/{id}': {
-    get: {
-      operationId: 'getMaterial',
-      summary: 'One plastic',
-      parameters: [ID],
-      answer: answers('The plastic', 'Material'),
-      problems: BY_ID,
-    },
-  },
-  '/api/v1/check': {
-    post: {
-      operationId: 'checkDesign',
-      summary: 'Will the part hold? Figures, verdicts and curves',
-      body: 'CheckRequest',
-      answer: answers('The report', 'CheckResult'),
-      problems: WITH_BODY,
-    },
-  },
-  '/api/v1/openapi.json': {
-    get: {
-      operationId: 'describeApi',
-      summary: 'This description',
-      answer: { description: 'OpenAPI 3.1', content: { 'application/json': { schema: { type: 'object' } } } },
-    },
-  },
-  '/api/health': {
-    get: {
-      operationId: 'health',
-      summary: 'Whether the server and its database answer',
-      answer: answers('They answer', 'Health'),
-    },
-  },
-};
-
-function operationOf({ body, answer, problems = [], ...rest }: Operation): Json {
+function operationOf({ body, answer, also, problems = [], ...rest }: Operation): Json {
   const failures = [...problems, ...ALWAYS].map((kind) => [
     PROBLEMS[kind].status,
     { $ref: `#/components/responses/${kind}` },
@@ -117,7 +33,7 @@ function operationOf({ body, answer, problems = [], ...rest }: Operation): Json 
   return {
     ...rest,
     ...(body && { requestBody: { required: true, content: json(body) } }),
-    responses: { 200: answer, ...Object.fromEntries(failures) },
+    responses: { 200: answer, ...also, ...Object.fromEntries(failures) },
   };
 }
 

@@ -68,6 +68,51 @@ export const checkRequest = z.strictObject({
   use: use.optional(),
 });
 
+const bodyName = z
+  .string({ error: 'bodies must be names of bodies' })
+  .min(1, 'bodies must be names of bodies')
+  .max(60, 'a name in bodies must have at most 60 characters');
+const bodies = z
+  .array(bodyName, { error: 'bodies must be a list of names' })
+  .min(1, 'bodies must name at least 1 body')
+  .max(20, 'bodies must name at most 20 bodies');
+
+const wish = {
+  family: familyId,
+  format: z.enum(['stl', '3mf'], 'format must be one of stl, 3mf'),
+  quality: z.enum(['preview', 'export'], 'quality must be one of preview, export').default('export'),
+  stance: z
+    .string({ error: 'stance must be the id of a stance' })
+    .max(60, 'stance must have at most 60 characters')
+    .optional()
+    .meta({ description: 'How the part lies on the bed; the best of the family where left out' }),
+  name: z
+    .string({ error: 'name must be a text' })
+    .trim()
+    .min(1, 'name must have at least 1 character')
+    .max(80, 'name must have at most 80 characters')
+    .optional()
+    .meta({ description: 'What the design is called, for the file name and the title inside' }),
+};
+
+export const exportRequest = z.strictObject({
+  ...wish,
+  parameters: parameters.optional(),
+  bodies: bodies.optional().meta({ description: 'Names of the bodies wanted; all where left out' }),
+  material: materialId.optional().meta({ description: 'Id of the material, named in 3MF files' }),
+});
+
+/** The words of an export link that are not the design itself; bodies are parted by commas. */
+export const exportWords = z.object({
+  ...wish,
+  bodies: z
+    .string()
+    .transform((text) => text.split(','))
+    .pipe(bodies)
+    .optional(),
+});
+export const EXPORT_WORDS = Object.keys(exportWords.shape);
+
 export const CHECK_UNITS: FieldUnits = {
   'use.temperature': 'degC',
   'material.secantModulus': 'MPa',

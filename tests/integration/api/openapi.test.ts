@@ -63,12 +63,14 @@ describe('the API description', () => {
     const known = operations().map(({ method, path }) => `${method} ${path}`);
     expect(known.sort()).toEqual([
       'get /api/health',
+      'get /api/v1/export',
       'get /api/v1/families',
       'get /api/v1/families/{id}',
       'get /api/v1/materials',
       'get /api/v1/materials/{id}',
       'get /api/v1/openapi.json',
       'post /api/v1/check',
+      'post /api/v1/export',
     ]);
   });
 
