@@ -1,6 +1,6 @@
 /**
- * Rings stretched from inside: the flat ring (plane stress, stretched alike through its depth) and the long tube
- * (loaded on a short band of its bore). Radii mm, moduli MPa, displacements mm on the RADIUS, outward positive.
+ * Closed rings: the flat ring stretched from inside (plane stress, alike through its depth), the long tube loaded on
+ * a short band of its bore, and the thin ring pinched in its plane. Radii mm, moduli MPa, displacements mm on the RADIUS, outward positive.
  */
 
 /** Flat ring: bore radius, outer radius, mm. */
@@ -36,6 +36,28 @@ export const radialStress = ({ inner, outer }: Ring, pressure: number, radius: n
 export function ringShare(ring: Ring, poisson: number): number {
   const own = boreCompliance(ring, poisson);
   return own / (own + 1 - poisson);
+}
+
+/** Radius of the mean line, thickness in the ring's plane, width across it, mm. */
+export interface ThinRing {
+  readonly radius: number;
+  readonly thickness: number;
+  readonly width: number;
+}
+
+/**
+ * Changes in mm of the two diameters of a closed thin ring pinched by two opposed forces in N, shortening negative:
+ * along the forces (pi/4 - 2/pi) P R^3/(E I), across them (2/pi - 1/2) P R^3/(E I). Inextensional.
+ * Source: Timoshenko & Young; Roark's Formulas for Stress and Strain.
+ */
+export function pinchedRing(
+  ring: ThinRing,
+  modulus: number,
+  force: number,
+): { along: number; across: number } {
+  const inertia = (ring.width * ring.thickness ** 3) / 12;
+  const scale = (force * ring.radius ** 3) / (modulus * inertia);
+  return { along: (2 / Math.PI - Math.PI / 4) * scale, across: (2 / Math.PI - 0.5) * scale };
 }
 
 /** A tube with a short band of load on its bore. mm, MPa. */

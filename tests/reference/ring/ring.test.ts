@@ -8,17 +8,8 @@ import {
   SHELL_BAND,
   tubeFactor,
 } from '@/lib/mechanics/annular';
-import {
-  curvedBarStress,
-  openRingFactor,
-  openRingForce,
-  openRingPeakStrain,
-  openRingThinStrain,
-  pinchedRing,
-} from '@/lib/mechanics/curved-ring';
 import { selfLockingAngle, wedgeFactor } from '@/lib/mechanics/friction';
-import { tubePeakStrain, tubeRadialForce } from '@/lib/mechanics/ring';
-import { radians } from '@/lib/units';
+import { pinchedRing, tubePeakStrain, tubeRadialForce } from '@/lib/mechanics/ring';
 import {
   CASE_MODULUS,
   CASE_POISSON,
@@ -46,17 +37,6 @@ describe('a tube on a shaft against finite elements', () => {
     expect(Math.abs(errorPercent(force, figure(of, 'radial_force')))).toBeLessThan(5);
     expect(Math.abs(errorPercent(push, figure(of, 'push_force')))).toBeLessThan(5);
     expect(Math.abs(errorPercent(strain, figure(of, 'peak_strain')))).toBeLessThan(5);
-  });
-});
-
-describe('an open ring against finite elements', () => {
-  it.each(casesOf('c_clip'))('$id: force within 2 %, peak strain within 3 %', (of) => {
-    const section = { radius: input(of, 'R'), thickness: input(of, 't'), width: input(of, 'b') };
-    const beta = Math.PI - radians(input(of, 'opening_deg')) / 2;
-    const force = openRingForce(section, beta, CASE_MODULUS, CASE_POISSON, 1);
-    const strain = openRingPeakStrain(section, beta, CASE_MODULUS, force);
-    expect(Math.abs(errorPercent(force, figure(of, 'force_per_mm')))).toBeLessThan(2);
-    expect(Math.abs(errorPercent(strain, figure(of, 'strain_per_mm')))).toBeLessThan(3);
   });
 });
 
@@ -113,52 +93,9 @@ describe('Snap-Fit Joints for Plastics - A Design Guide, annular snap', () => {
   });
 });
 
-describe('thin rings and curved bars against textbooks', () => {
+describe('a pinched thin ring', () => {
   it('shortens half the diameter of a pinched ring by 35.7 micrometres (Timoshenko & Young; Roark)', () => {
     const { along } = pinchedRing({ radius: 100, thickness: 5, width: 10 }, 200_000, 10);
     expect(Math.abs(errorPercent(-along / 2, 3.5707e-2))).toBeLessThan(0.1);
-  });
-
-  it('opens a slit ring by 0.1 in with 10.74 lbf and 14.3 ksi (inputs of Logan, A First Course in the Finite Element Method, P5-64)', () => {
-    const thickness = Math.sqrt((12 * 4.5e-4) / 0.06);
-    const section = { radius: 2, thickness, width: 0.06 / thickness };
-    const force = (0.05 * 18e6 * 4.5e-4) / (2 ** 3 * openRingFactor(Math.PI));
-    const stress = (2 * force * 2 * (thickness / 2)) / 4.5e-4;
-    expect(Math.abs(errorPercent(force, 10.74))).toBeLessThan(0.5);
-    expect(Math.abs(errorPercent(stress, 14_300))).toBeLessThan(0.5);
-    expect(Math.abs(errorPercent(openRingThinStrain(section, Math.PI, 0.1) * 18e6, 14_300))).toBeLessThan(
-      0.5,
-    );
-  });
-
-  it('stresses the crane hook to 16.9 and -5.63 kpsi (Shigley, Mechanical Engineering Design, example 3-15)', () => {
-    const hook = curvedBarStress({ radius: 4, thickness: 4, width: 0.75 }, 5000 * 4, 5000);
-    expect(Math.abs(errorPercent(hook.neutral, 3.641))).toBeLessThan(0.3);
-    expect(Math.abs(errorPercent(hook.inner, 16_900))).toBeLessThan(0.3);
-    expect(Math.abs(errorPercent(hook.outer, -5630))).toBeLessThan(0.3);
-  });
-
-  it.each([
-    [110, 1.6666],
-    [120, 2.22032],
-    [135, 3.10619],
-    [150, 3.92201],
-    [180, 1.5 * Math.PI],
-  ])('has the open-ring factor at %s degrees (derived here, checked by quadrature)', (beta, factor) => {
-    expect(Math.abs(openRingFactor(radians(beta)) - factor)).toBeLessThan(1e-5);
-  });
-
-  it('opens a 12 mm clip of 120 degrees on its rod with 11.96 N and 1.108 % (derived here)', () => {
-    const section = { radius: 7, thickness: 2, width: 10 };
-    const beta = radians(120);
-    const opening = 12 - 12 * Math.sin(beta);
-    const inertia = (10 * 2 ** 3) / 12;
-    const force = ((opening / 2) * 1700 * inertia) / (7 ** 3 * openRingFactor(beta));
-    expect(Math.abs(errorPercent(opening, 1.608))).toBeLessThan(0.1);
-    expect(Math.abs(errorPercent(force, 11.96))).toBeLessThan(0.1);
-    expect(Math.abs(errorPercent(openRingThinStrain(section, beta, opening), 0.01108))).toBeLessThan(0.1);
-    const bent = curvedBarStress(section, force * 7 * 1.5, 0).inner / 1700;
-    expect(Math.abs(errorPercent(bent, 0.01224))).toBeLessThan(0.1);
-    expect(Math.abs(openRingPeakStrain(section, beta, 1700, force) - bent - 0.00035)).toBeLessThan(1e-5);
   });
 });
