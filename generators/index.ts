@@ -1,6 +1,7 @@
 import { about as cantileverHook } from './cantilever-hook/about';
 import type { About, Family, Guide } from './contract';
 import { about as livingHinge } from './living-hinge/about';
+import { about as pegStrap } from './peg-strap/about';
 import { about as rodClip } from './rod-clip/about';
 
 /** What the list knows of a family before it is loaded. */
@@ -21,6 +22,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: livingHinge,
     load: () => import('./living-hinge').then((m) => m.default),
     loadGuide: () => import('./living-hinge/guide').then((m) => m.default),
+  },
+  {
+    about: pegStrap,
+    load: () => import('./peg-strap').then((m) => m.default),
+    loadGuide: () => import('./peg-strap/guide').then((m) => m.default),
   },
   {
     about: rodClip,
