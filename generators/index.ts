@@ -3,6 +3,7 @@ import type { About, Family, Guide } from './contract';
 import { about as livingHinge } from './living-hinge/about';
 import { about as pegStrap } from './peg-strap/about';
 import { about as rodClip } from './rod-clip/about';
+import { about as torsionLatch } from './torsion-latch/about';
 
 /** What the list knows of a family before it is loaded. */
 export interface FamilyEntry {
@@ -32,6 +33,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: rodClip,
     load: () => import('./rod-clip').then((m) => m.default),
     loadGuide: () => import('./rod-clip/guide').then((m) => m.default),
+  },
+  {
+    about: torsionLatch,
+    load: () => import('./torsion-latch').then((m) => m.default),
+    loadGuide: () => import('./torsion-latch/guide').then((m) => m.default),
   },
 ];
 
