@@ -8,7 +8,14 @@ import {
   highestStrain,
   strainAt,
 } from '@/lib/mechanics/large-deflection';
-import { blockSprings, type RootSection, type RootSpring, wallSprings } from '@/lib/mechanics/root';
+import {
+  blockSprings,
+  heldWidthStiffening,
+  type RootSection,
+  type RootSpring,
+  rootSection,
+  wallSprings,
+} from '@/lib/mechanics/root';
 import { wallStrain } from '@/lib/mechanics/thin-wall';
 import type { HookValues } from './schema';
 
@@ -20,11 +27,7 @@ export const armOf = (v: HookValues): Arm => ({
   tipWidth: v.tipWidth,
 });
 
-const sectionOf = (v: HookValues): RootSection => ({
-  thickness: v.rootThickness,
-  width: v.rootWidth,
-  fillet: v.rootFillet,
-});
+const sectionOf = (v: HookValues): RootSection => rootSection(armOf(v), v.rootFillet);
 
 const wallOf = (v: HookValues) => ({ thickness: v.wallThickness, span: v.wallSpan, width: v.wallWidth });
 
@@ -39,6 +42,7 @@ export const flexibleArm = (v: HookValues, poisson: number): FlexibleArm => ({
   fillet: v.rootFillet,
   springs: springsOf(v),
   poisson,
+  stiffening: heldWidthStiffening(v.rootWidth, v.armLength),
 });
 
 /** Strains of the arm bent by some deflection at its tip; all fractions, tension positive. */
@@ -57,10 +61,9 @@ export interface HookStrain {
 
 export function strainOf(v: HookValues, flexible: FlexibleArm, deflection: number): HookStrain {
   const bent = bendArm(flexible, deflection);
-  const { arm } = flexible;
-  const nominal = strainAt(arm, bent, v.rootFillet);
+  const nominal = strainAt(flexible, bent, v.rootFillet);
   const atFillet = filletConcentration(v.rootFillet / v.rootThickness) * nominal;
-  const alongArm = highestStrain(arm, bent, v.rootFillet);
+  const alongArm = highestStrain(flexible, bent, v.rootFillet);
   const wall =
     v.root === 'wall' ? wallStrain(wallOf(v), sectionOf(v), v.armLength, bent.forcePerModulus) : null;
   return { deflection, bent, nominal, fillet: atFillet, arm: Math.max(atFillet, alongArm), wall };

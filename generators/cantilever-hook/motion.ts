@@ -1,4 +1,5 @@
 import type { Material } from '@/lib/materials/types';
+import type { FlexibleArm } from '@/lib/mechanics/large-deflection';
 import { radians } from '@/lib/units';
 import type { Motion, Posed } from '../contract';
 import { engagement } from './dimensions';
@@ -13,11 +14,16 @@ function plateLift(v: HookValues, deflection: number): number {
   return Math.min(engagement(v), deflection) / Math.tan(radians(v.returnAngle));
 }
 
-function poseHook(v: HookValues, state: HookStrain, rest: Float32Array, out: Posed): void {
-  const arm = flexibleArm(v, 0).arm;
+function poseHook(
+  v: HookValues,
+  flexible: FlexibleArm,
+  state: HookStrain,
+  rest: Float32Array,
+  out: Posed,
+): void {
   for (let i = 0; i < rest.length; i += 3) {
     const [x, y, z] = [rest[i]!, rest[i + 1]!, rest[i + 2]!];
-    const moved = z > 0 ? moveArmPoint(v, arm, state, x, z) : moveBasePoint(v, state, x, y, z);
+    const moved = z > 0 ? moveArmPoint(v, flexible, state, x, z) : moveBasePoint(v, state, x, y, z);
     out.positions[i] = moved.x;
     out.positions[i + 1] = y;
     out.positions[i + 2] = moved.z;
@@ -43,7 +49,7 @@ export function motion(v: HookValues, material: Material): Motion {
     pose(body, rest, t, out) {
       const deflection = t * v.undercut;
       if (body === 'receiver') posePlate(plateLift(v, deflection), rest, out);
-      else poseHook(v, t === 1 ? full : strainOf(v, flexible, deflection), rest, out);
+      else poseHook(v, flexible, t === 1 ? full : strainOf(v, flexible, deflection), rest, out);
     },
   };
 }

@@ -1,5 +1,5 @@
 import { type Arm, thicknessAt } from '@/lib/mechanics/beam';
-import { stationValue, strainAt } from '@/lib/mechanics/large-deflection';
+import { type FlexibleArm, stationValue, strainAt } from '@/lib/mechanics/large-deflection';
 import type { HookStrain } from './mechanics';
 import type { HookValues } from './schema';
 
@@ -20,11 +20,16 @@ function halfDepth(v: HookValues, arm: Arm, z: number): number {
 }
 
 /** Strain of the face in tension at height z: nominal on the arm, raised at the fillet, fading to the base. */
-function faceStrain(v: HookValues, arm: Arm, { bent, nominal, fillet }: HookStrain, z: number): number {
+function faceStrain(
+  v: HookValues,
+  flexible: FlexibleArm,
+  { bent, nominal, fillet }: HookStrain,
+  z: number,
+): number {
   const r = v.rootFillet;
   const raised = nominal > 0 ? fillet / nominal - 1 : 0;
   const near = Math.max(0, 1 - Math.abs(z - r) / r);
-  const strain = strainAt(arm, bent, clamp(z, r, arm.length)) * (1 + raised * near * near);
+  const strain = strainAt(flexible, bent, clamp(z, r, v.armLength)) * (1 + raised * near * near);
   return z < r ? strain * Math.max(0, z / r) : strain;
 }
 
@@ -32,7 +37,14 @@ function faceStrain(v: HookValues, arm: Arm, { bent, nominal, fillet }: HookStra
  * A point of the arm after bending. Sections stay plane and turn with the slope of the middle line; the nose past
  * the catch edge turns as one piece. The arm bends towards -x, which puts its straight face (x = 0) in tension.
  */
-export function moveArmPoint(v: HookValues, arm: Arm, state: HookStrain, x: number, z: number): Moved {
+export function moveArmPoint(
+  v: HookValues,
+  flexible: FlexibleArm,
+  state: HookStrain,
+  x: number,
+  z: number,
+): Moved {
+  const { arm } = flexible;
   const s = clamp(z, 0, arm.length);
   const { bent } = state;
   const turned = stationValue(bent, bent.angle, s);
@@ -46,6 +58,6 @@ export function moveArmPoint(v: HookValues, arm: Arm, state: HookStrain, x: numb
   return {
     x: middle - stationValue(bent, bent.y, s) + off * cosine - beyond * sine,
     z: stationValue(bent, bent.x, s) + off * sine + beyond * cosine,
-    strain: faceStrain(v, arm, state, z) * inSection * outside,
+    strain: faceStrain(v, flexible, state, z) * inSection * outside,
   };
 }

@@ -9,7 +9,7 @@
 export const filletConcentration = (ratio: number): number => 1 + 0.1732 * ratio ** -0.7656;
 
 /** The arm bends as one that begins this share of R above the surface it stands on. Fitted, R/h 0.1 to 1. */
-export const FILLET_STIFFENING = 0.6725;
+export const FILLET_STIFFENING = 0.65;
 
 const ROARK_BLUNT = [
   [1.007, 1.0, -0.031],

@@ -17,6 +17,8 @@ export interface FlexibleArm {
   readonly fillet: number;
   readonly springs: readonly RootSpring[];
   readonly poisson: number;
+  /** factor on E I for an arm that cannot arch across its width; 1 for plane stress */
+  readonly stiffening: number;
 }
 
 export interface BentArm {
@@ -32,7 +34,7 @@ export interface BentArm {
 }
 
 const CELLS = 48;
-const TURNS = 40;
+const TURNS = 60;
 const CLOSE_ENOUGH = 1e-9;
 
 interface Cells {
@@ -47,14 +49,14 @@ interface Cells {
 /** kappa = 6/5 and G = E / (2 (1+nu)): gamma = 2.4 (1+nu) P / (E b h). */
 const shearAngle = (poisson: number, area: number) => (2.4 * (1 + poisson)) / area;
 
-function cut({ arm, fillet, poisson }: FlexibleArm): Cells {
+function cut({ arm, fillet, poisson, stiffening }: FlexibleArm): Cells {
   const start = FILLET_STIFFENING * fillet;
   const size = (arm.length - start) / CELLS;
   const supple = new Float64Array(CELLS);
   const shear = new Float64Array(CELLS);
   for (let i = 0; i < CELLS; i += 1) {
     const s = start + (i + 0.5) * size;
-    supple[i] = 1 / inertiaAt(arm, s);
+    supple[i] = 1 / (stiffening * inertiaAt(arm, s));
     shear[i] = shearAngle(poisson, widthAt(arm, s) * thicknessAt(arm, s));
   }
   return { size, start, supple, shear };
@@ -72,7 +74,7 @@ function slopes(cells: Cells, springs: readonly RootSpring[], x: Float64Array, o
     out[i] = slope + 0.5 * change;
     slope += change;
   }
-  return root.reduce((sum, one, i) => sum + one * (springs[i]!.behind + cells.start), 0);
+  return springs.reduce((sum, one, i) => sum + root[i]! * (one.behind + cells.start) + (one.slide ?? 0), 0);
 }
 
 function straight(cells: Cells): Float64Array {
@@ -92,8 +94,15 @@ function deflect(cells: Cells, slope: Float64Array, shift: number, p: number): [
   return [y, rate];
 }
 
+/** Moves the stations towards where the slopes put them; all the way unless the arm turns so far that it would swing. */
 function layOut(cells: Cells, slope: Float64Array, p: number, x: Float64Array): void {
-  for (let i = 0; i < CELLS; i += 1) x[i + 1] = x[i]! + Math.cos(p * slope[i]!) * cells.size;
+  const turned = p * slope[CELLS - 1]!;
+  const share = turned < 0.7 ? 1 : 0.5;
+  let place = x[0]!;
+  for (let i = 0; i < CELLS; i += 1) {
+    place += Math.cos(p * slope[i]!) * cells.size;
+    x[i + 1] = x[i + 1]! + share * (place - x[i + 1]!);
+  }
 }
 
 /** Tip deflection per unit of force over modulus for small deflections, mm/mm2: E y / P. */
@@ -149,12 +158,12 @@ export const leverAt = (bent: BentArm, s: number): number =>
   bent.x[bent.x.length - 1]! - stationValue(bent, bent.x, s);
 
 /** Nominal outer-fibre strain at arc length s, no concentration. */
-export const strainAt = (arm: Arm, bent: BentArm, s: number): number =>
-  fibreStrain(arm, s, bent.forcePerModulus * leverAt(bent, s));
+export const strainAt = ({ arm, stiffening }: FlexibleArm, bent: BentArm, s: number): number =>
+  fibreStrain(arm, s, bent.forcePerModulus * leverAt(bent, s)) / stiffening;
 
 /** Highest nominal strain on the free arm from arc length `from` to the tip. */
-export function highestStrain(arm: Arm, bent: BentArm, from: number): number {
-  let highest = strainAt(arm, bent, from);
-  for (const s of bent.along) if (s > from) highest = Math.max(highest, strainAt(arm, bent, s));
+export function highestStrain(flexible: FlexibleArm, bent: BentArm, from: number): number {
+  let highest = strainAt(flexible, bent, from);
+  for (const s of bent.along) if (s > from) highest = Math.max(highest, strainAt(flexible, bent, s));
   return highest;
 }

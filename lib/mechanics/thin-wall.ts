@@ -1,11 +1,35 @@
 import { filletConcentration } from './fillet';
-import type { RootSection, Wall } from './root';
+import type { RootSection } from './root';
+import type { Wall } from './wall-plate';
+
+const MOST_WAVES = 60;
+const PLATE_SHARE = 0.9;
+/** The ends of a wide foot take more than their share where the wall goes on past them. */
+const FOOT_ENDS = 0.2;
 
 /**
- * Strain of a wall plate at the end of the root fillet, where it overtakes the arm's for walls thinner than about
- * 0.7 of the arm: 1.1 Kt(R/tw) 6 M / (E b tw^2), M = P (L + tw/2)/2 (1 - 3 (h/2 + R)/S), each side of the arm
- * carrying half the moment. `length` mm, `forcePerModulus` P/E in mm2. Wall as wide as the arm; safe side for a
- * wider one. Fitted to finite elements, within about 4 %.
+ * Bending moment of the wall along the end of the arm's foot, per unit of width, for a moment of one carried by that
+ * side: 1/b in a wall as wide as the arm, less where the load spreads sideways. Cosine waves across a thin plate, a
+ * wave of number k falling as (1 - k x/2) e^(-k x) from the middle; derived here.
+ */
+function momentAtFoot(wall: Wall, b: number, foot: number): number {
+  const width = Math.max(wall.width, b);
+  let sum = Math.max(0, 1 - (3 * foot) / wall.span);
+  for (let n = 1; n <= MOST_WAVES; n += 1) {
+    const far = (2 * Math.PI * n * foot) / width;
+    if (far > 12) break;
+    const q = (Math.PI * n * b) / width;
+    sum += 2 * PLATE_SHARE * (Math.sin(q) / q) * (1 - far / 2) * Math.exp(-far);
+  }
+  const ends = 1 + FOOT_ENDS * Math.max(0, 1 - (1.5 * (b / width)) ** 2);
+  return (Math.max(0, sum) * ends) / width;
+}
+
+/**
+ * Strain of a wall plate at the end of the root fillet, where it overtakes the arm's in walls thinner than about 0.7
+ * of the arm: 1.1 Kt(R/tw) 6 m / (E tw^2), m = P (L + tw/2)/2 x the moment at the foot per unit of width. `length` mm,
+ * `forcePerModulus` P/E in mm2. Fitted to finite elements: within 8 % for walls as wide as the arm, within 12 % for
+ * wider ones.
  */
 export function wallStrain(
   wall: Wall,
@@ -13,9 +37,9 @@ export function wallStrain(
   length: number,
   forcePerModulus: number,
 ): number {
-  const { thickness: tw, span } = wall;
+  const { thickness: tw } = wall;
   const { thickness: h, width, fillet } = section;
-  const shareAtFoot = Math.max(0, 1 - (3 * (h / 2 + fillet)) / span);
-  const moment = (forcePerModulus * (length + tw / 2) * shareAtFoot) / 2;
-  return (1.1 * filletConcentration(fillet / tw) * 6 * moment) / (width * tw ** 2);
+  const carried = (forcePerModulus * (length + tw / 2)) / 2;
+  const moment = carried * momentAtFoot(wall, width, h / 2 + fillet);
+  return (1.1 * filletConcentration(fillet / tw) * 6 * moment) / tw ** 2;
 }
