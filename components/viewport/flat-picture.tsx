@@ -44,12 +44,12 @@ interface FlatProps extends PictureProps {
 
 /** The part drawn on the processor, for browsers without WebGL. Same views, keys and dimensions. */
 export default function FlatPicture(props: FlatProps) {
-  const { moved, styles, palette, paint, scaleEnd, box, onCommands, onFrame } = props;
+  const { moved, styles, palette, paint, scaleEnd, box, insets, onCommands, onFrame } = props;
   const svg = useRef<SVGSVGElement>(null);
   const size = useExtent(svg);
   const [stand, setStand] = useState(START);
   const frame = useMemo(() => frameOf(stand.direction), [stand.direction]);
-  const fit: Fit = useMemo(() => fitBox(box, frame, size), [box, frame, size]);
+  const fit: Fit = useMemo(() => fitBox(box, frame, size, insets), [box, frame, size, insets]);
   const project = useMemo(
     () => parallel(frame, fit.target, fit.scale * stand.closer, size),
     [frame, fit, stand.closer, size],

@@ -1,5 +1,5 @@
 import type { Placement, Vec3 } from '@/lib/geometry/kernel';
-import type { Extent, Project, ViewCommands } from './drawing/views';
+import type { Extent, Insets, Project, ViewCommands } from './drawing/views';
 import type { Moved } from './mesh/arrange';
 import type { Box } from './mesh/bounds';
 import type { Axis } from './mesh/slice';
@@ -36,6 +36,7 @@ export interface PictureProps {
   readonly box: Box;
   /** the part as it stands */
   readonly now: Box;
+  readonly insets: Insets;
   /** the picture is fitted afresh when this changes */
   readonly fitKey: string;
   readonly onCommands: (commands: ViewCommands | null) => void;

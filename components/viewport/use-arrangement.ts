@@ -4,7 +4,7 @@ import type { Stance } from '@/generators/contract';
 import { bedPlacements } from '@/generators/lay-on-bed';
 import type { BuiltBody } from '@/lib/geometry/kernel';
 import { arrange, type Moved } from './mesh/arrange';
-import { type Box, boxOf, joinBoxes } from './mesh/bounds';
+import { type Box, bedUnder, boxOf, joinBoxes } from './mesh/bounds';
 import { type Peak, peakOf, prepare } from './mesh/prepare';
 import { REFINE_LIMITS } from './mesh/refine';
 import type { BedLook } from './scene-props';
@@ -88,7 +88,7 @@ export function useArrangement(build: Build | null, wish: Wish): Arrangement | n
       moved,
       ghost: bends && ghosted ? rest : [],
       bed: placements && { placements, layerStep: layerStepFor(now.max[2] - now.min[2]) },
-      box: ends ?? now,
+      box: ends ?? joinBoxes([now, bedUnder(now)]),
       now,
       peak: statedPeak(peakOf(moved), build, flex),
     };

@@ -18,6 +18,7 @@ import { useArrangement } from './use-arrangement';
 import { type Build, type BuildState, useBuild } from './use-build';
 import { useCut } from './use-cut';
 import { type Drawing, REMARKS, useDrawing } from './use-drawing';
+import { useInsets } from './use-insets';
 import { useOverlay } from './use-overlay';
 
 const INSTRUCTIONS = '3-D view. Arrow keys turn, plus and minus zoom, F fits, 1 to 7 give standard views.';
@@ -64,6 +65,9 @@ function useReported(built: BuildState, drawing: Drawing, onState: ViewportProps
 export default function Viewport(props: ViewportProps) {
   const { family, values, motion, flex, paint, strainScale, showDimensions, cut, onBed, callouts } = props;
   const stage = useRef<HTMLDivElement>(null);
+  const top = useRef<HTMLDivElement>(null);
+  const bottom = useRef<HTMLDivElement>(null);
+  const insets = useInsets(top, bottom);
   const descriptionId = useId();
   const palette = usePalette(stage);
   const { drawing, lose } = useDrawing();
@@ -116,6 +120,7 @@ export default function Viewport(props: ViewportProps) {
             scaleEnd={end}
             allowable={strainScale}
             section={knife.section}
+            insets={insets}
             fitKey={`${family} ${onBed} ${flat}`}
             label={`${facts.map(({ name }) => name).join(' and ')}, drawn to scale`}
             describedBy={descriptionId}
@@ -136,11 +141,22 @@ export default function Viewport(props: ViewportProps) {
           cut,
         })}
       </p>
-      <ViewButtons commands={commands} />
-      {paint === 'strain' && !onBed && (
-        <StrainLegend scaleEnd={end} allowable={strainScale} peak={Math.abs(shown?.peak?.strain ?? 0)} />
-      )}
-      <div className="absolute right-3 bottom-3 left-3 flex flex-wrap items-end justify-between gap-2">
+      <div
+        ref={top}
+        className="pointer-events-none absolute inset-x-3 top-0 grid gap-2 pt-3 *:pointer-events-auto"
+      >
+        <div className="pointer-events-none flex flex-wrap items-start justify-between gap-2 *:pointer-events-auto">
+          <ViewButtons commands={commands} />
+          {paint === 'strain' && !onBed && (
+            <StrainLegend scaleEnd={end} allowable={strainScale} peak={Math.abs(shown?.peak?.strain ?? 0)} />
+          )}
+        </div>
+        <Remark state={state} layerStep={shown?.bed?.layerStep ?? null} />
+      </div>
+      <div
+        ref={bottom}
+        className="pointer-events-none absolute inset-x-3 bottom-0 flex flex-wrap items-end justify-between gap-2 pb-3 *:pointer-events-auto"
+      >
         {palette && facts.length > 1 && (
           <BodyChips
             bodies={facts.map(({ name }, index) => ({ name, colour: bodyColour(palette, index) }))}
@@ -150,7 +166,6 @@ export default function Viewport(props: ViewportProps) {
         )}
         {knife.section && <CutControl choice={knife.choice} at={knife.section.at} onChoice={knife.choose} />}
       </div>
-      <Remark state={state} layerStep={shown?.bed?.layerStep ?? null} />
     </section>
   );
 }

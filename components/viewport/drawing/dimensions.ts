@@ -1,6 +1,6 @@
 import type { Callout } from '@/generators/contract';
 import type { Vec3 } from '@/lib/geometry/kernel';
-import { formatQuantity } from '@/lib/units';
+import { UNIT_SYMBOL } from '@/lib/units';
 import type { Extent, Pixel, Project } from './views';
 
 export interface Segment {
@@ -24,6 +24,7 @@ export interface DrawnDimension {
 }
 
 const ARROW = 8;
+const LEG = 2 * ARROW;
 const GAP = 3;
 const OVERSHOOT = 5;
 /** A dimension seen nearly end on, as a share of its true length, cannot be read and is left out. */
@@ -38,7 +39,11 @@ export const SIGN: Readonly<Record<Callout['kind'], string>> = {
   angle: '',
 };
 
-export const textOf = ({ kind, value, unit }: Callout): string => SIGN[kind] + formatQuantity(value, unit);
+/** To a hundredth, zeros at the end left out, as a drawing states it. */
+export function textOf({ kind, value, unit }: Callout): string {
+  const symbol = UNIT_SYMBOL[unit];
+  return `${SIGN[kind]}${Number(value.toFixed(2))}${kind === 'angle' ? symbol : `\u202f${symbol}`}`;
+}
 
 const add = (a: Vec3, b: Vec3): Vec3 => [a[0] + b[0], a[1] + b[1], a[2] + b[2]];
 
@@ -122,6 +127,9 @@ function lay(callout: Callout, project: Project, scale: number): Laid | null {
   };
 }
 
+/** True where arrows and line fit between the extension lines; else arrows point in from outside legs. */
+const isRoomy = ({ along }: Laid): boolean => along.size > 3.2 * ARROW;
+
 type Label = DrawnDimension['label'];
 
 const overlap = (p: Label, q: Label): number =>
@@ -134,9 +142,17 @@ const outside = ({ x, y, width, height }: Label, size: Extent): number =>
   Math.max(0, height / 2 - y) +
   Math.max(0, y + height / 2 - size.height);
 
-/** Places for a text, the preferred first: along the line, stepping outward, then beyond its ends. */
-function* places({ a, b, along, out }: Laid, width: number): Generator<Label> {
+function* beyondEnds({ a, b, along }: Laid, box: Pick<Label, 'width' | 'height'>): Generator<Label> {
+  const off = Math.abs(along.x) * (box.width / 2) + Math.abs(along.y) * (box.height / 2) + LEG + 1;
+  yield { x: b.x + off * along.x, y: b.y + off * along.y, ...box };
+  yield { x: a.x - off * along.x, y: a.y - off * along.y, ...box };
+}
+
+/** Places for a text, the preferred first: beside the line, or beyond its ends where the line is short. */
+function* places(laid: Laid, width: number): Generator<Label> {
+  const { a, b, out } = laid;
   const box = { width, height: LABEL_HEIGHT };
+  if (!isRoomy(laid)) yield* beyondEnds(laid, box);
   const reach = Math.abs(out.x) * (width / 2) + Math.abs(out.y) * (LABEL_HEIGHT / 2) + 3;
   for (const step of [0, 1, 2, 3]) {
     const off = reach + step * (LABEL_HEIGHT + 2);
@@ -146,9 +162,7 @@ function* places({ a, b, along, out }: Laid, width: number): Generator<Label> {
       yield { x, y, ...box };
     }
   }
-  const beyond = Math.abs(along.x) * (width / 2) + Math.abs(along.y) * (LABEL_HEIGHT / 2) + 14;
-  yield { x: b.x + beyond * along.x, y: b.y + beyond * along.y, ...box };
-  yield { x: a.x - beyond * along.x, y: a.y - beyond * along.y, ...box };
+  yield* beyondEnds(laid, box);
 }
 
 function placed(laid: Laid, text: string, taken: readonly Label[], size: Extent): Label {
@@ -163,10 +177,11 @@ function placed(laid: Laid, text: string, taken: readonly Label[], size: Extent)
   return best!;
 }
 
-function arrowsOf({ callout, a, b, along }: Laid): { arrows: string[]; line: string } {
-  const roomy = along.size > 3.2 * ARROW;
+function arrowsOf(laid: Laid): { arrows: string[]; line: string } {
+  const { callout, a, b, along } = laid;
+  const roomy = isRoomy(laid);
   const back = { x: -along.x, y: -along.y };
-  const reach = roomy ? 0 : 2 * ARROW;
+  const reach = roomy ? 0 : LEG;
   const [start, end] = [
     { x: a.x - reach * along.x, y: a.y - reach * along.y },
     { x: b.x + reach * along.x, y: b.y + reach * along.y },

@@ -2,7 +2,7 @@ import type { Vec3 } from '@/lib/geometry/kernel';
 import type { Moved } from '../mesh/arrange';
 import { faceNormals } from '../mesh/shading';
 import { cssColour, type Rgb, strainColour } from './ramp';
-import { dot, type Frame, type Project } from './views';
+import { dot, type Frame, type Pixel, type Project } from './views';
 
 /** One stroke of the picture, far ones first: a filled patch or a crease. */
 export interface Stroke {
@@ -45,51 +45,70 @@ export function paintPicture(
   project: Project,
   scaleEnd: number | null,
 ): Stroke[] {
-  const marks = bodies.flatMap((body) => [
-    ...(body.seeThrough ? [] : facesOf(body, frame, project, scaleEnd)),
-    ...creasesOf(body.moved, project),
-  ]);
+  const marks = bodies.flatMap((body) => {
+    const { positions: p } = body.moved;
+    const pixels = Array.from({ length: p.length / 3 }, (_, v) =>
+      project([p[3 * v]!, p[3 * v + 1]!, p[3 * v + 2]!]),
+    );
+    const faces = body.seeThrough ? null : facesOf(body, frame, pixels, scaleEnd);
+    return [...(faces?.values() ?? []), ...creasesOf(body.moved, pixels, faces)];
+  });
   return joined(marks.sort((a, b) => a.depth - b.depth));
 }
 
-function facesOf({ moved, colour }: PaintedBody, frame: Frame, project: Project, scaleEnd: number | null) {
-  const { positions: p, strain } = moved;
+/** Faces that look at the eye, by triangle. */
+function facesOf(
+  { moved, colour }: PaintedBody,
+  frame: Frame,
+  pixels: readonly Pixel[],
+  scaleEnd: number | null,
+): Map<number, Mark> {
   const { indices } = moved.body.mesh;
-  const normals = faceNormals({ positions: p, indices });
-  const faces: Mark[] = [];
+  const normals = faceNormals({ positions: moved.positions, indices });
+  const faces = new Map<number, Mark>();
   for (let side = 0; side < indices.length; side += 3) {
     const normal: Vec3 = [normals[side]!, normals[side + 1]!, normals[side + 2]!];
     if (dot(normal, frame.eye) <= 0) continue;
     const vertices = [indices[side]!, indices[side + 1]!, indices[side + 2]!];
-    const corners = vertices.map((v) => project([p[3 * v]!, p[3 * v + 1]!, p[3 * v + 2]!]));
-    const mean = vertices.reduce((sum, v) => sum + strain[v]!, 0) / 3;
-    const base = scaleEnd === null ? colour : strainColour(Math.round((24 * mean) / scaleEnd) / 24);
-    const lit = brightness(normal, frame) * (scaleEnd === null ? 1 : 0.5) + (scaleEnd === null ? 0 : 0.5);
-    faces.push({
+    const corners = vertices.map((vertex) => pixels[vertex]!);
+    const strain = vertices.reduce((sum, vertex) => sum + moved.strain[vertex]!, 0) / 3;
+    faces.set(side / 3, {
       kind: 'face',
       path: `M${corners.map(({ x, y }) => `${round(x)} ${round(y)}`).join('L')}Z`,
-      fill: cssColour(base.map((c) => c * lit) as unknown as Rgb),
+      fill: fillOf(colour, strain, scaleEnd, brightness(normal, frame)),
       depth: corners.reduce((sum, { depth }) => sum + depth, 0) / 3,
     });
   }
   return faces;
 }
 
-/** Creases lie a little nearer than the faces they bound. */
-const CREASE_LIFT = 0.05;
+/** Painted faces are shaded half as much, so that the colour can be read against the scale. */
+function fillOf(own: Rgb, strain: number, scaleEnd: number | null, lit: number): string {
+  const colour = scaleEnd === null ? own : strainColour(Math.round((24 * strain) / scaleEnd) / 24);
+  const light = scaleEnd === null ? lit : (1 + lit) / 2;
+  return cssColour(colour.map((channel) => channel * light) as unknown as Rgb);
+}
 
-function creasesOf({ body, positions: p }: Moved, project: Project): Mark[] {
-  const { edges } = body.shading;
-  return Array.from({ length: edges.length / 2 }, (_, k) => {
-    const [a, b] = [3 * edges[2 * k]!, 3 * edges[2 * k + 1]!].map((at) =>
-      project([p[at]!, p[at + 1]!, p[at + 2]!]),
-    ) as [ReturnType<Project>, ReturnType<Project>];
-    return {
-      kind: 'crease',
-      path: `M${round(a.x)} ${round(a.y)}L${round(b.x)} ${round(b.y)}`,
-      fill: 'none',
-      depth: (a.depth + b.depth) / 2 + CREASE_LIFT,
-    };
+/** Creases beside a face that is seen, just in front of it; all of them where faces are not drawn. */
+function creasesOf(
+  { body }: Moved,
+  pixels: readonly Pixel[],
+  faces: ReadonlyMap<number, Mark> | null,
+): Mark[] {
+  const { edges, beside } = body.shading;
+  return Array.from({ length: edges.length / 2 }, (_, k) => k).flatMap((k) => {
+    const [a, b] = [pixels[edges[2 * k]!]!, pixels[edges[2 * k + 1]!]!];
+    const seen = [beside[2 * k]!, beside[2 * k + 1]!].flatMap((face) => faces?.get(face)?.depth ?? []);
+    if (faces && seen.length === 0) return [];
+    const path = `M${round(a.x)} ${round(a.y)}L${round(b.x)} ${round(b.y)}`;
+    return [
+      {
+        kind: 'crease' as const,
+        path,
+        fill: 'none',
+        depth: Math.max((a.depth + b.depth) / 2, ...seen) + 1e-4,
+      },
+    ];
   });
 }
 

@@ -5,6 +5,10 @@
  */
 export type Rgb = readonly [number, number, number];
 
+/** Lines and the forbidden hatch on painted surfaces, the same by day and by night as the ramp is. */
+export const PAINT_INK = '#0f2a2e';
+export const PAINT_OVER = '#b3301f';
+
 const LIGHT = 0.95;
 const DARK = 0.3;
 

@@ -82,8 +82,14 @@ export function parallel(frame: Frame, target: Vec3, scale: number, size: Extent
   };
 }
 
-/** Room left free around the part for dimensions and buttons, as shares of the picture. */
-export const FILL = 0.74;
+/** Share of the picture the part fills, the rest is for dimensions. */
+export const FILL = 0.84;
+
+/** Heights in pixels covered by buttons and scales. */
+export interface Insets {
+  readonly top: number;
+  readonly bottom: number;
+}
 
 export interface Fit {
   readonly target: Vec3;
@@ -91,13 +97,16 @@ export interface Fit {
   readonly scale: number;
 }
 
-/** Target and scale that bring a box into the picture. */
-export function fitBox(box: Box, frame: Frame, size: Extent, fill = FILL): Fit {
+/** Target and scale that bring a box into the part of the picture left free. */
+export function fitBox(box: Box, frame: Frame, size: Extent, insets: Insets): Fit {
   const corners = cornersOf(box);
   const spread = (axis: Vec3) => {
     const along = corners.map((corner) => dot(corner, axis));
     return Math.max(1e-3, Math.max(...along) - Math.min(...along));
   };
-  const scale = fill * Math.min(size.width / spread(frame.right), size.height / spread(frame.up));
-  return { target: centreOf(box), scale };
+  const height = Math.max(size.height / 3, size.height - insets.top - insets.bottom);
+  const scale = FILL * Math.min(size.width / spread(frame.right), height / spread(frame.up));
+  const raise = (insets.top - insets.bottom) / 2 / scale;
+  const target = centreOf(box).map((value, axis) => value + raise * frame.up[axis]!);
+  return { target: target as unknown as Vec3, scale };
 }

@@ -32,9 +32,17 @@ function Dimension({ dimension }: { dimension: DrawnDimension }) {
       {dimension.extensions.map((line) => (
         <line key={`${line.x1} ${line.y1}`} {...line} strokeWidth={0.8} opacity={0.7} />
       ))}
+      <path d={dimension.line} stroke="var(--sheet)" strokeWidth={weight + 3} opacity={0.6} />
       <path d={dimension.line} />
       {dimension.arrows.map((arrow) => (
-        <path key={arrow} d={arrow} fill="var(--ink)" stroke="none" />
+        <path
+          key={arrow}
+          d={arrow}
+          fill="var(--ink)"
+          stroke="var(--sheet)"
+          strokeWidth={1.5}
+          paintOrder="stroke"
+        />
       ))}
       <rect
         x={label.x - label.width / 2}

@@ -19,7 +19,7 @@ export function Remark({ state, layerStep }: RemarkProps) {
   return (
     <p
       role="status"
-      className="pointer-events-none absolute top-15 left-3 max-w-[60%] rounded-field bg-sheet/90 px-2 py-1 text-[13px] text-muted empty:hidden"
+      className="pointer-events-none w-fit max-w-full rounded-field bg-sheet/90 px-2 py-1 text-[13px] text-muted empty:hidden"
     >
       {wordsOf(state, layerStep)}
     </p>

@@ -1,70 +1,84 @@
+import type { ReactNode } from 'react';
 import { percent } from '../describe';
-import { strainGradient } from '../drawing/ramp';
+import { PAINT_INK, strainGradient } from '../drawing/ramp';
 
 interface LegendProps {
+  /** strain at the end of the scale, as a fraction */
   readonly scaleEnd: number;
   readonly allowable: number | null;
   /** largest absolute strain shown, as a fraction */
   readonly peak: number;
 }
 
-const HATCH = 'repeating-linear-gradient(135deg, rgb(15 42 46 / 0.5) 0 1px, transparent 1px 6px)';
+const HATCH = `repeating-linear-gradient(135deg, ${PAINT_INK}80 0 1px, transparent 1px 6px)`;
 
-/** The scale of the strain colours. Always beside the painted part. */
+/** The scale of the strain colours, always beside the painted part: allowable above, largest strain below. */
 export function StrainLegend({ scaleEnd, allowable, peak }: LegendProps) {
-  const at = (strain: number) => `${100 * Math.min(1, strain / scaleEnd)}%`;
+  const share = (strain: number) => Math.min(1, strain / scaleEnd);
+  const limit = allowable === null ? 'not known' : percent(allowable);
   return (
     <figure
-      className="pointer-events-none absolute top-3 right-3 m-0 grid grid-cols-[auto_auto_auto] gap-x-1.5 rounded-sheet border border-hair bg-sheet/90 p-2 text-[11px] leading-none text-ink"
-      aria-label={`Strain scale from 0 to ${percent(scaleEnd)}. Allowable ${
-        allowable === null ? 'not known' : percent(allowable)
-      }, largest now ${percent(peak)}.`}
+      aria-label={`Strain scale from 0 to ${percent(scaleEnd)}. Allowed ${limit}, largest now ${percent(peak)}.`}
+      className="pointer-events-none m-0 rounded-sheet border border-hair bg-sheet/90 px-2.5 py-2 text-[12px] leading-none text-ink"
     >
-      <figcaption className="col-span-3 mb-2 font-semibold">Strain</figcaption>
-      <Bar gradient={strainGradient(-1, 'to top')} hatch name="squeezed" />
-      <Bar gradient={strainGradient(1, 'to top')} name="pulled" />
-      <div aria-hidden="true" className="relative h-36 w-20 font-mono tabular-nums">
-        <Tick at="0%" text="0" />
-        {allowable !== null && allowable < scaleEnd && (
-          <Tick at={at(allowable)} text={`${percent(allowable)} max`} className="font-semibold text-over" />
-        )}
-        {peak > 0 && <Tick at={at(peak)} text={`${percent(peak)}`} mark />}
-        {allowable === null && <span className="absolute top-0 font-text text-muted">limit not known</span>}
+      <div aria-hidden="true" className="grid grid-cols-[auto_12rem] gap-x-2">
+        <span />
+        <div className="relative h-4">
+          {allowable === null ? (
+            <span className="text-muted">limit not known</span>
+          ) : (
+            <Mark share={share(allowable)} className="top-0 font-semibold text-over">
+              allowed {percent(allowable)}
+            </Mark>
+          )}
+        </div>
+        <Bar name="pulled" gradient={strainGradient(1, 'to right')} limit={allowable && share(allowable)} />
+        <Bar
+          name="squeezed"
+          gradient={`${HATCH}, ${strainGradient(-1, 'to right')}`}
+          limit={allowable && share(allowable)}
+        />
+        <span className="self-end text-right text-muted">0</span>
+        <div className="relative h-4">
+          {peak > 0 && (
+            <>
+              <span
+                className="absolute top-0 -translate-x-1/2 border-x-[5px] border-b-[6px] border-x-transparent border-b-ink"
+                style={{ left: `${100 * share(peak)}%` }}
+              />
+              <Mark share={share(peak)} className="bottom-0 pl-2 font-semibold">
+                {percent(peak)}
+              </Mark>
+            </>
+          )}
+        </div>
       </div>
     </figure>
   );
 }
 
-function Bar({ gradient, hatch = false, name }: { gradient: string; hatch?: boolean; name: string }) {
+function Bar({ name, gradient, limit }: { name: string; gradient: string; limit: number | null }) {
   return (
-    <div aria-hidden="true" className="relative h-36 w-5 border border-edge" style={{ background: gradient }}>
-      {hatch && <div className="absolute inset-0" style={{ background: HATCH }} />}
-      <span className="absolute bottom-1 left-1/2 origin-left -rotate-90 whitespace-nowrap text-[10px] text-[#0f2a2e]">
-        {name}
-      </span>
-    </div>
+    <>
+      <span className="self-center text-right">{name}</span>
+      <div className="relative h-3.5" style={{ background: gradient }}>
+        {limit !== null && (
+          <span className="absolute inset-y-0 border-l-2 border-over" style={{ left: `${100 * limit}%` }} />
+        )}
+      </div>
+    </>
   );
 }
 
-interface TickProps {
-  readonly at: string;
-  readonly text: string;
-  readonly mark?: boolean;
-  readonly className?: string;
-}
-
-function Tick({ at, text, mark = false, className = '' }: TickProps) {
+/** A text at its place along the scale, on the side of it that has room. */
+function Mark({ share, className, children }: { share: number; className: string; children: ReactNode }) {
+  const shift = share > 0.5 ? '-100%' : '0';
   return (
     <span
-      className={`absolute left-0 flex translate-y-1/2 items-center gap-1 whitespace-nowrap ${className}`}
-      style={{ bottom: at }}
+      className={`absolute whitespace-nowrap px-1.5 ${className}`}
+      style={{ left: `${100 * share}%`, transform: `translateX(${shift})` }}
     >
-      {mark ? (
-        <span className="border-y-[5px] border-r-[7px] border-y-transparent border-r-ink" />
-      ) : (
-        <span className="w-[7px] border-t-2 border-current" />
-      )}
-      {text}
+      {children}
     </span>
   );
 }

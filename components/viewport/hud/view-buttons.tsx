@@ -7,7 +7,7 @@ const BUTTON =
 
 export function ViewButtons({ commands }: { commands: ViewCommands | null }) {
   return (
-    <fieldset className="absolute top-3 left-3 flex rounded-sheet border border-hair bg-sheet/90 p-0.5">
+    <fieldset className="flex rounded-sheet border border-hair bg-sheet/90 p-0.5">
       <legend className="sr-only">View</legend>
       <button
         type="button"

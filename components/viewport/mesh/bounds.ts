@@ -26,6 +26,16 @@ export function boxOf(clouds: readonly { points: ArrayLike<number>; at?: Placeme
 export const joinBoxes = (boxes: readonly Box[]): Box =>
   boxOf(boxes.map(({ min, max }) => ({ points: [...min, ...max] })));
 
+/** Side of the squares drawn on the bed, mm. */
+export const BED_SQUARE = 10;
+
+/** The bed drawn under parts: whole squares, half a square or more beyond them. */
+export function bedUnder({ min, max }: Box): Box {
+  const low = (value: number) => Math.floor(value / BED_SQUARE - 0.5) * BED_SQUARE;
+  const high = (value: number) => Math.ceil(value / BED_SQUARE + 0.5) * BED_SQUARE;
+  return { min: [low(min[0]), low(min[1]), 0], max: [high(max[0]), high(max[1]), 0] };
+}
+
 export const cornersOf = ({ min, max }: Box): [number, number, number][] =>
   [0, 1, 2, 3, 4, 5, 6, 7].map((k) => [
     k & 1 ? max[0] : min[0],

@@ -1,6 +1,6 @@
 import type { Motion, Posed } from '@/generators/contract';
 import type { BuiltBody, TriMesh } from '@/lib/geometry/kernel';
-import { bentBy, posedLike, REFINE_LIMITS, refine } from './refine';
+import { bentBy, posedLike, REFINE_LIMITS, type Refined, refine, unrefined } from './refine';
 import { type Shading, shadingOf } from './shading';
 
 /** A body ready to be drawn and moved. `mesh` is at rest, fine enough to bend where the motion bends it. */
@@ -17,8 +17,8 @@ const STRAIN_SHARE = 0.03;
 
 const sizeOf = ({ bounds: b }: BuiltBody): number => Math.hypot(b[3] - b[0], b[4] - b[1], b[5] - b[2]);
 
-function fineEnough(body: BuiltBody, motion: Motion | null, maxTriangles: number): TriMesh {
-  if (!motion) return body.mesh;
+function fineEnough(body: BuiltBody, motion: Motion | null, maxTriangles: number): Refined {
+  if (!motion) return unrefined(body.mesh);
   const strainStep = Math.max(motion.peakStrain * STRAIN_SHARE, 1e-6);
   const rule = bentBy(motion, body.name, sizeOf(body) * SAG_SHARE, strainStep);
   return refine(body.mesh, rule, { ...REFINE_LIMITS, maxTriangles });
@@ -30,8 +30,8 @@ export function prepare(
   motion: Motion | null,
   maxTriangles = REFINE_LIMITS.maxTriangles,
 ): PreparedBody {
-  const mesh = fineEnough(body, motion, maxTriangles);
-  return { name: body.name, mesh, shading: shadingOf(mesh) };
+  const refined = fineEnough(body, motion, maxTriangles);
+  return { name: body.name, mesh: refined.mesh, shading: shadingOf(refined, body.mesh) };
 }
 
 /** The body at a moment of the motion; at rest without one. */

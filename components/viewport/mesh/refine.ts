@@ -2,6 +2,12 @@ import type { Motion, Posed } from '@/generators/contract';
 import type { TriMesh } from '@/lib/geometry/kernel';
 import { type Edges, edgesOf } from './edges';
 
+/** A mesh with split edges, and for each of its triangles the one it was cut from. */
+export interface Refined {
+  readonly mesh: TriMesh;
+  readonly parent: Uint32Array;
+}
+
 /** What a splitting rule sees: the mesh, its edges and the middle of each edge (xyz). */
 export interface EdgeView {
   readonly mesh: TriMesh;
@@ -19,14 +25,17 @@ export interface RefineLimits {
 
 export const REFINE_LIMITS: RefineLimits = { maxTriangles: 24_000, maxRounds: 9 };
 
+function distance(p: Float32Array, a: number, b: number): number {
+  const apart = (axis: number) => p[3 * a + axis]! - p[3 * b + axis]!;
+  return Math.hypot(apart(0), apart(1), apart(2));
+}
+
 /** Splits edges longer than `length` (mm). */
 export function longerThan(length: number): SplitRule {
   return ({ mesh: { positions: p }, edges: { count, ends } }) => {
     const scores = new Float32Array(count);
     for (let edge = 0; edge < count; edge += 1) {
-      const a = 3 * ends[2 * edge]!;
-      const b = 3 * ends[2 * edge + 1]!;
-      scores[edge] = Math.hypot(p[a]! - p[b]!, p[a + 1]! - p[b + 1]!, p[a + 2]! - p[b + 2]!) / length;
+      scores[edge] = distance(p, ends[2 * edge]!, ends[2 * edge + 1]!) / length;
     }
     return scores;
   };
@@ -37,9 +46,12 @@ export const posedLike = (points: Float32Array): Posed => ({
   strain: new Float32Array(points.length / 3),
 });
 
+const SHORTEST = 12;
+
 /**
  * Splits edges whose middle, in the moved part, lies off the chord by more than `sag` (mm), or whose strain there
- * differs from the mean of the ends by more than `strainStep`. Looks at the half-way and the last moment.
+ * differs from the mean of the ends by more than `strainStep`. Looks at the half-way and the last moment. Edges are
+ * not split below `SHORTEST` times the sag: where strain jumps, no split would be enough.
  */
 export function bentBy(motion: Motion, body: string, sag: number, strainStep: number): SplitRule {
   return ({ mesh, edges: { count, ends }, middles }) => {
@@ -52,6 +64,7 @@ export function bentBy(motion: Motion, body: string, sag: number, strainStep: nu
       for (let edge = 0; edge < count; edge += 1) {
         const a = ends[2 * edge]!;
         const b = ends[2 * edge + 1]!;
+        if (distance(mesh.positions, a, b) < SHORTEST * sag) continue;
         const off = offChord(corners.positions, a, b, halves.positions, edge) / sag;
         const step =
           Math.abs(halves.strain[edge]! - (corners.strain[a]! + corners.strain[b]!) / 2) / strainStep;
@@ -102,7 +115,12 @@ function cut(corner: readonly number[], m: readonly number[], out: number[]): vo
   else out.push(a, ab, ca, ab, b, bc, ca, bc, c, ab, bc, ca);
 }
 
-function splitOnce(mesh: TriMesh, edges: Edges, middles: Float32Array, split: readonly number[]): TriMesh {
+function splitOnce(
+  { mesh, parent }: Refined,
+  edges: Edges,
+  middles: Float32Array,
+  split: readonly number[],
+): Refined {
   const vertices = mesh.positions.length / 3;
   const positions = new Float32Array(mesh.positions.length + 3 * split.length);
   positions.set(mesh.positions);
@@ -112,6 +130,7 @@ function splitOnce(mesh: TriMesh, edges: Edges, middles: Float32Array, split: re
     positions.set(middles.subarray(3 * edge, 3 * edge + 3), 3 * (vertices + k));
   });
   const out: number[] = [];
+  const parents: number[] = [];
   for (let side = 0; side < mesh.indices.length; side += 3) {
     const sides = [side, side + 1, side + 2];
     cut(
@@ -119,21 +138,27 @@ function splitOnce(mesh: TriMesh, edges: Edges, middles: Float32Array, split: re
       sides.map((s) => middleOf[edges.ofSide[s]!]!),
       out,
     );
+    while (parents.length < out.length / 3) parents.push(parent[side / 3]!);
   }
-  return { positions, indices: Uint32Array.from(out) };
+  return { mesh: { positions, indices: Uint32Array.from(out) }, parent: Uint32Array.from(parents) };
 }
+
+export const unrefined = (mesh: TriMesh): Refined => ({
+  mesh,
+  parent: Uint32Array.from({ length: mesh.indices.length / 3 }, (_, triangle) => triangle),
+});
 
 /**
  * Splits edges at their middles, round by round, until the rule asks for no more or a limit is met. An edge is split
  * for both its triangles at once, so a closed mesh stays closed, without cracks; the surface at rest is the same.
  */
-export function refine(mesh: TriMesh, rule: SplitRule, limits: RefineLimits = REFINE_LIMITS): TriMesh {
-  let current = mesh;
+export function refine(mesh: TriMesh, rule: SplitRule, limits: RefineLimits = REFINE_LIMITS): Refined {
+  let current = unrefined(mesh);
   for (let round = 0; round < limits.maxRounds; round += 1) {
-    const edges = edgesOf(current.indices);
-    const middles = middlesOf(current.positions, edges);
-    const scores = rule({ mesh: current, edges, middles });
-    const split = chosen(scores, limits.maxTriangles - current.indices.length / 3);
+    const edges = edgesOf(current.mesh.indices);
+    const middles = middlesOf(current.mesh.positions, edges);
+    const scores = rule({ mesh: current.mesh, edges, middles });
+    const split = chosen(scores, limits.maxTriangles - current.parent.length);
     if (split.length === 0) break;
     current = splitOnce(current, edges, middles, split);
   }

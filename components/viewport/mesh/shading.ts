@@ -1,5 +1,6 @@
 import type { TriMesh } from '@/lib/geometry/kernel';
 import { edgesOf, nextCorner } from './edges';
+import type { Refined } from './refine';
 
 /**
  * How a welded mesh is shaded: corners that meet across a smooth edge share a drawn vertex, corners across a crease
@@ -10,6 +11,8 @@ export interface Shading {
   /** welded vertex of each drawn vertex */
   readonly source: Uint32Array;
   readonly edges: Uint32Array;
+  /** the triangles on both sides of each crease, -1 where there is none */
+  readonly beside: Int32Array;
 }
 
 /** Edges that turn by more than this are drawn as creases; thread flanks are, facets of a cylinder are not. */
@@ -54,30 +57,38 @@ class CornerSets {
   }
 }
 
-export function shadingOf(mesh: TriMesh, creaseAngle = CREASE_ANGLE): Shading {
+/**
+ * Creases are judged by the triangles the mesh was refined from: the pieces of one are flat, however thin, and their
+ * own normals would be noise.
+ */
+export function shadingOf({ mesh, parent }: Refined, coarse: TriMesh, creaseAngle = CREASE_ANGLE): Shading {
   const { indices } = mesh;
   const edges = edgesOf(indices);
-  const normals = faceNormals(mesh);
+  const normals = faceNormals(coarse);
   const sets = new CornerSets(indices.length);
   const smooth = Math.cos(creaseAngle);
   const creases: number[] = [];
+  const beside: number[] = [];
+  const parentOf = (side: number) => parent[Math.floor(side / 3)]!;
   for (let edge = 0; edge < edges.count; edge += 1) {
     const one = edges.sides[2 * edge]!;
     const other = edges.sides[2 * edge + 1]!;
-    if (other >= 0 && cosineBetween(normals, one, other) >= smooth) {
+    if (other >= 0 && cosineBetween(normals, parentOf(one), parentOf(other)) >= smooth) {
       sets.join(one, nextCorner(other));
       sets.join(nextCorner(one), other);
     } else {
       creases.push(edges.ends[2 * edge]!, edges.ends[2 * edge + 1]!);
+      beside.push(Math.floor(one / 3), other < 0 ? -1 : Math.floor(other / 3));
     }
   }
-  return { ...numbered(indices, sets), edges: Uint32Array.from(creases) };
+  return { ...numbered(indices, sets), edges: Uint32Array.from(creases), beside: Int32Array.from(beside) };
 }
 
 /** A triangle without area has no direction and never makes a crease. */
 function cosineBetween(normals: Float32Array, one: number, other: number): number {
-  const a = one - (one % 3);
-  const b = other - (other % 3);
+  if (one === other) return 1;
+  const a = 3 * one;
+  const b = 3 * other;
   const dot =
     normals[a]! * normals[b]! + normals[a + 1]! * normals[b + 1]! + normals[a + 2]! * normals[b + 2]!;
   return dot === 0 && (isZero(normals, a) || isZero(normals, b)) ? 1 : dot;
@@ -85,7 +96,7 @@ function cosineBetween(normals: Float32Array, one: number, other: number): numbe
 
 const isZero = (n: Float32Array, at: number): boolean => n[at] === 0 && n[at + 1] === 0 && n[at + 2] === 0;
 
-function numbered(indices: Uint32Array, sets: CornerSets): Omit<Shading, 'edges'> {
+function numbered(indices: Uint32Array, sets: CornerSets): Pick<Shading, 'indices' | 'source'> {
   const number = new Int32Array(indices.length).fill(-1);
   const drawn = new Uint32Array(indices.length);
   const source: number[] = [];

@@ -1,10 +1,13 @@
 'use client';
+import { useThree } from '@react-three/fiber';
 import { useEffect, useLayoutEffect, useMemo } from 'react';
 import type { Plane } from 'three';
+import { PAINT_INK } from '../drawing/ramp';
 import type { Moved } from '../mesh/arrange';
 import { bodyColour } from '../palette';
 import type { BodyStyle, PictureProps } from '../scene-props';
 import { bodyModel } from './body-model';
+import { outlineMaterial } from './outline-material';
 import { rampTexture, type SurfaceLook, surfaceMaterial } from './surface-material';
 
 interface BodyProps {
@@ -18,9 +21,15 @@ function Body({ moved, style, look, ramp }: BodyProps) {
   const model = useMemo(() => bodyModel(moved.body), [moved.body]);
   const surface = useMemo(() => surfaceMaterial(ramp), [ramp]);
   useEffect(() => () => model.dispose(), [model]);
+  const outline = useMemo(outlineMaterial, []);
+  const size = useThree((state) => state.size);
   useEffect(() => () => surface.material.dispose(), [surface]);
+  useEffect(() => () => outline.dispose(), [outline]);
   useLayoutEffect(() => model.show(moved), [model, moved]);
   surface.apply(look);
+  outline.color.set(look.rim);
+  outline.clippingPlanes = look.planes;
+  outline.userData.picture.set(size.width, size.height);
   const seeThrough = style === 'see-through';
   return (
     <group visible={style !== 'hidden'}>
@@ -30,9 +39,12 @@ function Body({ moved, style, look, ramp }: BodyProps) {
         frustumCulled={false}
         renderOrder={seeThrough ? 4 : 1}
       />
+      {!seeThrough && (
+        <mesh geometry={model.faces} material={outline} frustumCulled={false} renderOrder={1} />
+      )}
       <lineSegments geometry={model.creases} frustumCulled={false} renderOrder={seeThrough ? 5 : 2}>
         <lineBasicMaterial
-          color={look.ink}
+          color={seeThrough ? look.rim : look.line}
           transparent
           opacity={seeThrough ? 0.45 : 0.85}
           clippingPlanes={look.planes}
@@ -50,6 +62,7 @@ type BodiesProps = Pick<
 export function Bodies({ moved, styles, palette, paint, scaleEnd, allowable, bed, planes }: BodiesProps) {
   const ramp = useMemo(rampTexture, []);
   useEffect(() => () => ramp.dispose(), [ramp]);
+  const strained = paint === 'strain';
   return moved.map((one, index) => {
     const style = styles[one.body.name] ?? 'solid';
     return (
@@ -60,10 +73,10 @@ export function Bodies({ moved, styles, palette, paint, scaleEnd, allowable, bed
         ramp={ramp}
         look={{
           colour: bodyColour(palette, index),
-          ink: palette.ink,
-          over: palette.over,
+          line: strained ? PAINT_INK : palette.ink,
+          rim: palette.ink,
           seeThrough: style === 'see-through',
-          strained: paint === 'strain',
+          strained,
           scaleEnd,
           allowable: allowable ?? Infinity,
           layerStep: bed?.layerStep ?? 0,
@@ -75,8 +88,10 @@ export function Bodies({ moved, styles, palette, paint, scaleEnd, allowable, bed
 }
 
 /** Where the part was before it bent. */
-export function Ghost({ ghost, palette }: Pick<PictureProps, 'ghost' | 'palette'>) {
-  return ghost.map((one) => <GhostBody key={one.body.name} moved={one} colour={palette.petrol} />);
+export function Ghost({ ghost, styles, palette }: Pick<PictureProps, 'ghost' | 'styles' | 'palette'>) {
+  return ghost
+    .filter(({ body }) => styles[body.name] === 'solid')
+    .map((one) => <GhostBody key={one.body.name} moved={one} colour={palette.petrol} />);
 }
 
 function GhostBody({ moved, colour }: { moved: Moved; colour: string }) {

@@ -2,7 +2,7 @@
 import { useEffect, useMemo } from 'react';
 import { BufferAttribute, BufferGeometry, DataTexture, LinearFilter } from 'three';
 import { meshOf } from '../mesh/arrange';
-import type { Box } from '../mesh/bounds';
+import { BED_SQUARE, type Box, bedUnder } from '../mesh/bounds';
 import { footprint } from '../mesh/footprint';
 import { mix, type Palette } from '../palette';
 import type { PictureProps } from '../scene-props';
@@ -37,8 +37,6 @@ export function Shadow({ moved, styles, box, ink }: ShadowProps) {
   );
 }
 
-export const BED_SQUARE = 10;
-
 function gridLines(x0: number, x1: number, y0: number, y1: number): BufferGeometry {
   const points: number[] = [];
   for (let x = x0; x <= x1 + 1e-6; x += BED_SQUARE) points.push(x, y0, 0, x, y1, 0);
@@ -48,10 +46,10 @@ function gridLines(x0: number, x1: number, y0: number, y1: number): BufferGeomet
 
 /** The bed under the parts: a plate with squares of 10 mm. */
 export function Bed({ box, palette }: { box: Box; palette: Palette }) {
-  const x0 = Math.floor(box.min[0] / BED_SQUARE - 0.5) * BED_SQUARE;
-  const x1 = Math.ceil(box.max[0] / BED_SQUARE + 0.5) * BED_SQUARE;
-  const y0 = Math.floor(box.min[1] / BED_SQUARE - 0.5) * BED_SQUARE;
-  const y1 = Math.ceil(box.max[1] / BED_SQUARE + 0.5) * BED_SQUARE;
+  const {
+    min: [x0, y0],
+    max: [x1, y1],
+  } = bedUnder(box);
   const lines = useMemo(() => gridLines(x0, x1, y0, y1), [x0, x1, y0, y1]);
   useEffect(() => () => lines.dispose(), [lines]);
   return (

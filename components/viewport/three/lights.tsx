@@ -17,9 +17,9 @@ export function Lights() {
   });
   return (
     <>
-      <ambientLight intensity={1.25} />
-      <directionalLight ref={key} intensity={1.9} />
-      <directionalLight ref={fill} intensity={0.55} />
+      <ambientLight intensity={1.45} />
+      <directionalLight ref={key} intensity={1.8} />
+      <directionalLight ref={fill} intensity={0.26} />
     </>
   );
 }

@@ -27,17 +27,17 @@ function directionOf(controls: Controls): Direction {
   };
 }
 
-type RigProps = Pick<PictureProps, 'box' | 'fitKey' | 'onCommands' | 'onFrame'>;
+type RigProps = Pick<PictureProps, 'box' | 'insets' | 'fitKey' | 'onCommands' | 'onFrame'>;
 
 /** The eye: orbit, fit, standard views, and where points are on the screen. */
-export function Rig({ box, fitKey, onCommands, onFrame }: RigProps) {
+export function Rig({ box, insets, fitKey, onCommands, onFrame }: RigProps) {
   const camera = useThree((state) => state.camera) as OrthographicCamera;
   const size = useThree((state) => state.size);
   const element = useThree((state) => state.gl.domElement);
   const invalidate = useThree((state) => state.invalidate);
   const controls = useRef<Controls>(null);
-  const current = useRef({ box, size });
-  current.current = { box, size };
+  const current = useRef({ box, size, insets });
+  current.current = { box, size, insets };
 
   const stand = useCallback(
     (direction: Direction, target: Vec3, scale: number) => {
@@ -56,7 +56,8 @@ export function Rig({ box, fitKey, onCommands, onFrame }: RigProps) {
   );
   const frameAll = useCallback(
     (direction: Direction) => {
-      const { target, scale } = fitBox(current.current.box, frameOf(direction), current.current.size);
+      const { box, size, insets } = current.current;
+      const { target, scale } = fitBox(box, frameOf(direction), size, insets);
       stand(direction, target, scale);
     },
     [stand],
@@ -67,11 +68,11 @@ export function Rig({ box, fitKey, onCommands, onFrame }: RigProps) {
   useLayoutEffect(() => {
     frameAll(first.current ? viewNamed('corner') : directionOf(controls.current!));
     first.current = false;
-  }, [frameAll, fitKey, size.width, size.height]);
+  }, [frameAll, fitKey, size.width, size.height, insets]);
 
   useLayoutEffect(() => {
     const direction = directionOf(controls.current!);
-    const { scale } = fitBox(box, frameOf(direction), current.current.size);
+    const { scale } = fitBox(box, frameOf(direction), current.current.size, current.current.insets);
     const share = (FILL * camera.zoom) / scale;
     if (share > 0.98 || share < 0.42) frameAll(direction);
   }, [box, camera, frameAll]);

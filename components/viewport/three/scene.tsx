@@ -32,7 +32,13 @@ export default function Scene(props: SceneProps) {
     >
       <Lights />
       <Contents {...props} />
-      <Rig box={props.box} fitKey={props.fitKey} onCommands={props.onCommands} onFrame={props.onFrame} />
+      <Rig
+        box={props.box}
+        insets={props.insets}
+        fitKey={props.fitKey}
+        onCommands={props.onCommands}
+        onFrame={props.onFrame}
+      />
       <Counters stage={props.stage} />
       <CanvasManners label={props.label} describedBy={props.describedBy} onLost={props.onLost} />
     </Canvas>
@@ -55,9 +61,11 @@ function Contents({ section, ...props }: SceneProps) {
     <>
       <Bodies {...props} planes={planes} />
       {section && <CutCaps {...props} section={section} />}
-      <Ghost ghost={props.ghost} palette={props.palette} />
+      <Ghost ghost={props.ghost} styles={props.styles} palette={props.palette} />
       {props.bed && <Bed box={props.now} palette={props.palette} />}
-      <Shadow moved={props.moved} styles={props.styles} box={props.now} ink={props.palette.shade} />
+      {!section && (
+        <Shadow moved={props.moved} styles={props.styles} box={props.now} ink={props.palette.shade} />
+      )}
     </>
   );
 }

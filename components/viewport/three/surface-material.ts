@@ -7,7 +7,7 @@ import {
   SRGBColorSpace,
   type Texture,
 } from 'three';
-import { strainColour } from '../drawing/ramp';
+import { PAINT_OVER, strainColour } from '../drawing/ramp';
 
 const RAMP_SIZE = 257;
 
@@ -28,8 +28,10 @@ export function rampTexture(): Texture {
 
 export interface SurfaceLook {
   readonly colour: string;
-  readonly ink: string;
-  readonly over: string;
+  /** creases and layer lines */
+  readonly line: string;
+  /** around the body */
+  readonly rim: string;
   readonly seeThrough: boolean;
   readonly strained: boolean;
   /** strain at the end of the scale */
@@ -108,7 +110,7 @@ export function surfaceMaterial(ramp: Texture): SurfaceMaterial {
     uLayerStep: { value: 0 },
     uFlat: { value: 0 },
     uInk: { value: new Color() },
-    uOver: { value: new Color() },
+    uOver: { value: new Color(PAINT_OVER) },
   };
   material.onBeforeCompile = (shader) => {
     Object.assign(shader.uniforms, uniforms);
@@ -131,8 +133,7 @@ export function surfaceMaterial(ramp: Texture): SurfaceMaterial {
       material.opacity = look.seeThrough ? 0.26 : 1;
       material.depthWrite = !look.seeThrough;
       material.clippingPlanes = look.planes;
-      uniforms.uInk.value.set(look.ink);
-      uniforms.uOver.value.set(look.over);
+      uniforms.uInk.value.set(look.line);
       uniforms.uStrained.value = look.strained ? 1 : 0;
       uniforms.uFlat.value = look.strained ? 0.62 : 0;
       uniforms.uScaleEnd.value = look.scaleEnd;

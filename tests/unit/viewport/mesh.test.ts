@@ -1,8 +1,9 @@
 import { describe, expect, it } from 'vitest';
-import { bentBy, longerThan, refine } from '@/components/viewport/mesh/refine';
+import { bentBy, longerThan, refine, unrefined } from '@/components/viewport/mesh/refine';
 import { faceNormals, shadingOf, writeDrawn } from '@/components/viewport/mesh/shading';
 import { flatten, signedArea, slice } from '@/components/viewport/mesh/slice';
 import type { Motion } from '@/generators/contract';
+import type { TriMesh } from '@/lib/geometry/kernel';
 import { boxMesh, openSides, tubeMesh, volumeOf } from './shapes';
 
 /** A strip along x bent to a circle of radius r about y, as a motion; strain is z / r at t = 1. */
@@ -35,7 +36,7 @@ const longestEdge = ({ positions: p, indices }: ReturnType<typeof boxMesh>) =>
 
 describe('splitting long edges', () => {
   it('leaves no edge over the length, no crack and the same volume', () => {
-    const fine = refine(boxMesh(40, 4, 2), longerThan(2));
+    const { mesh: fine } = refine(boxMesh(40, 4, 2), longerThan(2));
     expect(longestEdge(fine)).toBeLessThanOrEqual(2);
     expect(openSides(fine)).toBe(0);
     expect(volumeOf(fine)).toBeCloseTo(320, 3);
@@ -43,11 +44,11 @@ describe('splitting long edges', () => {
 
   it('leaves a mesh that is fine enough as it is', () => {
     const box = boxMesh(1, 1, 1);
-    expect(refine(box, longerThan(5))).toBe(box);
+    expect(refine(box, longerThan(5)).mesh).toBe(box);
   });
 
   it('stays within the count it is given and still without cracks', () => {
-    const fine = refine(boxMesh(400, 4, 2), longerThan(0.5), { maxTriangles: 1500, maxRounds: 12 });
+    const { mesh: fine } = refine(boxMesh(400, 4, 2), longerThan(0.5), { maxTriangles: 1500, maxRounds: 12 });
     expect(fine.indices.length / 3).toBeLessThanOrEqual(1500);
     expect(fine.indices.length / 3).toBeGreaterThan(1000);
     expect(openSides(fine)).toBe(0);
@@ -56,7 +57,7 @@ describe('splitting long edges', () => {
   it('follows a strip rolled to a half circle within the sag allowed', () => {
     const radius = 40 / Math.PI;
     const motion = rolled(radius);
-    const fine = refine(boxMesh(40, 4, 1), bentBy(motion, 'strip', 0.02, 1));
+    const { mesh: fine } = refine(boxMesh(40, 4, 1), bentBy(motion, 'strip', 0.02, 1));
     const out = { positions: new Float32Array(fine.positions.length), strain: new Float32Array(1e5) };
     motion.pose('strip', fine.positions, 1, out);
     const bent = volumeOf({ positions: out.positions, indices: fine.indices });
@@ -81,27 +82,29 @@ describe('splitting long edges', () => {
       },
     };
     const box = boxMesh(40, 4, 2);
-    expect(refine(box, bentBy(turned, 'box', 0.01, 1e-4))).toBe(box);
+    expect(refine(box, bentBy(turned, 'box', 0.01, 1e-4)).mesh).toBe(box);
   });
 });
 
+const shaded = (mesh: TriMesh) => shadingOf(unrefined(mesh), mesh);
+
 describe('shading', () => {
   it('gives a box its 24 corners of flat faces and 12 creases', () => {
-    const shading = shadingOf(boxMesh(3, 2, 1));
+    const shading = shaded(boxMesh(3, 2, 1));
     expect(shading.source.length).toBe(24);
     expect(shading.edges.length / 2).toBe(12);
   });
 
   it('rounds a tube and keeps its four rims sharp', () => {
     const facets = 32;
-    const shading = shadingOf(tubeMesh(5, 4, 10, facets));
+    const shading = shaded(tubeMesh(5, 4, 10, facets));
     expect(shading.edges.length / 2).toBe(4 * facets);
     expect(shading.source.length).toBe(8 * facets);
   });
 
   it('gives a tube wall normals that point away from its axis', () => {
     const tube = tubeMesh(5, 4, 10, 32);
-    const shading = shadingOf(tube);
+    const shading = shaded(tube);
     const positions = new Float32Array(3 * shading.source.length);
     const normals = new Float32Array(3 * shading.source.length);
     writeDrawn(tube.positions, shading, positions, normals);
@@ -114,6 +117,19 @@ describe('shading', () => {
       const outward = (positions[3 * k]! * normals[3 * k]! + positions[3 * k + 1]! * normals[3 * k + 1]!) / 5;
       expect(outward).toBeGreaterThan(0.99);
     }
+  });
+
+  it('finds no crease within a face, however finely it is split', () => {
+    const box = boxMesh(30, 2, 1);
+    const refined = refine(box, longerThan(0.7));
+    const { edges } = shadingOf(refined, box);
+    const length = Array.from({ length: edges.length / 2 }, (_, k) => {
+      const [a, b] = [3 * edges[2 * k]!, 3 * edges[2 * k + 1]!];
+      return Math.hypot(
+        ...[0, 1, 2].map((axis) => refined.mesh.positions[a + axis]! - refined.mesh.positions[b + axis]!),
+      );
+    }).reduce((sum, one) => sum + one, 0);
+    expect(length).toBeCloseTo(4 * (30 + 2 + 1), 3);
   });
 
   it('gives unit normals that look outward', () => {
