@@ -6,7 +6,10 @@ const here = (path: string) => fileURLToPath(new URL(path, import.meta.url));
 export default defineConfig({
   resolve: {
     tsconfigPaths: true,
-    alias: { 'server-only': here('./tests/support/server-only.ts') },
+    alias: {
+      'server-only': here('./tests/support/server-only.ts'),
+      '@/lib/jobs/start-build-thread': here('./tests/support/start-build-thread.ts'),
+    },
   },
   test: {
     include: ['tests/{architecture,unit,reference,integration}/**/*.test.{ts,tsx}'],

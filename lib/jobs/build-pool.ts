@@ -1,8 +1,8 @@
 import 'server-only';
-import { Worker } from 'node:worker_threads';
-import { env } from '@/lib/env';
+import type { Worker } from 'node:worker_threads';
 import { InvalidInput, NotFound, TooLarge, Unavailable } from '@/lib/errors';
 import { KernelError } from '@/lib/geometry/kernel';
+import { startBuildThread } from '@/lib/jobs/start-build-thread';
 import type { ExportedPart, ExportRequest, FromExporter, PackedError } from './export.types';
 
 export type { ExportedPart, ExportRequest } from './export.types';
@@ -26,13 +26,6 @@ interface Job {
 
 /** What is used of a Worker. */
 export type ThreadPort = Pick<Worker, 'on' | 'postMessage' | 'ref' | 'unref' | 'terminate'>;
-
-/** The bundler finds the thread's code by this very expression; tests run it from the sources. */
-function startBuildThread(): ThreadPort {
-  const options =
-    env().NODE_ENV === 'test' ? { execArgv: ['--import', './lib/scripts/run-sources.mjs'] } : {};
-  return new Worker(new URL('./build.worker.ts', import.meta.url), options);
-}
 
 /** The error as it was thrown in the thread, so that callers can tell a bad input from a fault. */
 function unpack(packed: PackedError): Error {
