@@ -19,7 +19,7 @@ export interface Effect {
   readonly step: number;
   /** change of the governing figure in its own unit; null where it is not known */
   readonly change: number | null;
-  /** other headline figures that move, by label */
+  /** ids of the other headline figures that move */
   readonly moves: readonly string[];
 }
 
@@ -58,8 +58,7 @@ function compare(before: Report, after: Report, field: string, step: number): Ef
   const change = from === null || to === null ? null : moved(from, to) ? to - from : 0;
   const moves = before.headline
     .filter((id) => id !== before.governing)
-    .filter((id) => moved(figureOf(before, id)?.value ?? null, figureOf(after, id)?.value ?? null))
-    .map((id) => figureOf(before, id)!.label);
+    .filter((id) => moved(figureOf(before, id)?.value ?? null, figureOf(after, id)?.value ?? null));
   return { field, step, change, moves };
 }
 

@@ -182,21 +182,16 @@ function plain(text: string): string {
   }
 }
 
+/** A link too long is read up to its last whole word. */
+const withinLimit = (query: string): string =>
+  query.length > LINK_LIMIT ? query.slice(0, query.lastIndexOf('&', LINK_LIMIT) + 1) : query;
+
 /** The entries a link sets, and the words in it that this family does not know. A later word wins. */
 export function linkEntries(family: Family, query: string): { entries: Entries; unknown: string[] } {
-  const pairs = pairsOf(query.slice(0, LINK_LIMIT));
+  const pairs = pairsOf(withinLimit(query));
   const known = (key: string) => LINK_WORDS.includes(key) || Object.hasOwn(family.parameters.fields, key);
   const unknown = pairs.map(([key]) => key).filter((key) => !known(key));
   const entries = Object.fromEntries(pairs.filter(([key]) => known(key)));
   if (Object.keys(entries).length === 0) return { entries, unknown };
   return { entries: { ...emptyEntries(family), ...entries }, unknown };
-}
-
-/** Reads a link strictly: a word the family does not know is a fault too. */
-export function readLink(family: Family, query: string): Parsed<Design> {
-  if (query.length > LINK_LIMIT) {
-    const message = `A link may be at most ${LINK_LIMIT} characters long`;
-    return { ok: false, issues: [{ field: 'p', message, bound: LINK_LIMIT }] };
-  }
-  return readEntries(family, Object.fromEntries(pairsOf(query)));
 }

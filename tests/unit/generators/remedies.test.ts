@@ -68,6 +68,6 @@ describe('the room of a part within its limit', () => {
 
 describe('a part whose limit is not known', () => {
   it('has no remedies', () => {
-    expect(remedies({ ...subject({}), use: { ...use, layers: 'across' } })).toEqual([]);
+    expect(remedies(subject({}, { ...ROUND_PLASTIC, allowableOnce: null }))).toEqual([]);
   });
 });

@@ -25,7 +25,7 @@ describe('the effect of a dimension', () => {
       field: 'arms',
       step: 1,
       change: 0,
-      moves: ['Force to close'],
+      moves: ['mating-force'],
     });
   });
 
