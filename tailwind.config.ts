@@ -8,7 +8,9 @@ export default {
     extend: {
       colors: {
         paper: token('paper'),
+        grid: token('grid'),
         sheet: token('sheet'),
+        tint: token('tint'),
         ink: token('ink'),
         muted: token('muted'),
         hair: token('hair'),
@@ -16,7 +18,9 @@ export default {
         petrol: token('petrol'),
         'petrol-soft': token('petrol-soft'),
         marker: token('marker'),
+        'marker-ink': token('marker-ink'),
         clay: token('clay'),
+        hatch: token('hatch'),
         ok: token('ok'),
         'ok-soft': token('ok-soft'),
         near: token('near'),
@@ -32,6 +36,7 @@ export default {
         mono: ['var(--font-mono)', 'monospace'],
       },
       borderRadius: { sheet: '4px', field: '3px' },
+      boxShadow: { lift: token('lift') },
     },
   },
 } satisfies Config;

@@ -1,5 +1,6 @@
-import type { Metadata } from 'next';
+import type { Metadata, Viewport } from 'next';
 import type { ReactNode } from 'react';
+import { PageFrame } from '@/components/layout/page-frame';
 import { heading, mono, text } from './fonts';
 import './globals.css';
 
@@ -8,10 +9,26 @@ export const metadata: Metadata = {
   description: 'Design printed straps, clips, screw caps and hinges that bend without breaking.',
 };
 
+export const viewport: Viewport = {
+  themeColor: [
+    { media: '(prefers-color-scheme: light)', color: '#e6eeeb' },
+    { media: '(prefers-color-scheme: dark)', color: '#0d1a1b' },
+  ],
+};
+
 export default function RootLayout({ children }: { children: ReactNode }) {
   return (
-    <html lang="en" className={`${heading.variable} ${text.variable} ${mono.variable}`}>
-      <body>{children}</body>
+    <html
+      lang="en"
+      className={`${heading.variable} ${text.variable} ${mono.variable}`}
+      suppressHydrationWarning
+    >
+      <head>
+        <script src="/theme.js" />
+      </head>
+      <body>
+        <PageFrame>{children}</PageFrame>
+      </body>
     </html>
   );
 }

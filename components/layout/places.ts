@@ -1,0 +1,7 @@
+export interface Place {
+  readonly href: string;
+  readonly name: string;
+}
+
+/** Where the header leads. A place is listed once its page exists. */
+export const PLACES: readonly Place[] = [{ href: '/design', name: 'Design' }];

@@ -1,0 +1,46 @@
+'use client';
+
+import { type ComponentProps, type ReactNode, useId } from 'react';
+import { classNames } from './class-names';
+
+/** A button and the note it opens. The browser closes the note on Escape and on a press elsewhere. */
+export function Note({
+  trigger,
+  children,
+  noteId,
+  className,
+  ...button
+}: Omit<ComponentProps<'button'>, 'popoverTarget'> & {
+  trigger: ReactNode;
+  children: ReactNode;
+  noteId?: string;
+}) {
+  const made = useId();
+  const id = noteId ?? made;
+  const anchor = `--${id.replaceAll(/\W/g, '-')}`;
+  return (
+    <>
+      <button
+        type="button"
+        {...button}
+        className={className}
+        popoverTarget={id}
+        style={{ anchorName: anchor } as object}
+      >
+        {trigger}
+      </button>
+      <div
+        id={id}
+        popover="auto"
+        className={classNames('note', 'p-4 text-left font-normal text-sm')}
+        style={{ positionAnchor: anchor } as object}
+      >
+        {children}
+      </div>
+    </>
+  );
+}
+
+export function closeNote(element: Element): void {
+  element.closest<HTMLElement>('[popover]')?.hidePopover?.();
+}
