@@ -1,0 +1,71 @@
+import type { Family } from '@/generators/contract';
+import { linkEntries } from '@/generators/url-state';
+import { presetTyped, type Typed } from './session';
+
+/** Kept work of another version is not read. */
+const VERSION = 1;
+const LONGEST = 8000;
+
+const keyOf = (family: Family): string => `bendwell:design:${family.about.id}`;
+
+function isTyped(value: unknown): value is Typed & { version: number } {
+  if (typeof value !== 'object' || value === null) return false;
+  const { version, entries, from } = value as Record<string, unknown>;
+  return (
+    version === VERSION &&
+    (from === null || typeof from === 'string') &&
+    typeof entries === 'object' &&
+    entries !== null &&
+    Object.values(entries).every((text) => typeof text === 'string')
+  );
+}
+
+/** Kept work of this family; fields it no longer has are dropped, new ones take their default. */
+export function keptWork(family: Family, storage: Pick<Storage, 'getItem'>): Typed | null {
+  try {
+    const text = storage.getItem(keyOf(family)) ?? 'null';
+    const kept: unknown = text.length > LONGEST ? null : JSON.parse(text);
+    if (!isTyped(kept)) return null;
+    const known = Object.keys(presetTyped(family).entries);
+    const entries = known.flatMap((key) => (key in kept.entries ? [[key, kept.entries[key]!]] : []));
+    return { entries: { ...presetTyped(family).entries, ...Object.fromEntries(entries) }, from: kept.from };
+  } catch {
+    return null;
+  }
+}
+
+/** False where the browser keeps nothing, as in private windows that are full. */
+export function keepWork(
+  family: Family,
+  { entries, from }: Typed,
+  storage: Pick<Storage, 'setItem'>,
+): boolean {
+  try {
+    storage.setItem(keyOf(family), JSON.stringify({ version: VERSION, entries, from }));
+    return true;
+  } catch {
+    return false;
+  }
+}
+
+export function dropWork(family: Family, storage: Pick<Storage, 'removeItem'>): void {
+  try {
+    storage.removeItem(keyOf(family));
+  } catch {
+    return;
+  }
+}
+
+export interface Start {
+  readonly typed: Typed;
+  /** words of the link that the family does not know */
+  readonly unknown: readonly string[];
+  readonly linked: boolean;
+}
+
+/** What the page opens with: the link where it says something, else the first preset. */
+export function startOf(family: Family, query: string): Start {
+  const { entries, unknown } = linkEntries(family, query);
+  const linked = Object.keys(entries).length > 0;
+  return { typed: linked ? { entries, from: null } : presetTyped(family), unknown, linked };
+}

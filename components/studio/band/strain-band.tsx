@@ -1,0 +1,157 @@
+'use client';
+
+import { useEffect, useRef, useState } from 'react';
+import { type Figure, type Report, VERDICT_WORDS } from '@/generators/report';
+import { figureOf } from '@/generators/sensitivity';
+import { formatQuantity } from '@/lib/units';
+import { useReading } from '../session-context';
+import { SourceNote } from '../source-note';
+import { marginWords, VerdictIcon, VerdictMark } from '../verdict';
+import { BandScale, BandStripScale } from './band-scale';
+import { BigFigure } from './big-figure';
+import { Factors } from './factors';
+
+function whyUnknown(report: Report, figure: Figure): string | undefined {
+  if (figure.verdict !== 'not-known') return undefined;
+  if (figure.value === null) return figure.because;
+  return figure.unit === 'strain' && report.allowable.value === null
+    ? report.allowable.because
+    : figure.because;
+}
+
+/** Handbook and corrected figure side by side. */
+function TwoFigures({ figure }: { figure: Figure }) {
+  if (figure.handbook === null || figure.value === null) return null;
+  const text = (value: number) => formatQuantity(value, figure.unit);
+  return (
+    <dl className="flex flex-wrap gap-x-6 gap-y-0.5 text-sm">
+      <div className="flex items-baseline gap-1.5">
+        <dt className="text-muted">
+          <span aria-hidden="true">▽ </span>handbook
+        </dt>
+        <dd className="font-mono">{text(figure.handbook)}</dd>
+      </div>
+      <div className="flex items-baseline gap-1.5">
+        <dt className="text-muted">
+          <span aria-hidden="true">▮ </span>corrected
+        </dt>
+        <dd className="font-mono font-semibold">{text(figure.value)}</dd>
+      </div>
+    </dl>
+  );
+}
+
+function Governing({ figure, report }: { figure: Figure; report: Report }) {
+  const why = whyUnknown(report, figure);
+  return (
+    <div className="grid content-start gap-2">
+      <p className="text-muted">{figure.label}</p>
+      <p>
+        <BigFigure value={figure.value} unit={figure.unit} size="text-[4rem] sm:text-[4.75rem]" />
+      </p>
+      <p>
+        <VerdictMark verdict={figure.verdict ?? 'not-known'} more={marginWords(figure)} />
+      </p>
+      {why && <p className="max-w-64 text-sm">{why}</p>}
+    </div>
+  );
+}
+
+function Headline({ figure }: { figure: Figure }) {
+  const banded = figure.low !== null && figure.high !== null && figure.low !== figure.high;
+  return (
+    <div className="xl:max-w-28">
+      <dt className="mb-1.5 text-muted text-sm leading-tight">{figure.label}</dt>
+      <dd>
+        <BigFigure value={figure.value} unit={figure.unit} size="text-[2.1rem]" />
+        {banded && (
+          <span className="mt-1 block text-muted text-xs tabular-nums">
+            {formatQuantity(figure.low, figure.unit)} to {formatQuantity(figure.high, figure.unit)}
+          </span>
+        )}
+      </dd>
+    </div>
+  );
+}
+
+function Basis({ figure, report }: { figure: Figure; report: Report }) {
+  if (figure.unit === 'strain') return <Factors allowable={report.allowable} />;
+  return (
+    <div className="max-w-prose text-sm">
+      {figure.because} <SourceNote source={figure.source} of={figure.label} />
+    </div>
+  );
+}
+
+/** True while the element is out of sight above or below. */
+function useOutOfSight() {
+  const element = useRef<HTMLElement>(null);
+  const [out, setOut] = useState(false);
+  useEffect(() => {
+    const watch = new IntersectionObserver(([entry]) => setOut(!entry!.isIntersecting));
+    watch.observe(element.current!);
+    return () => watch.disconnect();
+  }, []);
+  return [element, out] as const;
+}
+
+/** The band once more, thin, while the full one is out of sight. The full one carries the words for readers. */
+function Strip({ figure }: { figure: Figure }) {
+  const verdict = figure.verdict ?? 'not-known';
+  return (
+    <div aria-hidden="true" className="fixed inset-x-0 top-0 z-40 border-ink border-b-2 bg-sheet shadow-lift">
+      <div className="frame flex h-14 items-center gap-3">
+        <span className="hidden text-muted text-sm sm:inline">{figure.label}</span>
+        <BigFigure value={figure.value} unit={figure.unit} size="text-3xl" />
+        <BandStripScale figure={figure} />
+        <VerdictIcon verdict={verdict} size={22} />
+        <span className="font-semibold text-sm">
+          <span className="hidden sm:inline">{VERDICT_WORDS[verdict]}, </span>
+          {formatQuantity(figure.limit, figure.unit)} <span className="hidden sm:inline">allowed</span>
+        </span>
+      </div>
+    </div>
+  );
+}
+
+function spoken(figure: Figure): string {
+  const limit =
+    figure.limit === null ? 'limit not known' : `limit ${formatQuantity(figure.limit, figure.unit)}`;
+  const verdict = VERDICT_WORDS[figure.verdict ?? 'not-known'];
+  return `${figure.label} ${formatQuantity(figure.value, figure.unit)}, ${limit}, ${verdict}`;
+}
+
+export function StrainBand() {
+  const report = useReading((reading) => reading.report);
+  const [element, out] = useOutOfSight();
+  const figure = figureOf(report, report.governing);
+  if (!figure) return null;
+  const headlines = report.headline.flatMap((id) => figureOf(report, id) ?? []);
+  return (
+    <>
+      <section
+        ref={element}
+        aria-label="Verdict"
+        className="grid gap-x-10 gap-y-5 rounded-sheet border border-hair bg-sheet px-5 py-5 shadow-lift sm:px-7 lg:grid-cols-[auto_1fr_auto]"
+      >
+        <Governing figure={figure} report={report} />
+        <div className="grid content-start gap-3">
+          <TwoFigures figure={figure} />
+          <BandScale figure={figure} />
+          <Basis figure={figure} report={report} />
+        </div>
+        {headlines.length > 0 && (
+          <dl className="flex flex-wrap content-start gap-x-8 gap-y-4 border-hair border-t pt-4 lg:max-w-56 lg:border-t-0 lg:border-l lg:pt-0 lg:pl-7 xl:max-w-none xl:flex-nowrap">
+            {headlines.map((one) => (
+              <Headline key={one.id} figure={one} />
+            ))}
+          </dl>
+        )}
+        <p role="status" className="sr-only">
+          {spoken(figure)}
+        </p>
+      </section>
+      {out && <Strip figure={figure} />}
+    </>
+  );
+}

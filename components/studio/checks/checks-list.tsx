@@ -1,0 +1,102 @@
+'use client';
+
+import { Sheet, SheetTitle } from '@/components/ui/sheet';
+import { warnings } from '@/generators/parameters';
+import { type Figure, VERDICT_WORDS } from '@/generators/report';
+import { formatQuantity } from '@/lib/units';
+import { useReading, useSession } from '../session-context';
+import { ToField } from '../sheet/to-field';
+import { SourceNote } from '../source-note';
+import { marginWords, VerdictIcon, VerdictMark } from '../verdict';
+
+const text = (value: number | null, figure: Figure): string => formatQuantity(value, figure.unit);
+
+function limitText(figure: Figure): string | null {
+  if (figure.limit === null) return figure.verdict ? 'limit not known' : null;
+  return `${figure.limitKind === 'max' ? 'at most' : 'at least'} ${text(figure.limit, figure)}`;
+}
+
+function Aside({ figure }: { figure: Figure }) {
+  const { low, high, handbook, value } = figure;
+  const parts = [
+    low !== null && high !== null && low !== high && `${text(low, figure)} to ${text(high, figure)}`,
+    handbook !== null && handbook !== value && `handbook ${text(handbook, figure)}`,
+  ].filter(Boolean);
+  if (parts.length === 0) return null;
+  return (
+    <p className="text-muted text-xs tabular-nums">
+      {parts.map((part) => (
+        <span key={String(part)} className="block">
+          {part}
+        </span>
+      ))}
+    </p>
+  );
+}
+
+function Check({ figure }: { figure: Figure }) {
+  const words = [figure.verdict && VERDICT_WORDS[figure.verdict], limitText(figure), marginWords(figure)];
+  return (
+    <li className="grid grid-cols-[1.5rem_1fr] gap-x-3 gap-y-1 border-hair border-t py-3.5 sm:grid-cols-[1.5rem_1fr_auto] sm:gap-x-5">
+      <span className="pt-0.5">{figure.verdict && <VerdictIcon verdict={figure.verdict} size={22} />}</span>
+      <div>
+        <h3 className="font-semibold">{figure.label}</h3>
+        <div className="mt-0.5 max-w-prose text-muted text-sm">
+          {figure.because} <SourceNote source={figure.source} of={figure.label} />
+        </div>
+      </div>
+      <div className="col-start-2 sm:col-start-3 sm:w-40 sm:text-right">
+        <p className="font-bold font-heading text-2xl tabular-nums leading-tight tracking-tight">
+          {text(figure.value, figure)}
+        </p>
+        {figure.verdict && (
+          <p className="text-sm leading-snug">
+            {words.filter(Boolean).map((word, at) => (
+              <span key={word} className={at === 0 ? 'block font-semibold' : 'block text-muted'}>
+                {word}
+              </span>
+            ))}
+          </p>
+        )}
+        <Aside figure={figure} />
+      </div>
+    </li>
+  );
+}
+
+function Warnings() {
+  const { family } = useSession();
+  const values = useReading((reading) => reading.design.values);
+  const list = warnings(family.parameters, values);
+  if (list.length === 0) return null;
+  return (
+    <ul className="mt-3 grid gap-1.5 border-near border-l-4 bg-near-soft px-3 py-2.5 text-sm">
+      {list.map(({ id, field, message }) => (
+        <li key={id} className="flex items-start gap-2">
+          <VerdictIcon verdict="close-to-limit" size={18} />
+          <span>
+            {message} <ToField name={field} />
+          </span>
+        </li>
+      ))}
+    </ul>
+  );
+}
+
+/** Every figure of the check: what it is, its limit, the verdict, why, and where it comes from. */
+export function ChecksList() {
+  const report = useReading((reading) => reading.report);
+  return (
+    <Sheet labelledBy="checks" className="px-5 pt-4 pb-2 sm:px-7">
+      <SheetTitle id="checks" aside={<VerdictMark verdict={report.verdict} more="all together" />}>
+        Checks
+      </SheetTitle>
+      <Warnings />
+      <ul className="mt-3 grid gap-x-12 xl:grid-cols-2">
+        {report.figures.map((figure) => (
+          <Check key={figure.id} figure={figure} />
+        ))}
+      </ul>
+    </Sheet>
+  );
+}

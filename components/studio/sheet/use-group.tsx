@@ -1,0 +1,61 @@
+'use client';
+
+import { SelectField } from '@/components/ui/select-field';
+import { USE_FIELDS } from '@/generators/url-state';
+import { useEntry, useIssue, useReading, useSession } from '../session-context';
+import { ChoiceRow } from './choice-row';
+import { describedBy, FieldRow, fieldId } from './field-row';
+import { Group } from './group';
+import { NumberRow } from './number-row';
+
+function MaterialRow() {
+  const session = useSession();
+  const value = useEntry('material');
+  const issue = useIssue('material');
+  const material = useReading((reading) => reading.material);
+  const optionsOf = (process: 'printed' | 'moulded') =>
+    session.materials
+      .filter((one) => one.process === process)
+      .map(({ id, name }) => ({ value: id, label: name }));
+  const moulded = optionsOf('moulded');
+  const stray = session.materials.some(({ id }) => id === value) ? [] : [{ value, label: value }];
+  return (
+    <FieldRow
+      name="material"
+      label="Plastic"
+      wide
+      help={<p>{material.summary}</p>}
+      error={issue && `${issue.message}; the check is for ${material.shortName}.`}
+      control={
+        <SelectField
+          id={fieldId('material')}
+          value={value}
+          aria-invalid={issue ? true : undefined}
+          aria-describedby={describedBy('material', Boolean(issue))}
+          options={[
+            ...stray,
+            { label: 'Printed', options: optionsOf('printed') },
+            ...(moulded.length > 0 ? [{ label: 'Moulded, to compare', options: moulded }] : []),
+          ]}
+          onChange={(event) => {
+            session.seal();
+            session.type('material', event.target.value);
+          }}
+        />
+      }
+    />
+  );
+}
+
+/** Plastic and how the part is used: what the allowed strain comes from. */
+export function UseGroup() {
+  const temperature = useReading((reading) => reading.design.use.temperature);
+  return (
+    <Group id="use" title="Plastic and use">
+      <MaterialRow />
+      <ChoiceRow name="opening" field={USE_FIELDS.opening} />
+      <ChoiceRow name="layers" field={USE_FIELDS.layers} />
+      <NumberRow name="temperature" field={USE_FIELDS.temperature} valid={temperature} wide />
+    </Group>
+  );
+}

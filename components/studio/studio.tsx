@@ -1,0 +1,114 @@
+'use client';
+
+import { use, useEffect, useEffectEvent, useState } from 'react';
+import type { ViewportState } from '@/components/viewport/types';
+import type { Family } from '@/generators/contract';
+import type { Material } from '@/lib/materials/types';
+import { dropWork, keptWork, startOf } from './autosave';
+import { StrainBand } from './band/strain-band';
+import { ChecksList } from './checks/checks-list';
+import { Curves } from './checks/curves';
+import { CopyLink } from './head/copy-link';
+import { Files } from './head/files';
+import { HistoryButtons } from './head/history-buttons';
+import { Keys } from './head/keys';
+import { Faults, Restored, UnknownWords } from './head/notices';
+import { StartingPoints } from './head/starting-points';
+import { loadFamily } from './load-family';
+import { Plastics } from './plastics';
+import { createSession, presetTyped, type Session } from './session';
+import { SessionProvider } from './session-context';
+import { DimensionSheet } from './sheet/dimension-sheet';
+import { Remedies } from './sheet/remedies';
+import { useKeeping } from './use-keeping';
+import { useUndoKeys } from './use-undo-keys';
+import { ViewPanel } from './view/view-panel';
+
+/**
+ * After the page is alive: takes the design of the address where it differs from the one the page was made with
+ * (coming back to a page kept by the browser), else the work kept here when the address says nothing.
+ */
+function useReopened(session: Session, query: string) {
+  const [restored, setRestored] = useState(false);
+  const { family } = session;
+  const reopen = useEffectEvent(() => {
+    const here = window.location.search.slice(1);
+    const start = startOf(family, here);
+    const kept = start.linked ? null : keptWork(family, localStorage);
+    const next = kept ?? (here === query ? null : start.typed);
+    if (!next) return;
+    session.replace(next);
+    session.history.getState().clear();
+    setRestored(kept !== null);
+  });
+  useEffect(() => reopen(), []);
+  const close = () => setRestored(false);
+  const fresh = () => {
+    session.replace(presetTyped(family));
+    dropWork(family, localStorage);
+    close();
+  };
+  return { restored, close, fresh };
+}
+
+function Bench({ session, query }: { session: Session; query: string }) {
+  const { family } = session;
+  const [stance, setStance] = useState<string | null>(null);
+  const [picture, setPicture] = useState<ViewportState>({ status: 'loading' });
+  const { restored, close, fresh } = useReopened(session, query);
+  useKeeping(session);
+  useUndoKeys(session);
+  return (
+    <main className="frame grid grid-cols-[minmax(0,1fr)] gap-4 pt-5 pb-14">
+      <div className="flex flex-wrap items-end justify-between gap-x-6 gap-y-3">
+        <div className="flex flex-wrap items-baseline gap-x-6">
+          <h1 className="font-bold text-4xl tracking-tight sm:text-5xl">{family.about.name}</h1>
+          <StartingPoints />
+        </div>
+        <div className="flex flex-wrap items-center gap-2">
+          <Keys />
+          <HistoryButtons />
+          <CopyLink />
+          <Files bodies={(picture.bodies ?? []).map(({ name }) => name)} stance={stance} />
+        </div>
+      </div>
+      {restored && <Restored onFresh={fresh} onKeep={close} />}
+      <UnknownWords words={startOf(family, query).unknown} />
+      <Faults />
+      <StrainBand />
+      <div className="grid items-start gap-4 lg:grid-cols-[minmax(0,1fr)_27rem]">
+        <div className="grid min-w-0 gap-4 lg:sticky lg:top-[4.5rem]">
+          <ViewPanel stance={stance} onStance={setStance} state={picture} onState={setPicture} />
+          <Remedies />
+        </div>
+        <DimensionSheet />
+      </div>
+      <ChecksList />
+      <div className="grid items-start gap-4 xl:grid-cols-2">
+        <Curves />
+        <Plastics />
+      </div>
+    </main>
+  );
+}
+
+export interface StudioProps {
+  readonly family: string;
+  readonly materials: readonly Material[];
+  /** query of the address the page was asked for, without "?" */
+  readonly query: string;
+}
+
+const begin = (family: Family, materials: readonly Material[], query: string): Session =>
+  createSession(family, materials, startOf(family, query).typed);
+
+/** The design page of a family. */
+export function Studio({ family: id, materials, query }: StudioProps) {
+  const family = use(loadFamily(id));
+  const [session] = useState(() => begin(family, materials, query));
+  return (
+    <SessionProvider value={session}>
+      <Bench session={session} query={query} />
+    </SessionProvider>
+  );
+}

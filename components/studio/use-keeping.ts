@@ -1,0 +1,63 @@
+'use client';
+
+import { useEffect } from 'react';
+import { writeLink } from '@/generators/url-state';
+import { keepWork } from './autosave';
+import type { Session } from './session';
+import { throttle } from './throttle';
+
+const ADDRESS_EVERY = 400;
+const SAVE_EVERY = 800;
+const UNDO_PAUSE = 900;
+
+/** Keeps the design in the address, so that a reload or a copied link brings it back; no new history entries. */
+function keepAddress({ family, reading }: Session) {
+  const path = window.location.pathname;
+  const address = throttle(() => {
+    if (window.location.pathname !== path) return;
+    const query = `?${writeLink(family, reading.getState().design)}`;
+    if (query !== window.location.search) window.history.replaceState(null, '', `${path}${query}`);
+  }, ADDRESS_EVERY);
+  const stop = reading.subscribe((now, was) => {
+    if (now.design !== was.design) address.call();
+  });
+  return () => {
+    stop();
+    address.cancel();
+  };
+}
+
+/** Keeps what is typed in this browser. Written only after an edit, and never read while the page is open. */
+function keepTyped({ family, typed }: Session) {
+  const save = throttle(() => keepWork(family, typed.getState(), localStorage), SAVE_EVERY);
+  const stop = typed.subscribe(save.call);
+  window.addEventListener('pagehide', save.flush);
+  return () => {
+    stop();
+    window.removeEventListener('pagehide', save.flush);
+    save.flush();
+    save.cancel();
+  };
+}
+
+/** A pause in typing ends the run of edits that undo takes back as one. */
+function sealOnPause({ typed, seal }: Session) {
+  let timer: ReturnType<typeof setTimeout> | undefined;
+  const stop = typed.subscribe(() => {
+    clearTimeout(timer);
+    timer = setTimeout(seal, UNDO_PAUSE);
+  });
+  return () => {
+    stop();
+    clearTimeout(timer);
+  };
+}
+
+export function useKeeping(session: Session): void {
+  useEffect(() => {
+    const stops = [keepAddress(session), keepTyped(session), sealOnPause(session)];
+    return () => {
+      for (const stop of stops) stop();
+    };
+  }, [session]);
+}

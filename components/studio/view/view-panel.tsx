@@ -1,0 +1,80 @@
+'use client';
+
+import dynamic from 'next/dynamic';
+import { useMemo, useState } from 'react';
+import { useStore } from 'zustand';
+import { Sheet } from '@/components/ui/sheet';
+import type { ViewportState } from '@/components/viewport/types';
+import { useReading, useSession, useSubject } from '../session-context';
+import { InWords } from './in-words';
+import { ViewBar } from './view-bar';
+import { FIRST_VIEW } from './view-state';
+
+const Viewport = dynamic(() => import('@/components/viewport/viewport'), {
+  ssr: false,
+  loading: () => <p className="grid h-full place-items-center text-muted">Setting up the view</p>,
+});
+
+/** What the picture needs of the part; the same objects as long as the part is the same. */
+function useScene() {
+  const { family, values, material } = useSubject();
+  const motion = useMemo(() => family.motion(values, material), [family, values, material]);
+  const callouts = useMemo(() => family.callouts(values), [family, values]);
+  const stances = useMemo(() => family.stances(values), [family, values]);
+  return { motion, callouts, stances };
+}
+
+/** The part, how it is looked at, and the same in words. */
+export function ViewPanel({
+  stance: chosen,
+  onStance,
+  state,
+  onState,
+}: {
+  /** id of the way it lies on the bed; the family's best where null */
+  stance: string | null;
+  onStance: (id: string) => void;
+  state: ViewportState;
+  /** stable */
+  onState: (state: ViewportState) => void;
+}) {
+  const session = useSession();
+  const { design, material, report } = useReading((reading) => reading);
+  const highlight = useStore(session.focused, ({ field }) => field);
+  const [view, setView] = useState(FIRST_VIEW);
+  const { motion, callouts, stances } = useScene();
+  const stance = stances.find((one) => one.id === chosen) ?? stances[0] ?? null;
+  return (
+    <Sheet labelledBy="picture" className="overflow-hidden">
+      <h2 id="picture" className="sr-only">
+        The part
+      </h2>
+      <div className="h-[20rem] sm:h-[27rem] lg:h-[clamp(20rem,100dvh-25rem,36rem)]">
+        <Viewport
+          family={session.family.about.id}
+          values={design.values}
+          motion={motion}
+          flex={view.onBed ? 0 : view.flex}
+          paint={view.onBed || motion.peakStrain === 0 ? 'solid' : view.paint}
+          strainScale={report.allowable.value}
+          showDimensions={view.dimensions}
+          cut={view.cut}
+          onBed={view.onBed}
+          callouts={callouts}
+          stance={stance}
+          highlightField={highlight}
+          onState={onState}
+        />
+      </div>
+      <ViewBar
+        view={view}
+        onView={(change) => setView((was) => ({ ...was, ...change }))}
+        motion={motion}
+        stances={stances}
+        stance={stance}
+        onStance={onStance}
+      />
+      <InWords state={state} material={material} />
+    </Sheet>
+  );
+}
