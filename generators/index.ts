@@ -1,5 +1,6 @@
 import { about as cantileverHook } from './cantilever-hook/about';
 import type { About, Family, Guide } from './contract';
+import { about as foldedHook } from './folded-hook/about';
 import { about as livingHinge } from './living-hinge/about';
 import { about as pegStrap } from './peg-strap/about';
 import { about as rodClip } from './rod-clip/about';
@@ -38,6 +39,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: torsionLatch,
     load: () => import('./torsion-latch').then((m) => m.default),
     loadGuide: () => import('./torsion-latch/guide').then((m) => m.default),
+  },
+  {
+    about: foldedHook,
+    load: () => import('./folded-hook').then((m) => m.default),
+    loadGuide: () => import('./folded-hook/guide').then((m) => m.default),
   },
 ];
 
