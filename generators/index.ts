@@ -4,6 +4,7 @@ import { about as foldedHook } from './folded-hook/about';
 import { about as livingHinge } from './living-hinge/about';
 import { about as pegStrap } from './peg-strap/about';
 import { about as rodClip } from './rod-clip/about';
+import { about as screwCap } from './screw-cap/about';
 import { about as torsionLatch } from './torsion-latch/about';
 
 /** What the list knows of a family before it is loaded. */
@@ -34,6 +35,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: rodClip,
     load: () => import('./rod-clip').then((m) => m.default),
     loadGuide: () => import('./rod-clip/guide').then((m) => m.default),
+  },
+  {
+    about: screwCap,
+    load: () => import('./screw-cap').then((m) => m.default),
+    loadGuide: () => import('./screw-cap/guide').then((m) => m.default),
   },
   {
     about: torsionLatch,

@@ -37,12 +37,16 @@ const smooth = (share: number): number => {
 export const ridgeHeight = (ridge: Pick<Ridge, 'turns'>, position: number): number =>
   smooth((position + FADE / 2) / FADE) * smooth((ridge.turns + FADE / 2 - position) / FADE);
 
-/** Rings of a ridge: their positions in turns lie on the grid of the facets. */
+/** A ring closer than this share of a facet to the end of the ridge gives way to it. */
+const CLOSE_TO_END = 0.25;
+
+/** Positions of the rings of a ridge in turns: its two ends, and between them the grid of the facets. */
 function ringPositions(ridge: Ridge, segments: number): number[] {
-  const turns = (position: number) => (position + ridge.phase) * segments;
-  const first = Math.floor(turns(-FADE / 2) + 1e-9);
-  const last = Math.ceil(turns(ridge.turns + FADE / 2) - 1e-9);
-  return Array.from({ length: last - first + 1 }, (_, at) => (first + at) / segments - ridge.phase);
+  const [start, end] = [-FADE / 2, ridge.turns + FADE / 2];
+  const first = Math.ceil((start + ridge.phase) * segments + CLOSE_TO_END);
+  const last = Math.floor((end + ridge.phase) * segments - CLOSE_TO_END);
+  const grid = Array.from({ length: last - first + 1 }, (_, at) => (first + at) / segments - ridge.phase);
+  return [start, ...grid, end];
 }
 
 /** Section at one ring, foot included, counter-clockwise for an outward ridge. */
@@ -97,8 +101,8 @@ function ridgeFaces(start: number, rings: number, size: number, outward: boolean
 }
 
 /**
- * Closed mesh of all the ridges of a thread, one shell a start, made without booleans. Ring vertices lie on the facet
- * grid of `segments` a turn; the wall it is joined to should be turned by half a facet against it. Throws RangeError
+ * Closed mesh of all the ridges of a thread, one shell a start, made without booleans. Ring vertices between the
+ * ends lie on the facet grid of `segments` a turn; the wall it is joined to should be turned by half a facet against it. Throws RangeError
  * where the ridge is as wide as the pitch: its turns would run through each other.
  */
 export function ridgeMesh(ridge: Ridge, segments: number): TriMesh {
@@ -151,13 +155,14 @@ function clipBeyond(outline: readonly FormPoint[], wall: number, sign: number): 
 
 /**
  * Volume in mm3 that the faceted ridges add to a wall with as many facets. A step between two rings adds
- * sin(2 pi / N) times the integral of width x radius, by Simpson's rule over the step; the error is of second order in
+ * the sine of its angle times the integral of width x radius, by Simpson's rule over the step; the error is of second order in
  * the sagitta.
  */
 export function ridgeVolume(ridge: Ridge, segments: number): number {
   const outward = ridge.facing === 'outward';
   const wall = outward ? ridge.outline[0]![0] : ridge.outline[0]![0] / Math.cos(Math.PI / segments);
-  const sections = ringPositions(ridge, segments).map((position) =>
+  const positions = ringPositions(ridge, segments);
+  const sections = positions.map((position) =>
     ringSection(ridge, ridgeHeight(ridge, position), segments).slice(0, -2),
   );
   const moment = (section: readonly FormPoint[]) => sectionMoment(section, wall, outward);
@@ -165,7 +170,8 @@ export function ridgeVolume(ridge: Ridge, segments: number): number {
   for (let at = 0; at + 1 < sections.length; at += 1) {
     const [here, next] = [sections[at]!, sections[at + 1]!];
     const between = here.map(([radius, height], k): FormPoint => [(radius + next[k]![0]) / 2, height]);
-    sum += (moment(here) + 4 * moment(between) + moment(next)) / 6;
+    const step = Math.sin(2 * Math.PI * (positions[at + 1]! - positions[at]!));
+    sum += (step * (moment(here) + 4 * moment(between) + moment(next))) / 6;
   }
-  return ridge.starts * Math.sin((2 * Math.PI) / segments) * sum;
+  return ridge.starts * sum;
 }

@@ -1,0 +1,81 @@
+import type { Preset } from '../contract';
+import type { Values } from './schema';
+
+export const presets: readonly Preset<Values>[] = [
+  {
+    id: 'ballast-pot-neck',
+    name: 'Ballast pot neck',
+    purpose: 'Closes the lead-shot pot of a sailing model; opened at the pond to trim the ballast.',
+    material: 'petg',
+    use: { opening: 'often', layers: 'along', temperature: 30 },
+    values: {},
+  },
+  {
+    id: 'glue-bottle-travel-cap',
+    name: 'Glue bottle travel cap',
+    purpose:
+      'A plug cap for a small glue bottle in the field box, in polypropylene that glue does not hold to.',
+    material: 'pp',
+    use: { opening: 'often', layers: 'along', temperature: 23 },
+    values: {
+      majorDiameter: 20,
+      pitch: 3,
+      turns: 1.5,
+      clearance: 0.15,
+      bore: 12,
+      neckHeight: 13,
+      flangeWidth: 5,
+      flangeThickness: 2,
+      wall: 2,
+      capHeight: 14.4,
+      topThickness: 2,
+      grip: 'knurl',
+      seal: 'plug',
+      plugInterference: 0.2,
+      plugLength: 2.5,
+    },
+  },
+  {
+    id: 'bottle-finish-28-400',
+    name: 'Bottle neck, 28-400 finish',
+    purpose:
+      'A neck that takes bought 28-400 caps: thread, root, height and start lie inside the finish table.',
+    material: 'petg',
+    use: { opening: 'often', layers: 'along', temperature: 23 },
+    values: {
+      majorDiameter: 27.6,
+      pitch: 4.233,
+      turns: 1,
+      clearance: 0.25,
+      bore: 19,
+      neckHeight: 10.5,
+      flangeWidth: 6,
+      wall: 1.4,
+      capHeight: 13.2,
+      topThickness: 2.4,
+    },
+  },
+  {
+    id: 'hull-screw-port',
+    name: 'Screw port for a hull',
+    purpose:
+      'Opening to reach servos and bail out, with a wide flange to bond on the deck and a quick two-start lid that closes on a ring of soft foam.',
+    material: 'asa',
+    use: { opening: 'often', layers: 'along', temperature: 40 },
+    values: {
+      majorDiameter: 72,
+      pitch: 5,
+      starts: 2,
+      turns: 0.75,
+      clearance: 0.3,
+      bore: 60,
+      neckHeight: 18.5,
+      flangeWidth: 14,
+      flangeThickness: 3,
+      wall: 2.4,
+      capHeight: 21.1,
+      topThickness: 3,
+      seal: 'none',
+    },
+  },
+];
