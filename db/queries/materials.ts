@@ -1,4 +1,4 @@
-import { asc, eq, isNull, sql } from 'drizzle-orm';
+import { asc, count, eq, isNull, sql } from 'drizzle-orm';
 import { serviceLimit } from '@/lib/materials/allowable';
 import { materialSchema, priceSchema } from '@/lib/materials/schema';
 import type { Material, Price } from '@/lib/materials/types';
@@ -25,6 +25,9 @@ function materialOf({ properties, perKg, currency, asOf, source }: Row): Materia
 
 export const listMaterials = (db: Db): Material[] =>
   select(db).orderBy(asc(materials.position)).all().map(materialOf);
+
+export const countMaterials = (db: Db): number =>
+  db.select({ found: count() }).from(materials).get()?.found ?? 0;
 
 export function findMaterial(db: Db, id: string): Material | undefined {
   const row = select(db).where(eq(materials.id, id)).get();

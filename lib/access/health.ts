@@ -1,7 +1,8 @@
 import 'server-only';
-import { listMaterials } from './materials';
+import { database } from '@/db/client';
+import { countMaterials } from '@/db/queries/materials';
 
 /** The process answers and its database can be read. */
 export function health(): { status: 'ok'; materials: number } {
-  return { status: 'ok', materials: listMaterials().length };
+  return { status: 'ok', materials: countMaterials(database()) };
 }
