@@ -1,3 +1,4 @@
+import type { Vec3 } from '@/lib/geometry/kernel';
 import type { Material } from '@/lib/materials/types';
 import { spiralOf, spiralRadius } from '@/lib/mechanics/strap';
 import { halfTurnCurvature, halfTurnTwist, twistStrain } from '@/lib/mechanics/strap-half-turn';
@@ -25,6 +26,8 @@ interface Moment {
   readonly twist: (s: number) => number;
   /** growth of the eye's radius over the head, mm */
   readonly growth: number;
+  /** move of the whole strap, mm: the loop ends in the middle of where the strip lay, standing on the bed */
+  readonly shift: Vec3;
 }
 
 /** Height of the eye's face over the peg's face: above the head while rolling, then down to the strip's thickness. */
@@ -44,23 +47,30 @@ function growthAt(values: PegStrap, t: number): number {
   return Math.max(0, widest - values.eyeDiameter / 2);
 }
 
+/** How far the loop hangs below the strip's lower face at the peg, mm. */
+function loopHeight({ bundleDiameter, strapWidth, strapThickness, halfTurn }: PegStrap): number {
+  return halfTurn ? bundleDiameter + strapWidth : bundleDiameter + 3 * strapThickness;
+}
+
 function momentOf(values: PegStrap, t: number): Moment {
   const loop = firstEyeAt(values);
   const rolled = smooth(t / ROLLED);
   const pitch = pitchAt(values, t);
-  const growth = growthAt(values, t);
+  const { from, to } = stripLayout(values);
+  const shift: Vec3 = [(rolled * (from + to)) / 2, 0, rolled * loopHeight(values)];
+  const still = { growth: growthAt(values, t), shift };
   if (values.halfTurn) {
     return {
       curvature: (s) => rolled * halfTurnCurvature(s / loop, loop, pitch),
       twist: (s) => rolled * halfTurnTwist(s / loop, loop, pitch),
-      growth,
+      ...still,
     };
   }
   const spiral = spiralOf(loop, pitch);
   return {
     curvature: (s) => -rolled / spiralRadius(spiral, Math.max(0, s)),
     twist: () => 0,
-    growth,
+    ...still,
   };
 }
 
@@ -103,7 +113,7 @@ function paintedPeak(values: PegStrap): number {
 }
 
 /**
- * Closing on the smallest bundle by the first eye. The peg stands still; the strip rolls up beneath it, its mid-line
+ * Closing on the smallest bundle by the first eye. The peg keeps upright; the strip rolls up beneath it, its mid-line
  * keeping its length, and comes round above the head, turned over on the way where it has a half turn; then the eye
  * comes down over the head, stretched while the head is in it. Above the strip's face the peg is rigid; its foot
  * passes over into the bent strip.
@@ -126,9 +136,10 @@ export function motion(values: PegStrap, _material: Material): Motion {
       for (let axis = 0; axis < 3; axis += 1) {
         const base = axis === 2 ? strapThickness / 2 : 0;
         const bent = base + frame[axis]! + across * frame[6 + axis]! + height * frame[9 + axis]!;
-        out.positions[i + axis] = bent + held * (rest[i + axis]! - bent);
+        out.positions[i + axis] = moment.shift[axis]! + bent + held * (rest[i + axis]! - bent);
       }
-      const strain = larger(fibreStrain(values, moment, s, across, height), eye);
+      const inStrip = Math.min(height, strapThickness / 2);
+      const strain = larger(fibreStrain(values, moment, s, across, inStrip), eye);
       out.strain[i / 3] = (1 - held) * strain;
     }
   }

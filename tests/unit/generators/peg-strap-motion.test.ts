@@ -31,6 +31,16 @@ function posed(values: PegStrap, t: number, points: readonly Point[]) {
   const moved = points.map((_, i) => Array.from(out.positions.subarray(3 * i, 3 * i + 3)));
   return { moved, strain: Array.from(out.strain) };
 }
+/** The same, seen from the peg. */
+function fromPeg(values: PegStrap, t: number, points: readonly Point[]) {
+  const { moved, strain } = posed(values, t, [[0, 0, 3 * values.strapThickness], ...points]);
+  const [peg, ...others] = moved;
+  const origin = [peg![0]!, peg![1]!, peg![2]! - 3 * values.strapThickness];
+  return {
+    moved: others.map((point) => point.map((value, i) => value - origin[i]!)),
+    strain: strain.slice(1),
+  };
+}
 const distance = (a: readonly number[], b: readonly number[]) =>
   Math.hypot(...a.map((value, i) => value - b[i]!));
 const spaced = (count: number, from: number, to: number) =>
@@ -70,7 +80,7 @@ describe('peg strap: motion', () => {
 
   it.each(BOTH)('brings the first eye onto the peg, one thickness above the strip (%s)', (_, values) => {
     const eye: Point = [stripLayout(values).eyes[0]!, 0, values.strapThickness / 2];
-    const { moved } = posed(values, 1, [eye]);
+    const { moved } = fromPeg(values, 1, [eye]);
     expect(distance(moved[0]!, [0, 0, 1.5 * values.strapThickness])).toBeLessThan(0.1);
   });
 
@@ -102,7 +112,7 @@ describe('peg strap: motion', () => {
       ),
     );
     for (const t of [0.75, 0.8, 0.85, 0.9, 0.95, 1]) {
-      const { moved } = posed(values, t, rim);
+      const { moved } = fromPeg(values, t, rim);
       const depth = Math.max(
         ...moved.map(
           ([px, py, pz]) => headRadius(values, pz! - values.strapThickness) - Math.hypot(px!, py!),
@@ -137,18 +147,27 @@ describe('peg strap: motion', () => {
     }
   });
 
-  it('leaves peg and head alone', () => {
+  it('keeps peg and head rigid, upright and free of strain', () => {
     const head: Point[] = [
       [2, 1, straight.strapThickness + 4],
       [-2, -1, 2 * straight.strapThickness + 1],
     ];
     for (const t of [0.4, 1]) {
-      const { moved, strain } = posed(straight, t, head);
+      const { moved, strain } = fromPeg(straight, t, head);
       moved.forEach((point, i) => {
         expect(distance(point, head[i]!)).toBeLessThan(1e-4);
       });
       expect(strain).toEqual([0, 0]);
     }
+  });
+
+  it.each(BOTH)('ends standing over the bed, where the strip lay (%s)', (_, values) => {
+    const { from, to } = stripLayout(values);
+    const { moved } = posed(values, 1, middleLine(values));
+    const along = moved.map(([x]) => x!);
+    expect(Math.min(...moved.map(([, , z]) => z!))).toBeGreaterThan(0);
+    expect(Math.min(...along)).toBeGreaterThan(from);
+    expect(Math.max(...along)).toBeLessThan(to);
   });
 
   it('paints no more than its peak and reaches most of it', () => {
