@@ -2,7 +2,13 @@ import { SHELL_BAND } from '@/lib/mechanics/annular';
 import { selfLockingAngle, wedgeFactor } from '@/lib/mechanics/friction';
 import { formatQuantity } from '@/lib/units';
 import { type Figure, judge, judgedFigure, plainFigure } from '../report';
-import { releaseForce } from './mechanics';
+import {
+  releaseForce,
+  squeezeModulus,
+  stretchModulus,
+  type WorkingModulus,
+  workingModulus,
+} from './mechanics';
 import * as source from './sources';
 import { releaseReason } from './strain-figures';
 import { finite, type Subject } from './subject';
@@ -11,10 +17,8 @@ import { finite, type Subject } from './subject';
 const HAND_LIMIT = 100;
 const HAND_COMFORT = 50;
 
-const NO_MODULUS = 'Not known: no modulus is given for this plastic.';
-
-const pastRange = ({ radial }: Subject): string =>
-  radial && !radial.inRange ? ' The strain is past the range of the modulus curve: an upper bound.' : '';
+const notKnown = (modulus: WorkingModulus): string =>
+  modulus.value === null ? `Not known: ${modulus.gap}.` : 'Not known.';
 
 function handbookOf({ radial, material }: Subject, angle: number): number | null {
   return radial && finite(radial.handbook * wedgeFactor(material.friction.value, angle));
@@ -28,11 +32,12 @@ function guideDoubt(value: number | null): string {
 
 function pushFigure(subject: Subject): Figure {
   const { push, material, values } = subject;
+  const missing = notKnown(stretchModulus(values, material));
   const handbook = handbookOf(subject, values.headLeadAngle);
   const { friction } = material;
   const value = finite(push?.value);
   const locks = push !== null && value === null;
-  const known = `Lead-in of ${values.headLeadAngle}°, friction ${friction.low} to ${friction.high}, the eye stretched through its whole depth.${pastRange(subject)}${guideDoubt(handbook)}`;
+  const known = `Lead-in of ${values.headLeadAngle}°, friction ${friction.low} to ${friction.high}, the eye stretched through its whole depth.${guideDoubt(handbook)}`;
   return judgedFigure({
     id: 'push-in-force',
     label: 'Push-in force',
@@ -47,7 +52,7 @@ function pushFigure(subject: Subject): Figure {
       ? `Locks: at friction ${friction.value} a lead-in of ${values.headLeadAngle}° does not slide in. Make it smaller.`
       : push
         ? `${known} ${handWords(value!)}`
-        : NO_MODULUS,
+        : missing,
     source: source.WEDGE,
   });
 }
@@ -59,7 +64,7 @@ function handWords(force: number): string {
 
 function pullReason(subject: Subject): string {
   const { pull, loads, values, material } = subject;
-  if (!pull) return NO_MODULUS;
+  if (!pull) return notKnown(stretchModulus(values, material));
   const lock = selfLockingAngle(material.friction.value);
   if (!Number.isFinite(pull.value)) {
     return `Locks: at a return angle of ${values.headReturnAngle}° (self-locking from ${formatQuantity(lock, 'deg')}) a straight pull does not open it. Squeeze the eye.`;
@@ -68,7 +73,7 @@ function pullReason(subject: Subject): string {
     loads.pegPull !== null && pull.value > loads.pegPull
       ? ' The peg is strained past its limit first: open it by the eye, not by pulling.'
       : '';
-  return `Straight pull along the peg, back face at ${values.headReturnAngle}°.${peg}${pastRange(subject)}`;
+  return `Straight pull along the peg, back face at ${values.headReturnAngle}°.${peg}`;
 }
 
 function pullFigure(subject: Subject): Figure {
@@ -107,6 +112,7 @@ const GRIP =
 function releaseFigure(subject: Subject): Figure {
   const opens = subject.strain.release === 'opens';
   const force = opens ? releaseForce(subject.values, subject.material) : null;
+  const missing = notKnown(squeezeModulus(subject.values, subject.material));
   return plainFigure({
     id: 'release-force',
     label: 'Squeeze to release',
@@ -115,12 +121,12 @@ function releaseFigure(subject: Subject): Figure {
     handbook: force?.handbook ?? null,
     low: force?.low ?? null,
     high: force?.high ?? null,
-    because: opens && !force ? NO_MODULUS : `${releaseReason(subject)}${force ? GRIP : ''}`,
+    because: opens && !force ? missing : `${releaseReason(subject)}${force ? GRIP : ''}`,
     source: source.SQUEEZE,
   });
 }
 
-function netFigure({ loads, values }: Subject): Figure {
+function netFigure({ loads, values, material, allowable }: Subject): Figure {
   return plainFigure({
     id: 'net-section-load',
     label: 'Pull the strip bears beside an eye',
@@ -131,7 +137,7 @@ function netFigure({ loads, values }: Subject): Figure {
     high: loads.net,
     because:
       loads.net === null
-        ? 'Not known: allowable strain or modulus is not known.'
+        ? notKnown(workingModulus(material, allowable.value))
         : `The ${formatQuantity(values.strapWidth - values.eyeDiameter, 'mm')} beside an eye reach the allowable strain; a brittle plastic counts the edge of the eye, the lower figure.`,
     source: source.NET_SECTION,
   });
@@ -154,9 +160,8 @@ function tearFigure({ loads, material }: Subject): Figure {
   });
 }
 
-const NO_PEG = 'Not known: the strain allowed across the layers, or the modulus, is not known.';
-
-function pegFigures({ loads }: Subject): Figure[] {
+function pegFigures({ loads, material, across }: Subject): Figure[] {
+  const missing = notKnown(workingModulus(material, across.value));
   const weakest =
     loads.pegSide !== null && loads.net !== null && loads.pegSide < loads.net
       ? 'The peg reaches its limit before the strip does: a thicker peg or a larger fillet holds more.'
@@ -169,7 +174,7 @@ function pegFigures({ loads }: Subject): Figure[] {
       value: loads.pegSide,
       because:
         loads.pegSide === null
-          ? NO_PEG
+          ? missing
           : `Bending and shear at its foot, fillet counted, layers pulled apart. ${weakest}`,
       source: source.PEG,
     }),
@@ -180,7 +185,7 @@ function pegFigures({ loads }: Subject): Figure[] {
       value: loads.pegPull,
       because:
         loads.pegPull === null
-          ? NO_PEG
+          ? missing
           : 'The neck is pulled across its layers, fillet counted; printed on its edge it would be pulled along them.',
       source: source.PEG,
     }),

@@ -54,9 +54,9 @@ const guide: Guide = {
     },
     {
       name: 'Squeeze to release',
-      formula: 'P = (dh - d) E t/(√q (3.07 + 0.38 q)), folds first above π² E t³/(3 b)',
+      formula: 'P = (dh - d) E t/(√q (3.04 + 0.4 q + 0.0065/q)), folds first above π² E t³/(3 b)',
       symbols: 'P squeeze from edge to edge over a patch as wide as the eye',
-      validity: 'd/b from 0.3 to 0.7; the eye must not close on the neck first',
+      validity: 'd/b from 0.2 to 0.7; the eye must not close on the neck first',
       source: source.SQUEEZE,
     },
     {

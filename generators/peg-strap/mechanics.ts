@@ -9,7 +9,9 @@ import {
   type Eye,
   eyeShare,
   foldingForce,
+  NARROWEST_EYE,
   narrowingOfSqueeze,
+  type Patch,
   squeezeForce,
   squeezeStrain,
   stretchedEye,
@@ -17,6 +19,7 @@ import {
 } from '@/lib/mechanics/strap-eye';
 import { type HalfTurnStrain, halfTurnBundle, halfTurnStrain } from '@/lib/mechanics/strap-half-turn';
 import { pegPull, pegSidePull } from '@/lib/mechanics/strap-peg';
+import { formatQuantity } from '@/lib/units';
 import { firstEyeAt, stripLayout } from './layout';
 import type { PegStrap } from './schema';
 
@@ -37,9 +40,10 @@ export const largestBundle = (values: PegStrap): number => bundleAt(values, stri
 
 /**
  * How the squeezed eye comes off the head. `opens`: its length reaches the head's diameter. `neck`: it narrows onto
- * the neck first. `folds`: the strip folds out of flat first.
+ * the neck first. `folds`: the strip folds out of flat first. `small`: the eye is too small a part of the strip for
+ * the factors to be checked.
  */
-export type Release = 'opens' | 'neck' | 'folds';
+export type Release = 'opens' | 'neck' | 'folds' | 'small';
 
 export interface StrapStrain {
   /** plain strip on the smallest bundle, or the largest bending of the half-turn loop */
@@ -63,6 +67,7 @@ const growthToRelease = ({ headDiameter, eyeDiameter }: PegStrap): number => hea
 function releaseOf(values: PegStrap): Release {
   const eye = eyeOf(values);
   const growth = growthToRelease(values);
+  if (values.eyeDiameter < NARROWEST_EYE * values.strapWidth) return 'small';
   const left = values.eyeDiameter - narrowingOfSqueeze(eye) * growth;
   if (left < values.pegDiameter) return 'neck';
   return squeezeForce(eye, growth, 1, 'middle') > foldingForce(eye, 1) ? 'folds' : 'opens';
@@ -109,6 +114,21 @@ export function strapStrain(values: PegStrap, poisson: number): StrapStrain {
   };
 }
 
+/** Secant modulus in MPa at a strain, or why it is not known: none is given, or the strain is past its range. */
+export type WorkingModulus = { readonly value: number } | { readonly value: null; readonly gap: string };
+
+export function workingModulus(material: Material, strain: number | null): WorkingModulus {
+  if (strain === null) return { value: null, gap: 'the allowable strain is not known' };
+  const secant = secantModulus(material, strain);
+  if (!secant) return { value: null, gap: `no modulus of ${material.shortName} is given` };
+  if (secant.inRange) return { value: secant.value };
+  const [at, to] = [strain, material.secant.validTo].map((part) => formatQuantity(part, 'strain'));
+  return {
+    value: null,
+    gap: `the strain of ${at} is past the ${to} that the modulus of ${material.shortName} is known to`,
+  };
+}
+
 /** A force in N with its band; Infinity where it locks. */
 export interface Banded {
   readonly value: number;
@@ -123,24 +143,27 @@ export interface RadialForce {
   readonly least: number;
   /** the guide's annular factor */
   readonly handbook: number;
-  /** false past the range of the secant modulus */
-  readonly inRange: boolean;
 }
+
+/** Secant modulus while the eye is over the head, and while it is squeezed open. */
+export const stretchModulus = (values: PegStrap, material: Material): WorkingModulus =>
+  workingModulus(material, stretchedEye(eyeOf(values), values.headDiameter).peak);
+export const squeezeModulus = (values: PegStrap, material: Material): WorkingModulus =>
+  workingModulus(material, squeezeStrain(eyeOf(values), growthToRelease(values)));
 
 /** Radial force of the eye stretched over the head, N; null where the modulus is not known. */
 export function radialForce(values: PegStrap, material: Material): RadialForce | null {
   const eye = eyeOf(values);
   const { headDiameter, eyeDiameter, strapWidth } = values;
-  const secant = secantModulus(material, stretchedEye(eye, headDiameter).peak);
-  if (!secant) return null;
+  const modulus = stretchModulus(values, material).value;
+  if (modulus === null) return null;
   const poisson = material.poisson.value;
-  const { strip, ring } = stretchForce(eye, headDiameter, secant.value, poisson);
+  const { strip, ring } = stretchForce(eye, headDiameter, modulus, poisson);
   const factor = tubeFactor(eyeDiameter, strapWidth, poisson);
   return {
     strip,
     least: ring * eyeShare(eye, poisson),
-    handbook: annularForce(headDiameter - eyeDiameter, eyeDiameter, secant.value, factor),
-    inRange: secant.inRange,
+    handbook: annularForce(headDiameter - eyeDiameter, eyeDiameter, modulus, factor),
   };
 }
 
@@ -167,14 +190,14 @@ function pinchForce({ strapWidth, eyeDiameter, strapThickness }: PegStrap, growt
 export function releaseForce(values: PegStrap, material: Material): (Banded & { handbook: number }) | null {
   const eye = eyeOf(values);
   const growth = growthToRelease(values);
-  const secant = secantModulus(material, squeezeStrain(eye, growth));
-  if (!secant) return null;
-  const force = (patch: 'narrow' | 'middle' | 'wide') => squeezeForce(eye, growth, secant.value, patch);
+  const modulus = squeezeModulus(values, material).value;
+  if (modulus === null) return null;
+  const force = (patch: Patch) => squeezeForce(eye, growth, modulus, patch);
   return {
     value: force('middle'),
     low: force('narrow'),
     high: force('wide'),
-    handbook: pinchForce(values, growth, secant.value),
+    handbook: pinchForce(values, growth, modulus),
   };
 }
 
@@ -205,12 +228,9 @@ export function holdingLoads(
   const area = netArea(strapWidth, eyeDiameter, strapThickness);
   const edge = pulledHoleFactor(eyeDiameter, strapWidth);
   const strength = material.tensileStrength?.value ?? null;
-  const stress = (strain: number | null) => {
-    const secant = strain === null ? null : secantModulus(material, strain);
-    return secant && strain !== null ? secant.value * strain : null;
-  };
-  const net = stress(along);
-  const modulus = across === null ? null : (secantModulus(material, across)?.value ?? null);
+  const alongModulus = workingModulus(material, along).value;
+  const net = along === null || alongModulus === null ? null : alongModulus * along;
+  const modulus = workingModulus(material, across).value;
   const peg = { diameter: pegDiameter, fillet: pegFillet };
   const known = across !== null && modulus !== null;
   return {

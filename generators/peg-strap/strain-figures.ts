@@ -111,6 +111,8 @@ const RELEASE_REASON = {
     `Squeezed across the strip until the eye is ${growth} longer, one edge slips over the head; the bore stretches beside the fingers.`,
   neck: () =>
     'Not known: squeezed, the eye closes on the neck before it is long enough. A thinner peg or a wider eye lets it open.',
+  small: () =>
+    'Not known: the eye is less than a fifth of the strap width, narrower than was checked. Lever the eye off by its tail.',
   folds: () =>
     'Not known: squeezed, the strip folds out of flat before the eye is long enough. Lever the eye off by its tail, or make the strap thicker.',
 } as const;

@@ -192,7 +192,7 @@ def main():
                           "forceOverLame": round(force / lame(1 / ratio, poisson), 4),
                           "peakOverMean": round(float(hoop[peak]), 4),
                           "peakAt": round(float(np.degrees(angles[peak])), 1)})
-    for ratio in (0.3, 0.35, 0.4, 0.5, 0.6, 0.7):
+    for ratio in (0.2, 0.25, 0.3, 0.35, 0.4, 0.5, 0.6, 0.7):
         for patch in (0.5, 1.0, 2.0):
             growth, narrowing, hoop = squeeze(1 / ratio, patch, 0.35)
             cases.append({"kind": "squeeze", "eyeOverWidth": ratio, "patchOverEye": patch, "poisson": 0.35,

@@ -48,19 +48,19 @@ describe('an eye in a strip, stretched by a head, against finite elements', () =
 });
 
 describe('an eye squeezed open, against finite elements', () => {
-  it.each(named('squeeze'))('$name: growth within 3 %', (one) => {
+  it.each(named('squeeze'))('$name: growth within 1.5 %', (one) => {
     const force = squeezeForce(eyeOf(one), 0.01, 1000, PATCH[String(one.patchOverEye)]!);
-    expect(Math.abs(errorPercent((0.01 * 1000) / force, numberOf(one, 'growth')))).toBeLessThan(3);
+    expect(Math.abs(errorPercent((0.01 * 1000) / force, numberOf(one, 'growth')))).toBeLessThan(1.5);
   });
 
   it.each(named('squeeze').filter((one) => one.patchOverEye === 1))(
-    '$name: narrowing and strain within 2 %',
+    '$name: narrowing and strain within 3 %',
     (one) => {
       const strain = squeezeStrain(eyeOf(one), 0.02) / 0.01;
-      expect(Math.abs(errorPercent(strain, numberOf(one, 'strainOverGrowth')))).toBeLessThan(2);
+      expect(Math.abs(errorPercent(strain, numberOf(one, 'strainOverGrowth')))).toBeLessThan(3);
       expect(
         Math.abs(errorPercent(narrowingOfSqueeze(eyeOf(one)), numberOf(one, 'narrowingOverGrowth'))),
-      ).toBeLessThan(2);
+      ).toBeLessThan(3);
     },
   );
 });

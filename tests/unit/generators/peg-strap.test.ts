@@ -176,6 +176,23 @@ describe('peg strap: forces', () => {
     }
   });
 
+  it('knows no force past the strain that the modulus is known to', () => {
+    const petg = materialById('petg')!;
+    const push = figure(checked({}, petg), 'push-in-force');
+    expect(push.value).toBeNull();
+    expect(push.verdict).toBe('not-known');
+    expect(push.because).toBe(
+      'Not known: the strain of 5.15\u202f% is past the 4\u202f% that the modulus of PETG is known to.',
+    );
+    expect(figureValue('push-in-force', { headDiameter: 6.1 }, petg)).toBeGreaterThan(0);
+  });
+
+  it('does not know how an eye is squeezed open that is too small a part of its strip', () => {
+    const small = figure(checked({ strapWidth: 32 }), 'release-force');
+    expect(small.value).toBeNull();
+    expect(small.because).toMatch(/less than a fifth/);
+  });
+
   it('draws the push over travel from nothing over the peak to home', () => {
     const curve = checked().curves.find(({ id }) => id === 'push-in')!;
     expect(curve.points[0]).toEqual([0, 0]);
