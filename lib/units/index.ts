@@ -75,7 +75,8 @@ export function significant(value: number, digits = 3): string {
   if (value === 0) return '0';
   const rounded = Number(value.toPrecision(digits));
   const decimals = Math.max(0, digits - 1 - Math.floor(Math.log10(Math.abs(rounded))));
-  return rounded.toFixed(Math.min(decimals, 6)).replace(/\.?0+$/, (tail) => (tail.includes('.') ? '' : tail));
+  const text = rounded.toFixed(Math.min(decimals, 6));
+  return text.includes('.') ? text.replace(/\.?0+$/, '') : text;
 }
 
 /** A figure with its unit, strain in percent: "1.22 %", "6.4 N", "30°". */
