@@ -23,6 +23,7 @@ function Factor({ factor }: { factor: AllowableFactor }) {
         </>
       }
     >
+      {factor.note && <p className="mb-2 font-semibold">{factor.note}</p>}
       <SourceText source={factor.source} />
     </Note>
   );

@@ -53,7 +53,7 @@ describe('the strain band', () => {
     const html = bandOf(() => ({}), { ...ROUND_PLASTIC, allowableOnce: null });
     expect(html).not.toContain('hatched');
     expect(words(html)).toContain('limit not known, not known');
-    expect(words(html)).toMatch(/not known/i);
+    expect(words(html)).toContain('Not known: short-term limit of RP');
   });
 
   it('says the figure is not known, with its reason, rather than nought', () => {
