@@ -13,10 +13,10 @@ const failed = (failure: string): Path => ({ states: [], failure, factorisations
  * Deflection, force and strain are proportional to the target.
  */
 export function solveLinear(system: System, law: Law): Path {
-  const { mesh, points, held, structure, stiffness, columns, driver, target } = system;
+  const { mesh, points, held, structure, stiffness, workspace, driver, target } = system;
   const still = new Float64Array(structure.unknownCount);
   assemble(newKernel(mesh, points, law), null, null, stiffness, still);
-  const factor = factorise(structure, stiffness, columns);
+  const factor = factorise(structure, stiffness, workspace);
   if (factor.notPositive > 0) return failed('the supports do not hold the part');
   still.fill(0);
   const { slope } = driver(still, 0);

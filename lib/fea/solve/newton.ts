@@ -76,7 +76,7 @@ function add(into: Float64Array, a: Float64Array, scale: number): void {
  */
 function iterate(work: Work, value: number, first: boolean): number | null {
   const { system, u, force, mixed, options } = work;
-  const { held, stiffness, structure, columns, driver } = system;
+  const { held, stiffness, structure, workspace, driver } = system;
   const { value: reached, slope } = driver(u, value);
   const pattern = onlyFree(slope, held);
   assemble(work.kernel, u, work.mixedIsSet ? mixed : null, stiffness, force);
@@ -85,7 +85,7 @@ function iterate(work: Work, value: number, first: boolean): number | null {
   const balanced = norm(residual) < options.tolerance * Math.abs(work.load) * norm(pattern);
   if (!first && work.kernel === work.final && balanced && Math.abs(gap) < GAP * Math.abs(work.target))
     return 0;
-  const factor = factorise(structure, stiffness, columns);
+  const factor = factorise(structure, stiffness, workspace);
   work.factorisations++;
   work.unstable = factor.notPositive > 0;
   const du = substitute(factor, residual);

@@ -4,8 +4,9 @@ import { layeredLaw } from '../element/layered';
 import { neoHooke } from '../element/neo-hooke';
 import { type Mesh, meshProfile } from '../mesh/mesh';
 import type { BendingModel, ElasticNumbers } from '../model';
+import { peakError } from '../strain/error';
 import { type LayerAllowable, layerVerdict } from '../strain/layers';
-import { dominantStrain, nodalStrain, strainAlong } from '../strain/nodal';
+import { dominantStrain, nodalStrain } from '../strain/nodal';
 import { findPeak, type Peak } from '../strain/peak';
 import { type SurfaceStrain, surfaceStrain } from '../strain/surface';
 import { solveLinear } from './linear';
@@ -123,7 +124,7 @@ function report(
     tension: scaled(tension),
     compression: scaled(compression),
     layers,
-    errorEstimate: errorAt(tension, surface, inside, finite),
+    errorEstimate: peakError(mesh, tension, surface, inside, finite),
     unknowns: 2 * mesh.nodeCount,
     elements: mesh.elementCount,
     factorisations: path.factorisations,
@@ -156,17 +157,4 @@ function solvedStep(model: BendingModel, system: System, state: State, finite: b
   }
   const whole = model.mirrored ? 2 : 1;
   return { deflection: whole * state.value, force: state.load * factor.force, displacement: state.u, strain };
-}
-
-/**
- * Estimated error of the peak: the difference between the surface strain and the strain extrapolated from inside
- * the elements at the same node, as a share of the peak. Both tend to the same value as the mesh gets finer, the
- * second more slowly, so the figure errs on the safe side; it is an indication, not a bound.
- */
-function errorAt(peak: Peak, surface: SurfaceStrain, inside: Float64Array, finite: boolean): number {
-  if (peak.strain === 0) return 0;
-  if (peak.direction === 'round') return 0;
-  const { node } = peak;
-  const direction = [surface.tangent[2 * node]!, surface.tangent[2 * node + 1]!] as const;
-  return Math.abs(strainAlong(inside, node, direction, finite) - peak.strain) / peak.strain;
 }

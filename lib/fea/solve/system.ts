@@ -2,7 +2,7 @@ import { STIFFNESS_SIZE } from '../element/kernel';
 import { type GaussPoints, gaussPoints } from '../element/points';
 import type { Mesh } from '../mesh/mesh';
 import { type BendingModel, widthAt } from '../model';
-import { newColumns } from '../solver/factor';
+import { newWorkspace, type Workspace } from '../solver/factor';
 import { type Structure, structureOf } from '../solver/structure';
 import { type Driver, driverOf } from './driver';
 import { heldBy } from './supports';
@@ -15,7 +15,7 @@ export interface System {
   readonly driver: Driver;
   readonly structure: Structure;
   readonly stiffness: Float64Array;
-  readonly columns: Float64Array;
+  readonly workspace: Workspace;
   /** value of the drive that this system is taken to: half of the model's where the part is mirrored */
   readonly target: number;
 }
@@ -33,7 +33,7 @@ export function systemOf(model: BendingModel, mesh: Mesh): System | null {
     driver: driverOf(mesh, model.plane, model.drive),
     structure,
     stiffness: new Float64Array(STIFFNESS_SIZE * mesh.elementCount),
-    columns: newColumns(structure),
+    workspace: newWorkspace(structure),
     target: model.mirrored ? model.drive.value / 2 : model.drive.value,
   };
 }

@@ -1,5 +1,5 @@
 import { eliminate } from './eliminate';
-import type { Child, Front, Structure } from './structure';
+import { type Child, type Front, remainderSize, type Structure } from './structure';
 
 /** LDL^T of a structure's matrix: for each front its eliminated columns, D on their diagonal. */
 export interface Factor {
@@ -9,7 +9,18 @@ export interface Factor {
   readonly notPositive: number;
 }
 
-export const newColumns = (structure: Structure): Float64Array => new Float64Array(structure.factorSize);
+/** Arrays that every factorisation of a structure writes again. A factor is valid until the next one. */
+export interface Workspace {
+  readonly columns: Float64Array;
+  readonly block: Float64Array;
+  readonly stack: Float64Array;
+}
+
+export const newWorkspace = (structure: Structure): Workspace => ({
+  columns: new Float64Array(structure.factorSize),
+  block: new Float64Array(structure.largestFront ** 2),
+  stack: new Float64Array(structure.stackSize),
+});
 
 /** Adds the element stiffnesses (12 x 12, lower triangle) of a leaf. */
 function addElements(front: Front, places: Int32Array, stiffness: Float64Array, block: Float64Array): void {
@@ -28,56 +39,71 @@ function addElements(front: Front, places: Int32Array, stiffness: Float64Array, 
   }
 }
 
-/** Adds what a front below passed up: its Schur complement, packed by columns. */
-function addChild({ places }: Child, schur: Float64Array, size: number, block: Float64Array): void {
-  let at = 0;
+/** Adds what a front below passed up: its Schur complement, packed by columns from `at` on. */
+function addChild(
+  { places }: Child,
+  stack: Float64Array,
+  at: number,
+  size: number,
+  block: Float64Array,
+): void {
+  let next = at;
   for (let j = 0; j < places.length; j++) {
     const column = places[j]!;
-    for (let i = j; i < places.length; i++, at++) {
+    for (let i = j; i < places.length; i++, next++) {
       const row = places[i]!;
-      block[row >= column ? column * size + row : row * size + column]! += schur[at]!;
+      block[row >= column ? column * size + row : row * size + column]! += stack[next]!;
     }
   }
 }
 
-/** Copies the lower triangle behind the pivots, packed by columns. */
-function packSchur(block: Float64Array, { size, pivots }: Front): Float64Array {
-  const rest = size - pivots;
-  const packed = new Float64Array((rest * (rest + 1)) / 2);
-  let at = 0;
+/** Copies the lower triangle behind the pivots, packed by columns. Returns where the copy ends. */
+function packRemainder(
+  block: Float64Array,
+  { size, pivots }: Front,
+  stack: Float64Array,
+  at: number,
+): number {
+  let next = at;
   for (let j = pivots; j < size; j++) {
-    packed.set(block.subarray(j * size + j, (j + 1) * size), at);
-    at += size - j;
+    for (let i = j; i < size; i++) stack[next++] = block[j * size + i]!;
   }
-  return packed;
+  return next;
+}
+
+/** Gathers the two fronts below, the last pushed first. Returns the stack's new height. */
+function gather(fronts: readonly Front[], front: Front, { stack, block }: Workspace, height: number): number {
+  let top = height;
+  for (let c = front.children.length - 1; c >= 0; c--) {
+    const child = front.children[c]!;
+    top -= remainderSize(fronts[child.front]!);
+    addChild(child, stack, top, front.size, block);
+  }
+  return top;
 }
 
 /**
  * Factor of the matrix made of the element stiffnesses, without ever assembling it: each front gathers its elements
  * or the remainders of the two fronts below, eliminates its own unknowns and passes the rest up.
  * Method: element multifrontal LDL^T (Duff and Reid, ACM Trans. Math. Softw. 9, 1983), from memory.
- * `columns` may be given to be written again.
  */
 export function factorise(
   structure: Structure,
   stiffness: Float64Array,
-  columns = newColumns(structure),
+  workspace = newWorkspace(structure),
 ): Factor {
-  const { fronts, largestFront, places } = structure;
-  const block = new Float64Array(largestFront * largestFront);
-  const waiting = new Map<number, Float64Array>();
+  const { fronts, places } = structure;
+  const { block, columns, stack } = workspace;
   let notPositive = 0;
-  fronts.forEach((front, number) => {
+  let height = 0;
+  for (const front of fronts) {
     const { size, pivots, at } = front;
     block.fill(0, 0, size * size);
     addElements(front, places, stiffness, block);
-    for (const child of front.children) {
-      addChild(child, waiting.get(child.front)!, size, block);
-      waiting.delete(child.front);
-    }
+    height = gather(fronts, front, workspace, height);
     notPositive += eliminate(block, size, pivots);
     columns.set(block.subarray(0, size * pivots), at);
-    waiting.set(number, packSchur(block, front));
-  });
+    height = packRemainder(block, front, stack, height);
+  }
   return { structure, columns, notPositive };
 }

@@ -31,6 +31,8 @@ export interface Structure {
   readonly largestFront: number;
   /** numbers in the factor */
   readonly factorSize: number;
+  /** most numbers that wait at one time to be gathered by a front above */
+  readonly stackSize: number;
 }
 
 /** The smallest part that holds all elements of a node eliminates it. */
@@ -157,5 +159,24 @@ export function structureOf(mesh: Mesh, held: Uint8Array): Structure {
     unknownCount: 2 * mesh.nodeCount,
     largestFront: layout.fronts.reduce((most, front) => Math.max(most, front.size), 0),
     factorSize: at,
+    stackSize: deepestStack(layout.fronts),
   };
+}
+
+/** Numbers in the packed remainder that a front passes up. */
+export function remainderSize({ size, pivots }: Front): number {
+  const rest = size - pivots;
+  return (rest * (rest + 1)) / 2;
+}
+
+/** Fronts come children first, so the remainders of a front's children are the last on the stack. */
+function deepestStack(fronts: readonly Front[]): number {
+  let height = 0;
+  let deepest = 0;
+  for (const front of fronts) {
+    for (const child of front.children) height -= remainderSize(fronts[child.front]!);
+    height += remainderSize(front);
+    deepest = Math.max(deepest, height);
+  }
+  return deepest;
 }

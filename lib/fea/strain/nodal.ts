@@ -63,16 +63,17 @@ export function nodalStrain(kernel: Kernel, u: Float64Array, finite: boolean): F
 export const engineering = (strain: number, finite: boolean): number =>
   finite ? Math.sqrt(Math.max(0, 1 + 2 * strain)) - 1 : strain;
 
+const largerOf = (a: number, b: number): number => (Math.abs(b) > Math.abs(a) ? b : a);
+
 /** For each node the principal strain of largest size, with its sign: tension positive. */
 export function dominantStrain(nodal: Float64Array, finite: boolean): Float32Array {
   return Float32Array.from({ length: nodal.length / 4 }, (_, node) => {
     const middle = (nodal[4 * node]! + nodal[4 * node + 1]!) / 2;
     const half = (nodal[4 * node]! - nodal[4 * node + 1]!) / 2;
     const radius = Math.sqrt(half * half + (nodal[4 * node + 2]! / 2) ** 2);
-    const principal = [middle + radius, middle - radius, nodal[4 * node + 3]!].map((e) =>
-      engineering(e, finite),
-    );
-    return principal.reduce((most, e) => (Math.abs(e) > Math.abs(most) ? e : most));
+    const most = engineering(middle + radius, finite);
+    const least = engineering(middle - radius, finite);
+    return largerOf(largerOf(most, least), engineering(nodal[4 * node + 3]!, finite));
   });
 }
 

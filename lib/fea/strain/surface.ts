@@ -33,6 +33,10 @@ export interface SurfaceStrain {
   readonly round: Float64Array;
   /** unit tangent, xy per node */
   readonly tangent: Float64Array;
+  /** half the difference between the two edges that meet at a node, 0 where only one is searched */
+  readonly jump: Float64Array;
+  /** numbers of the searched edges */
+  readonly edges: readonly number[];
 }
 
 /**
@@ -48,24 +52,29 @@ export function surfaceStrain(
   u: Float64Array,
   finite: boolean,
 ): SurfaceStrain {
-  const along = new Float64Array(mesh.nodeCount).fill(Number.NaN);
+  const edges = tags.flatMap((tag) => edgesWith(mesh, tag));
+  const first = new Float64Array(mesh.nodeCount).fill(Number.NaN);
+  const second = new Float64Array(mesh.nodeCount).fill(Number.NaN);
   const tangent = new Float64Array(2 * mesh.nodeCount);
-  const count = new Uint8Array(mesh.nodeCount);
-  for (const edge of tags.flatMap((tag) => edgesWith(mesh, tag))) {
+  for (const edge of edges) {
     const before = stretchAt(mesh, edge, -BARLOW, u, finite);
     const after = stretchAt(mesh, edge, BARLOW, u, finite);
-    const middle = (before + after) / 2;
     const slope = (after - before) / (2 * BARLOW);
-    [-1, 0, 1].forEach((s, k) => {
+    for (let k = 0; k < 3; k++) {
       const node = mesh.edges[4 * edge + k]!;
-      const sum = count[node] ? along[node]! : 0;
-      along[node] = sum + middle + slope * s;
-      count[node]! += 1;
-      addTangent(mesh, edge, s, node, tangent);
-    });
+      const here = (before + after) / 2 + slope * (k - 1);
+      (Number.isNaN(first[node]!) ? first : second)[node] = here;
+      addTangent(mesh, edge, k - 1, node, tangent);
+    }
   }
-  for (let node = 0; node < mesh.nodeCount; node++) if (count[node]) along[node]! /= count[node]!;
-  return { along, round: roundStrain(mesh, plane, u), tangent: unitVectors(tangent) };
+  const both = (node: number) => !Number.isNaN(second[node]!);
+  return {
+    along: first.map((one, node) => (both(node) ? (one + second[node]!) / 2 : one)),
+    jump: first.map((one, node) => (both(node) ? Math.abs(one - second[node]!) / 2 : 0)),
+    round: roundStrain(mesh, plane, u),
+    tangent: unitVectors(tangent),
+    edges,
+  };
 }
 
 function addTangent(mesh: Mesh, edge: number, s: number, node: number, into: Float64Array): void {
