@@ -1,7 +1,7 @@
 import type { Box } from '../profile/profile';
 import type { BoundaryPoints } from './boundary';
 import { Buckets } from './buckets';
-import { MOST_NODES } from './options';
+import { MOST_POINTS } from './options';
 import type { SizeField } from './size-field';
 
 const SIXTH = Math.PI / 3;
@@ -71,7 +71,7 @@ function propose(fill: Filling, from: number, angle: number, here: number): void
  * 60 degrees to each other, taken when they are clear of all others. Points outside the profile are dropped by the
  * triangulation. Method: advancing front on a hexagonal pattern; deterministic, no random seeds. After the packing
  * approach of Shimada and Gossard (bubble mesh, 1995), from memory, without its relaxation.
- * Gives up (null) past MOST_NODES points.
+ * Gives up (null) past MOST_POINTS points.
  */
 export function fillInside(boundary: BoundaryPoints, size: SizeField): Points | null {
   const [x, y] = [[...boundary.x], [...boundary.y]];
@@ -85,7 +85,7 @@ export function fillInside(boundary: BoundaryPoints, size: SizeField): Points | 
     buckets.put(from);
   }
   for (let i = 0; i < x.length; i++) {
-    if (x.length > MOST_NODES) return null;
+    if (x.length > MOST_POINTS) return null;
     const ahead = fill.heading[i]!;
     const angles = i < fill.onBoundary ? boundaryDirections(ahead, behind[i]!) : innerDirections(ahead);
     const here = size(x[i]!, y[i]!);

@@ -35,5 +35,5 @@ export function refined(options: MeshOptions): MeshOptions {
   };
 }
 
-/** Most nodes a mesh may have; past it meshing is given up, so that no input can hold the thread for long. */
-export const MOST_NODES = 40_000;
+/** Most points (corner nodes) a mesh may have; past it meshing is given up: no input may hold the thread for long. */
+export const MOST_POINTS = 10_000;

@@ -2,9 +2,12 @@ import Delaunator from 'delaunator';
 import { pointAt, type Segment } from '../profile/segment';
 import type { Piece } from './boundary';
 import type { Points } from './front';
+import { repairThin } from './repair';
 
 /** Rounds of splitting before the recovery of the boundary is given up. */
 const MOST_ROUNDS = 12;
+/** Passes over thin triangles; each ends in a new triangulation. */
+const MOST_REPAIRS = 2;
 
 /** Straight triangles over the points; `inside` marks those within the profile. */
 export interface Triangulation {
@@ -149,7 +152,7 @@ function smooth({ x, y, isBoundary, corners, inside }: Triangulation): void {
  * Triangles over the points that keep to the profile's boundary.
  * Method: Delaunay (delaunator); boundary pieces that are missing are split and the triangulation repeated
  * (conforming Delaunay, after Shewchuk, Delaunay Refinement Mesh Generation, 1997, from memory); inside by flood
- * fill from the boundary; smoothing between repeats. Null when the boundary cannot be recovered.
+ * fill from the boundary; smoothing between repeats, repair of thin triangles last. Null when the boundary cannot be recovered.
  */
 export function triangulate(
   points: Points,
@@ -162,6 +165,9 @@ export function triangulate(
   let current = conforming(grown, segments);
   for (let pass = 0; pass < smoothing && current; pass++) {
     smooth(current);
+    current = conforming(grown, segments);
+  }
+  for (let pass = 0; pass < MOST_REPAIRS && current && repairThin(current); pass++) {
     current = conforming(grown, segments);
   }
   return current;

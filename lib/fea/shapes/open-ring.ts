@@ -24,6 +24,7 @@ function footHalf(ring: OpenRing, foot: NonNullable<OpenRing['foot']>): { from: 
   const bottom = -outer - foot.depth;
   const x = half + foot.fillet;
   const y = -Math.sqrt((outer + foot.fillet) ** 2 - x * x);
+  if (!(y > bottom)) throw new RangeError('the foot is too wide or too shallow for its rounding');
   const start = Math.atan2(y, x);
   const from = [
     line([0, bottom], [half, bottom], 'bottom'),
@@ -57,11 +58,10 @@ function halfRing(ring: OpenRing): Segment[] {
 
 /**
  * Bending of an open ring whose lips are spread apart. The half at x >= 0 is meshed. Throws a RangeError where the
- * foot is too wide for the ring.
+ * foot's rounding does not fit between ring and foot.
  */
 export function openRingModel(ring: OpenRing): BendingModel {
   const { foot, radius, thickness } = ring;
-  if (foot && foot.width / 2 > radius + thickness) throw new RangeError('the foot is wider than the ring');
   const supports: Support[] = [
     { tag: 'symmetry', fix: 'x' },
     foot ? { tag: 'bottom', fix: 'both' } : { corner: [0, -radius - thickness], fix: 'y' },
