@@ -45,11 +45,14 @@ describe('verdict on layers', () => {
     expect(standing.share).toBeGreaterThan((0.95 * peak) / 0.0085);
   });
 
-  it('judges an arm whose layers run along it by the strength along them, away from the root', () => {
+  it('judges an arm whose layers run along it where the fillet turns the strain towards the next layer', () => {
+    // across the layers is x here: the arm's face pulls along its layers, the fillet's end at the base across them
     const lying = verdict(0, 0.008)!;
     const standing = verdict(Math.PI / 2, 0.008)!;
-    expect(lying.share).toBeLessThan(standing.share);
-    expect(lying.allowable).toBeGreaterThan(0.015);
+    expect(lying.share).toBeLessThan(0.8 * standing.share);
+    expect(lying.allowable).toBeGreaterThan(0.012);
+    expect(lying.place[0]).toBeGreaterThan(1);
+    expect(lying.angle).toBeLessThan(Math.PI / 2);
   });
 
   it('is not known where the strength between layers is not', () => {
