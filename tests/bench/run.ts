@@ -1,0 +1,2 @@
+// Every bench of the project, one after the other. Times are of the machine at hand; ratios travel.
+import './fea';
