@@ -1,13 +1,14 @@
+import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { parseParameters, warnings } from '@/generators/parameters';
 import strap from '@/generators/peg-strap';
 import { headOf, stripLayout } from '@/generators/peg-strap/layout';
 import { type PegStrap, parameters } from '@/generators/peg-strap/schema';
-import type { Report } from '@/generators/report';
-import { materialById } from '@/lib/materials/data';
+import type { Figure, Report } from '@/generators/report';
+import { MATERIALS, materialById } from '@/lib/materials/data';
 import { DEFAULT_USE, type Material } from '@/lib/materials/types';
 import { toughPlastic } from '@/tests/support/materials';
-import { checkFamilySolids } from '@/tests/support/solids';
+import { arbitraryParameters, checkFamilySolids } from '@/tests/support/solids';
 
 const tpu = materialById('tpu-95a')!;
 const values = (changed: Partial<PegStrap> = {}): PegStrap => ({ ...parameters.defaults, ...changed });
@@ -199,6 +200,44 @@ describe('peg strap: forces', () => {
     expect(curve.points.at(-1)![1]).toBe(0);
     expect(Math.max(...curve.points.map(([, force]) => force))).toBeCloseTo(figureValue('push-in-force')!, 9);
     expect(curve.points.every(([x], i) => i === 0 || x >= curve.points[i - 1]![0])).toBe(true);
+  });
+});
+
+function expectSound({ id, value, handbook, low, high, limit, because }: Figure) {
+  for (const part of [value, handbook, low, high, limit]) {
+    if (part !== null) expect(Number.isFinite(part) && part >= 0, id).toBe(true);
+  }
+  if (value === null) {
+    expect(because, id).toMatch(/Not known|Locks/);
+    return;
+  }
+  expect(low ?? value, id).toBeLessThanOrEqual(value);
+  expect(high ?? value, id).toBeGreaterThanOrEqual(value);
+}
+
+describe('peg strap: any valid design in any plastic', () => {
+  const every = fc.property(
+    arbitraryParameters(parameters),
+    fc.constantFrom(...MATERIALS),
+    fc.constantFrom('once', 'sometimes', 'often'),
+    (drawn, material, opening) => {
+      const report = strap.check(drawn, material, { ...DEFAULT_USE, opening });
+      report.figures.forEach(expectSound);
+      const points = report.curves.flatMap((curve) => curve.points.flat());
+      expect(points.every(Number.isFinite)).toBe(true);
+    },
+  );
+
+  it('has figures that are finite, or not known with the reason, inside their bands', () => {
+    fc.assert(every, { numRuns: 400, seed: 3 });
+  });
+
+  it('never strains the eye less than its handbook figure, whatever the shape', () => {
+    const dearer = fc.property(arbitraryParameters(parameters), (drawn) => {
+      const eye = figure(strap.check(drawn, tpu, DEFAULT_USE), 'eye-strain');
+      expect(eye.value!).toBeGreaterThanOrEqual(eye.handbook!);
+    });
+    fc.assert(dearer, { numRuns: 100, seed: 4 });
   });
 });
 
