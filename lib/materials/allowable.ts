@@ -18,7 +18,7 @@ export interface AllowableStrain {
 }
 
 const GUIDE: Source = {
-  text: 'Snap-Fit Joints for Plastics - A Design Guide, frequent separation about 60 % of the single value (as quoted)',
+  text: 'Snap-Fit Joints for Plastics - A Design Guide, frequent separation about 60 % of the single value',
   mark: 'quoted',
 };
 const BETWEEN: Source = {
@@ -26,11 +26,11 @@ const BETWEEN: Source = {
   mark: 'derived',
 };
 const HEAT: Source = {
-  text: 'Service temperature no higher than heat deflection temperature (0.45 MPa) less 20 K, nor than the continuous limit (as quoted)',
+  text: 'Service temperature no higher than heat deflection temperature (0.45 MPa) less 20 K, nor than the continuous limit',
   mark: 'quoted',
 };
 const LAYERS: Source = {
-  text: 'Across layers half of the strain along them, or refuse (printed-part guide, as quoted)',
+  text: 'Across layers half of the strain along them, or refuse (printed-part guide)',
   mark: 'quoted',
 };
 const GIVEN: Source = { text: 'Given for the use at hand', mark: 'given' };

@@ -62,7 +62,7 @@ export const abs: Material = {
     0.34,
     0.69,
     1.03,
-    detail(GUIDE_FRICTION, '0.50-0.65 x 1.2 = 0.60-0.78; band +- 50 % for printed faces'),
+    detail(GUIDE_FRICTION, '0.50-0.65 × 1.2 = 0.60-0.78; band ± 50 % for printed faces'),
   ),
   density: density(1.12, PRINTED_SHEET),
   heatDeflection: temperature(100, detail(PRINTED_SHEET, 'at 0.45 MPa')),

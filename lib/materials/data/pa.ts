@@ -54,7 +54,7 @@ export const paDry: Material = {
     0.26,
     0.52,
     0.79,
-    detail(GUIDE_FRICTION, '0.30-0.40 x 1.5 = 0.45-0.60; band +- 50 % for printed faces'),
+    detail(GUIDE_FRICTION, '0.30-0.40 × 1.5 = 0.45-0.60; band ± 50 % for printed faces'),
   ),
   density: density(1.12, PRINTED_SHEET),
   heatDeflection: temperature(111, detail(PRINTED_SHEET, 'at 0.45 MPa; 70 at 1.8 MPa')),

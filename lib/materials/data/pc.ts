@@ -53,7 +53,7 @@ export const pc: Material = {
     0.25,
     0.6,
     0.9,
-    detail(GUIDE_FRICTION, '0.45-0.55 x 1.2 = 0.54-0.66; another maker 0.25-0.40; +- 50 % for printed faces'),
+    detail(GUIDE_FRICTION, '0.45-0.55 × 1.2 = 0.54-0.66; another maker 0.25-0.40; ± 50 % for printed faces'),
   ),
   density: density(1.19, PRINTED_SHEET),
   heatDeflection: temperature(114, detail(PRINTED_SHEET, 'at 0.45 MPa')),

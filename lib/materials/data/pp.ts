@@ -63,7 +63,7 @@ export const pp: Material = {
     0.2,
     0.41,
     0.62,
-    detail(GUIDE_FRICTION, '0.25-0.30 x 1.5 = 0.375-0.45; band +- 50 % for printed faces'),
+    detail(GUIDE_FRICTION, '0.25-0.30 × 1.5 = 0.375-0.45; band ± 50 % for printed faces'),
   ),
   density: middle(density, [0.9, 0.91], OPEN_TABLES),
   heatDeflection: temperature(85, detail(OPEN_TABLES, 'at 0.45 MPa, 85-100; the low end taken'), [85, 100]),

@@ -62,5 +62,5 @@ export const price = (perKg: number): Price => ({
   perKg,
   currency: 'EUR',
   asOf: '2026-06-01',
-  source: { text: 'Usual price of a 1 kg spool, common practice, no source', mark: 'common-practice' },
+  source: { text: 'Usual price of a 1 kg spool', mark: 'common-practice' },
 });
