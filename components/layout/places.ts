@@ -4,4 +4,7 @@ export interface Place {
 }
 
 /** Where the header leads. A place is listed once its page exists. */
-export const PLACES: readonly Place[] = [{ href: '/design', name: 'Design' }];
+export const PLACES: readonly Place[] = [
+  { href: '/design', name: 'Design' },
+  { href: '/materials', name: 'Materials' },
+];
