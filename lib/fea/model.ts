@@ -61,9 +61,6 @@ export interface BendingModel {
   readonly factors: readonly Factor[];
 }
 
-/** A family's answer: the model, or why there is none. */
-export type Bending = BendingModel | { readonly none: string };
-
 /** Elastic constants for a solve, MPa. */
 export interface ElasticNumbers {
   readonly modulus: number;

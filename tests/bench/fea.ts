@@ -46,7 +46,7 @@ const MODELS = {
     leaf: 2,
     leafLength: 4,
     fillet: 0.3,
-    layout: 'centre',
+    relief: 0.8,
     angle: Math.PI,
     width: 10,
   }),

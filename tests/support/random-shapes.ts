@@ -86,16 +86,15 @@ function uArm(between: Between): BendingModel {
 function web(between: Between): BendingModel {
   const thickness = between(0.2, 0.8);
   const leaf = thickness + between(0.8, 2.5);
-  const layout = between(0, 1) < 0.5 ? 'centre' : 'flush';
-  const step = layout === 'centre' ? (leaf - thickness) / 2 : leaf - thickness;
+  const relief = between(0, 1) < 0.5 ? 0 : ((leaf - thickness) / 2) * between(0.3, 1);
   const length = between(0.8, 8);
   return webModel({
     length,
     thickness,
     leaf,
     leafLength: leaf * between(1, 2.5),
-    fillet: Math.min(step, length / 2) * between(0.2, 0.9),
-    layout,
+    fillet: Math.min(leaf - thickness - relief, length / 2) * between(0.2, 0.9),
+    relief,
     angle: between(30, 180) * DEGREE,
     width: between(5, 30),
   });

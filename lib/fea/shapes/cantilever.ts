@@ -26,26 +26,32 @@ export interface Cantilever {
   readonly deflection: number;
 }
 
-/** Share of the catch's height at which the lead-in is cut off, so that its edge is not a knife. */
-const NOSE = 0.15;
+/** Where a tapering back face reaches its tip thickness. */
+function taperEnd({ length, thickness, tipThickness }: Cantilever): Corner[] {
+  if (tipThickness === thickness) return [];
+  return [{ at: [thickness / 2 - tipThickness, length], tag: 'back' }];
+}
 
-function tipCorners({ length, thickness, tipThickness, catch: hook }: Cantilever): Corner[] {
+function tipCorners(arm: Cantilever): Corner[] {
+  const { length, thickness, tipThickness, catch: hook } = arm;
   const front = thickness / 2;
   const back = front - tipThickness;
-  if (!hook)
+  if (!hook) {
     return [
       { at: [front, length], tag: 'land' },
       { at: [back, length], tag: 'back' },
     ];
+  }
   const peak = front + hook.height;
   const foot = length - (hook.back >= Math.PI / 2 ? 0 : hook.height / Math.tan(hook.back));
-  const end = length + hook.land + ((1 - NOSE) * hook.height) / Math.tan(hook.lead);
+  const end = length + hook.land + hook.height / Math.tan(hook.lead);
   return [
     { at: [front, foot], tag: 'return' },
     { at: [peak, length], tag: 'land', size: hook.land },
     { at: [peak, length + hook.land], tag: 'lead' },
-    { at: [front + NOSE * hook.height, end], tag: 'end' },
+    { at: [front, end], tag: 'end' },
     { at: [back, end], tag: 'back' },
+    ...taperEnd(arm),
   ];
 }
 

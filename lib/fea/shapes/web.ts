@@ -10,34 +10,37 @@ export interface Web {
   readonly leaf: number;
   /** length of leaf taken into the model; past twice the leaf's thickness more changes nothing */
   readonly leafLength: number;
+  /** radius between web and leaf on the upper side */
   readonly fillet: number;
-  /** web in the middle of the leaves' thickness, or flush with their lower face (y = 0) */
-  readonly layout: 'centre' | 'flush';
+  /** how far the web's lower face lies above the leaves' lower face (y = 0); 0 is flush */
+  readonly relief: number;
   /** positive folds the leaves up, which stretches the lower face */
   readonly angle: number;
   readonly width: number;
 }
 
-function stepCorners({ length, leaf, fillet }: Web, low: number): Corner[] {
-  if (low === 0) return [];
+/** Lower edge of the leaf; its rounding is the fillet's, or what the recess has room for. */
+function recessCorners({ length, relief, fillet }: Web): Corner[] {
+  if (relief === 0) return [];
   const x = length / 2;
-  const inner: Corner = { at: [x, low], radius: fillet, tag: 'step', filletTag: 'web-fillet' };
-  return leaf > 0 ? [inner, { at: [x, 0], tag: 'leaf' }] : [];
+  return [
+    { at: [x, relief], radius: Math.min(fillet, relief), tag: 'step', filletTag: 'web-fillet' },
+    { at: [x, 0], tag: 'leaf' },
+  ];
 }
 
 /** Half of web and leaf at x >= 0, counter-clockwise from the plane of symmetry. */
 function webCorners(web: Web): Corner[] {
-  const { length, thickness, leaf, leafLength, fillet, layout } = web;
-  const low = layout === 'centre' ? (leaf - thickness) / 2 : 0;
+  const { length, thickness, leaf, leafLength, fillet, relief } = web;
   const x = length / 2;
   return [
-    { at: [0, low], tag: 'web' },
-    ...stepCorners(web, low),
+    { at: [0, relief], tag: 'web' },
+    ...recessCorners(web),
     { at: [x + leafLength, 0], tag: 'end' },
     { at: [x + leafLength, leaf], tag: 'leaf' },
     { at: [x, leaf], tag: 'step' },
-    { at: [x, low + thickness], radius: fillet, tag: 'web', filletTag: 'web-fillet' },
-    { at: [0, low + thickness], tag: 'symmetry' },
+    { at: [x, relief + thickness], radius: fillet, tag: 'web', filletTag: 'web-fillet' },
+    { at: [0, relief + thickness], tag: 'symmetry' },
   ];
 }
 
@@ -47,7 +50,6 @@ function webCorners(web: Web): Corner[] {
  * plastic (PP), so past yield the strain is nominal.
  */
 export function webModel(web: Web): BendingModel {
-  const low = web.layout === 'centre' ? (web.leaf - web.thickness) / 2 : 0;
   return {
     profile: { loops: [outline(webCorners(web))] },
     plane: 'plane-strain',
@@ -55,7 +57,7 @@ export function webModel(web: Web): BendingModel {
     mirrored: true,
     supports: [
       { tag: 'symmetry', fix: 'x' },
-      { corner: [0, low], fix: 'y' },
+      { corner: [0, web.relief], fix: 'y' },
     ],
     drive: { kind: 'rotation', tag: 'end', value: web.angle },
     peakTags: ['web', 'web-fillet'],

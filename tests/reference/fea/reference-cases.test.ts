@@ -172,7 +172,7 @@ describe('living hinges folded with neo-Hooke', () => {
         leaf: plate,
         leafLength: 2 * plate,
         fillet,
-        layout: layout === 'centre' ? 'centre' : 'flush',
+        relief: layout === 'centre' ? (plate - t) / 2 : 0,
         angle: (way * theta_deg * Math.PI) / 180,
         width: 1,
       }),

@@ -199,7 +199,7 @@ describe('a folded web', () => {
         leaf: 2,
         leafLength: 4,
         fillet: 0.3,
-        layout: 'centre',
+        relief: 0.8,
         angle,
         width: 10,
       });
