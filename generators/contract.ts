@@ -1,3 +1,4 @@
+import type { BendingModel } from '@/lib/fea/model';
 import type { Kernel, NamedSolid, Placement, Vec3 } from '@/lib/geometry/kernel';
 import type { LayerDirection, Material, Source, Use } from '@/lib/materials/types';
 import type { Unit } from '@/lib/units';
@@ -83,6 +84,32 @@ export interface Motion {
   pose(body: string, rest: Float32Array, t: number, out: Posed): void;
 }
 
+/**
+ * How one body of a family bends as a plane shape, for the finite elements. Plain data, so that a worker can solve
+ * it without the family.
+ */
+export interface BendingPlane {
+  readonly model: BendingModel;
+  readonly body: string;
+  /** takes x and y of the plane, and z out of it, to the coordinates of the body as built */
+  readonly placement: Placement;
+  /** figure of the report that the solved peak strain stands for */
+  readonly strainFigure: string;
+  /** figures in proportion to the solved force, the force itself first; empty where none is */
+  readonly forceFigures: readonly string[];
+  /** secant modulus in MPa at the working strain; null where the plastic's is not known */
+  readonly modulus: number | null;
+  /** direction across the layers in the plane, rad from x, in the stance the use names; null where they lie in it */
+  readonly layerNormal: number | null;
+}
+
+/** Why a family, or these values of it, has no plane model: shown with the figures. */
+export interface NoBending {
+  readonly none: string;
+}
+
+export type Bending = BendingPlane | NoBending;
+
 /** Guide page of a family: data, rendered by one page. Loaded apart from the family. */
 export interface Guide {
   readonly purpose: readonly string[];
@@ -114,6 +141,8 @@ export interface Family<P = any> {
   /** closed-form volume in mm3 of each body, by name, as faceted at the given quality, for tests and mass; null where none exists */
   readonly volumes: (values: P, segmentsPerTurn: number) => Readonly<Record<string, number>> | null;
   readonly motion: (values: P, material: Material) => Motion;
+  /** plane model for the finite elements; families that never bend as one leave it out */
+  readonly bending?: (values: P, material: Material, use: Use) => Bending;
   readonly callouts: (values: P) => readonly Callout[];
   /** best first */
   readonly stances: (values: P) => readonly Stance[];
