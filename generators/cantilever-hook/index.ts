@@ -1,5 +1,6 @@
 import type { Family } from '../contract';
 import { about } from './about';
+import { bending } from './bending';
 import { callouts } from './callouts';
 import { check } from './checks';
 import { build, volumes } from './geometry';
@@ -16,6 +17,7 @@ const family: Family<HookValues> = {
   build,
   volumes,
   motion,
+  bending,
   callouts,
   stances,
 };

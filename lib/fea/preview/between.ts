@@ -8,7 +8,7 @@ export interface Moment {
   readonly strain: Float32Array;
 }
 
-const mix = (a: number, b: number, share: number): number => a + (b - a) * share;
+const mix = (a: number, b: number, share: number): number => (1 - share) * a + share * b;
 
 /**
  * The solved motion at share `t` of the full deflection: straight between the stored steps. Exact at the steps;

@@ -14,7 +14,7 @@ export interface Catch {
 
 /** An arm along +y from its root at y = 0; its front face is straight, its back face tapers. */
 export interface Cantilever {
-  /** root to the start of the catch's land, or to the tip where there is no catch */
+  /** root to the edge of the catch that passes last, or to the tip where there is no catch */
   readonly length: number;
   readonly thickness: number;
   readonly tipThickness: number;
@@ -25,6 +25,11 @@ export interface Cantilever {
   /** how far the land is pressed towards -x, mm */
   readonly deflection: number;
 }
+
+/**
+ * Share of the catch's flat, from its edge, that is pressed: an arm strains most just before its edge slips past.
+ */
+const PRESSED = 0.2;
 
 /** Where a tapering back face reaches its tip thickness. */
 function taperEnd({ length, thickness, tipThickness }: Cantilever): Corner[] {
@@ -47,7 +52,8 @@ function tipCorners(arm: Cantilever): Corner[] {
   const end = length + hook.land + hook.height / Math.tan(hook.lead);
   return [
     { at: [front, foot], tag: 'return' },
-    { at: [peak, length], tag: 'land', size: hook.land },
+    { at: [peak, length], tag: 'land' },
+    { at: [peak, length + PRESSED * hook.land], tag: 'flat' },
     { at: [peak, length + hook.land], tag: 'lead' },
     { at: [front, end], tag: 'end' },
     { at: [back, end], tag: 'back' },

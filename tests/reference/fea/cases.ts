@@ -1,7 +1,7 @@
-import { readFileSync } from 'node:fs';
 import type { BendingModel } from '@/lib/fea/model';
 import { cantileverModel } from '@/lib/fea/shapes/cantilever';
 import type { Root } from '@/lib/fea/shapes/root';
+import { casesOf as allOf, type CaseKind } from '@/tests/support/finite-elements';
 
 export interface Case {
   readonly id: string;
@@ -11,11 +11,7 @@ export interface Case {
   readonly expected: Readonly<Record<string, number>>;
 }
 
-const all: readonly Case[] = JSON.parse(
-  readFileSync(new URL('../finite-elements/cases.json', import.meta.url), 'utf8'),
-);
-
-export const casesOf = (kind: string): readonly Case[] => all.filter((one) => one.kind === kind);
+export const casesOf = (kind: CaseKind): readonly Case[] => allOf(kind) as readonly Case[];
 
 const SHARP = { front: 0, back: 0 };
 

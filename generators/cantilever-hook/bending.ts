@@ -1,0 +1,99 @@
+import type { BendingModel, Factor, Width } from '@/lib/fea/model';
+import { cantileverModel } from '@/lib/fea/shapes/cantilever';
+import type { Root } from '@/lib/fea/shapes/root';
+import type { Placement } from '@/lib/geometry/kernel';
+import { secantModulus } from '@/lib/materials/secant';
+import type { Material, Use } from '@/lib/materials/types';
+import { compliance, type FlexibleArm } from '@/lib/mechanics/large-deflection';
+import { blockSprings, rootSection, wallSprings } from '@/lib/mechanics/root';
+import { narrowingStrain } from '@/lib/mechanics/short-beam';
+import { radians } from '@/lib/units';
+import type { Bending } from '../contract';
+import { armOf, flexibleArm, strainOf } from './mechanics';
+import type { HookValues } from './schema';
+
+/** Plane x across the arm from its middle, y along it; the body has its straight face on x = 0 and stands along z. */
+const placement = (v: HookValues): Placement => [
+  ...[1, 0, 0, 0],
+  ...[0, 0, 1, 0],
+  ...[0, -1, 0, 0],
+  ...[-v.rootThickness / 2, 0, 0, 1],
+];
+
+const rootOf = (v: HookValues): Root =>
+  v.root === 'wall'
+    ? { kind: 'base', thickness: v.wallThickness, span: v.wallSpan, bottom: false }
+    : { kind: 'base', thickness: v.baseThickness, span: v.baseLength, bottom: true };
+
+function widthOf(v: HookValues): Width {
+  if (v.tipWidth === v.rootWidth) return { kind: 'even', width: v.rootWidth };
+  const stations = [
+    [0, v.rootWidth],
+    [v.armLength, v.tipWidth],
+  ] as const;
+  return { kind: 'stations', along: 'y', stations };
+}
+
+/** The arm as the plane model sees it: on a base no wider than itself, free to arch across its width. */
+function planeArm(v: HookValues, poisson: number): FlexibleArm {
+  const section = rootSection(armOf(v), v.rootFillet);
+  const springs =
+    v.root === 'wall'
+      ? wallSprings({ thickness: v.wallThickness, span: v.wallSpan, width: v.rootWidth }, section)
+      : blockSprings(v.rootWidth, section);
+  return { arm: armOf(v), fillet: v.rootFillet, springs, poisson, stiffening: 1 };
+}
+
+/** A base wider than the arm turns less than the strip under it, and a wide arm cannot arch at its root. */
+function widthFactor(v: HookValues, poisson: number): Factor {
+  const plane = compliance(planeArm(v, poisson));
+  const solid = flexibleArm(v, poisson);
+  return {
+    force: plane / compliance(solid),
+    strain: plane / compliance({ ...solid, stiffening: 1 }),
+    because: 'the base is wider than the arm, and a wide arm is held flat across its root',
+  };
+}
+
+function factorsOf(v: HookValues, poisson: number): Factor[] {
+  const narrowing = narrowingStrain(v.tipWidth / v.rootWidth);
+  const taper = { force: 1, strain: narrowing, because: 'an arm that narrows carries more at mid-width' };
+  return narrowing > 1 ? [widthFactor(v, poisson), taper] : [widthFactor(v, poisson)];
+}
+
+/** The hook in its plane of bending, pressed back by the whole undercut. */
+export function planeModel(v: HookValues, poisson: number): BendingModel {
+  const model = cantileverModel({
+    length: v.armLength,
+    thickness: v.rootThickness,
+    tipThickness: v.tipThickness,
+    catch: {
+      height: v.undercut,
+      land: v.landLength,
+      lead: radians(v.leadInAngle),
+      back: radians(v.returnAngle),
+    },
+    root: rootOf(v),
+    fillets: { front: v.rootFillet, back: v.rootFillet },
+    width: widthOf(v),
+    deflection: v.undercut,
+  });
+  return { ...model, factors: factorsOf(v, poisson) };
+}
+
+/** Printed standing, the layers lie across the arm; on its side they lie in the plane of bending. */
+const layerNormal = (use: Use): number | null => (use.layers === 'across' ? Math.PI / 2 : null);
+
+export function bending(v: HookValues, material: Material, use: Use): Bending {
+  const poisson = material.poisson.value;
+  const { nominal } = strainOf(v, flexibleArm(v, poisson), v.undercut);
+  return {
+    model: planeModel(v, poisson),
+    body: 'hook',
+    placement: placement(v),
+    strainFigure: 'peak-strain',
+    forceFigures: ['deflection-force', 'mating-force', 'mating-force-tilted', 'separation-force'],
+    modulus: secantModulus(material, nominal)?.value ?? null,
+    layerNormal: layerNormal(use),
+  };
+}

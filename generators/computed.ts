@@ -1,0 +1,127 @@
+import type { Solved } from '@/lib/fea/solve/solution';
+import type { Vec3 } from '@/lib/geometry/kernel';
+import { movePoint } from '@/lib/geometry/placement';
+import { degrees, formatQuantity } from '@/lib/units';
+import type { BendingPlane } from './contract';
+import { type Figure, judge, type Report, report } from './report';
+
+/** What the finite elements found, beside the figures they stand for. */
+export interface Computed {
+  readonly method: 'linear' | 'non-linear';
+  /** why the answer is linear although large displacement was asked for */
+  readonly fellBack: string | null;
+  /** peak tension as a fraction, and where it is on the body at rest */
+  readonly strain: number;
+  readonly body: string;
+  readonly place: Vec3;
+  /** N or N mm; null where the plastic's modulus is not known */
+  readonly force: number | null;
+  /** the corrected formula's peak; null where it has none */
+  readonly formula: number | null;
+  /** computed over formula less 1; null where there is nothing to compare */
+  readonly difference: number | null;
+  /** the likely reason of a difference over a tenth; null below */
+  readonly likely: string | null;
+  readonly unstable: boolean;
+  /** estimated error of the peak from the mesh, fraction of it */
+  readonly errorEstimate: number;
+  readonly elements: number;
+  readonly unknowns: number;
+}
+
+export interface ComputedReport extends Report {
+  readonly computed: Computed;
+}
+
+/** Difference between computed and formula from which it is pointed out. */
+export const WORTH_SAYING = 0.1;
+
+const SOURCE = {
+  text: 'Finite elements on the outline of the part (six-node triangles, checked against published solutions)',
+  mark: 'computed',
+} as const;
+
+const figureOf = (given: Report, id: string): Figure | undefined =>
+  given.figures.find((one) => one.id === id);
+
+function likelyReason(solution: Solved, plane: BendingPlane): string {
+  if (solution.fellBack)
+    return 'the large movement could not be followed, so the computed figure is for small ones';
+  if (solution.unstable) return 'the part snaps through on the way';
+  if (plane.model.factors.length > 0) return plane.model.factors.map((factor) => factor.because).join('; ');
+  return 'the formula simplifies the outline that is computed here';
+}
+
+function forceOf(solution: Solved, plane: BendingPlane): number | null {
+  return plane.modulus === null ? null : Math.abs(solution.steps.at(-1)!.force);
+}
+
+function computedOf(given: Report, plane: BendingPlane, solution: Solved): Computed {
+  const { strain, place } = solution.tension;
+  const formula = figureOf(given, plane.strainFigure)?.value ?? null;
+  const difference = formula === null || formula === 0 ? null : strain / formula - 1;
+  const tells = difference !== null && Math.abs(difference) > WORTH_SAYING;
+  return {
+    method: solution.method,
+    fellBack: solution.fellBack,
+    strain,
+    body: plane.body,
+    place: movePoint(plane.placement, [place[0], place[1], 0]),
+    force: forceOf(solution, plane),
+    formula,
+    difference,
+    likely: tells ? likelyReason(solution, plane) : null,
+    unstable: solution.unstable,
+    errorEstimate: solution.errorEstimate,
+    elements: solution.elements,
+    unknowns: solution.unknowns,
+  };
+}
+
+function strainReason({ formula, difference, likely }: Computed, solution: Solved): string {
+  const how = solution.method === 'linear' ? 'small movement' : 'large movement';
+  const against =
+    formula === null
+      ? 'the formula has no figure here'
+      : `the formula gives ${formatQuantity(formula, 'strain')}${difference !== null && likely ? `, ${Math.round(100 * difference)} % apart: ${likely}` : ''}`;
+  const layers = solution.layers
+    ? ` Judged where the layers are worst, at ${formatQuantity(degrees(solution.layers.angle), 'deg')} to their normal.`
+    : '';
+  return `Computed on the outline (${how}); ${against}.${layers}`;
+}
+
+function strainFigure(figure: Figure, computed: Computed, solution: Solved): Figure {
+  const value = solution.layers?.strain ?? computed.strain;
+  const limit = solution.layers?.allowable ?? figure.limit;
+  const verdict = figure.verdict === null ? null : judge(value, limit, figure.limitKind);
+  return { ...figure, value, limit, verdict, because: strainReason(computed, solution), source: SOURCE };
+}
+
+/** A force follows the computed one in proportion; a figure that is not known stays so. */
+function scaled(figure: Figure, ratio: number): Figure {
+  const times = (value: number | null) => (value === null ? null : value * ratio);
+  return {
+    ...figure,
+    value: times(figure.value),
+    low: times(figure.low),
+    high: times(figure.high),
+    source: SOURCE,
+  };
+}
+
+/**
+ * The report with the computed figures in place of the formula's: the verdict then stands on them. Handbook figures
+ * stay as they are; what the formula gave is kept in `computed`.
+ */
+export function withComputed(given: Report, plane: BendingPlane, solution: Solved): ComputedReport {
+  const computed = computedOf(given, plane, solution);
+  const [main] = plane.forceFigures;
+  const formula = main === undefined ? null : (figureOf(given, main)?.value ?? null);
+  const ratio = formula && computed.force !== null ? computed.force / formula : null;
+  const figures = given.figures.map((figure) => {
+    if (figure.id === plane.strainFigure) return strainFigure(figure, computed, solution);
+    if (ratio !== null && plane.forceFigures.includes(figure.id)) return scaled(figure, ratio);
+    return figure;
+  });
+  return { ...report({ ...given, figures }), computed };
+}
