@@ -2,8 +2,8 @@ import { buildPart, type PartRequest } from '@/generators/build-part';
 import type { Family } from '@/generators/contract';
 import { familyEntry } from '@/generators/index';
 import { InvalidInput, NotFound } from '@/lib/errors';
-import { createKernelHost, type KernelHost } from '@/lib/geometry/host';
-import { type BuiltBody, KernelError, QUALITY } from '@/lib/geometry/kernel';
+import { createKernelHost } from '@/lib/geometry/host';
+import { type BuiltBody, KernelError } from '@/lib/geometry/kernel';
 
 export interface BuildRequest extends PartRequest {
   readonly family: string;
@@ -29,17 +29,7 @@ function once<T>(load: () => Promise<T>): () => Promise<T> {
   };
 }
 
-/** Starts the kernel and runs a throwaway build, which compiles the code paths that the first part needs. */
-async function startHost(): Promise<KernelHost> {
-  const started = await createKernelHost();
-  started.build((kernel) => {
-    const plate = kernel.extrude(kernel.outlines.rectangle(4, 4, { cornerRadius: 1 }), 2);
-    return [{ name: 'warm-up', solid: kernel.subtract(plate, [kernel.cylinder(1, 3)]) }];
-  }, QUALITY.preview);
-  return started;
-}
-
-const kernelHost = once(startHost);
+const kernelHost = once(createKernelHost);
 
 async function loadFamily(id: string): Promise<Family> {
   const entry = familyEntry(id);

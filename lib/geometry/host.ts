@@ -7,6 +7,7 @@ import {
   type NamedSolid,
   type Placement,
   type Profile,
+  QUALITY,
   type Quality,
   type Solid,
 } from './kernel';
@@ -125,10 +126,10 @@ function checkNames(solids: readonly NamedSolid[]): void {
   if (names.size < solids.length) throw new KernelError('build', 'two bodies have one name');
 }
 
-/** Loads the kernel: once a page worker or Node thread. */
+/** Loads the kernel, once a thread, and runs a throwaway build, which compiles what the first part needs. */
 export async function createKernelHost(): Promise<KernelHost> {
   const module = await loadManifold();
-  return {
+  const host: KernelHost = {
     build(make, quality) {
       const shelf = new Shelf();
       try {
@@ -140,4 +141,11 @@ export async function createKernelHost(): Promise<KernelHost> {
       }
     },
   };
+  host.build(throwaway, QUALITY.preview);
+  return host;
+}
+
+function throwaway(kernel: Kernel): NamedSolid[] {
+  const plate = kernel.extrude(kernel.outlines.rectangle(4, 4, { cornerRadius: 1 }), 2);
+  return [{ name: 'throwaway', solid: kernel.subtract(plate, [kernel.cylinder(1, 3)]) }];
 }
