@@ -27,9 +27,9 @@ const envSchema = z.object({
       'LOG_LEVEL must be debug, info, warn, error or silent',
     )
     .default('info'),
-  RATE_READS_PER_MINUTE: perMinute('RATE_READS_PER_MINUTE', 600),
-  RATE_CHECKS_PER_MINUTE: perMinute('RATE_CHECKS_PER_MINUTE', 600),
-  RATE_EXPORTS_PER_MINUTE: perMinute('RATE_EXPORTS_PER_MINUTE', 60),
+  RATE_READS_PER_MINUTE: perMinute('RATE_READS_PER_MINUTE', 1200),
+  RATE_CHECKS_PER_MINUTE: perMinute('RATE_CHECKS_PER_MINUTE', 1200),
+  RATE_EXPORTS_PER_MINUTE: perMinute('RATE_EXPORTS_PER_MINUTE', 240),
 });
 
 export type Env = Readonly<z.infer<typeof envSchema>>;

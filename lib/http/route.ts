@@ -80,7 +80,7 @@ function failure(error: unknown, at: { instance: string; requestId: string }): R
   if (error instanceof NotFound)
     return problemResponse({ kind: 'not-found', detail: `${error.message}.` }, at);
   if (error instanceof InvalidInput) {
-    const errors = error.issues.slice(0, MOST_ERRORS);
+    const errors = error.issues.slice(0, MOST_ERRORS).map(({ received: _, ...issue }) => issue);
     const detail = errors.map((issue) => issue.message).join('; ');
     return problemResponse({ kind: 'invalid-input', detail, errors }, at);
   }
