@@ -1,4 +1,5 @@
 import type { Solved } from '@/lib/fea/solve/solution';
+import type { Peak } from '@/lib/fea/strain/peak';
 import type { Vec3 } from '@/lib/geometry/kernel';
 import { movePoint } from '@/lib/geometry/placement';
 import { degrees, formatQuantity } from '@/lib/units';
@@ -10,8 +11,9 @@ export interface Computed {
   readonly method: 'linear' | 'non-linear';
   /** why the answer is linear although large displacement was asked for */
   readonly fellBack: string | null;
-  /** peak tension as a fraction, and where it is on the body at rest */
+  /** peak strain as a fraction, without sign, and where it is on the body at rest */
   readonly strain: number;
+  readonly kind: 'tension' | 'compression';
   readonly body: string;
   readonly place: Vec3;
   /** N or N mm; null where the plastic's modulus is not known */
@@ -56,8 +58,14 @@ function forceOf(solution: Solved, plane: BendingPlane): number | null {
   return plane.modulus === null ? null : Math.abs(solution.steps.at(-1)!.force);
 }
 
+/** The peak that the family's figure counts. */
+function peakOf({ tension, compression }: Solved, { counts }: BendingPlane): Peak {
+  return counts === 'either' && -compression.strain > tension.strain ? compression : tension;
+}
+
 function computedOf(given: Report, plane: BendingPlane, solution: Solved): Computed {
-  const { strain, place } = solution.tension;
+  const { strain: signed, place } = peakOf(solution, plane);
+  const strain = Math.abs(signed);
   const formula = figureOf(given, plane.strainFigure)?.value ?? null;
   const difference = formula === null || formula === 0 ? null : strain / formula - 1;
   const tells = difference !== null && Math.abs(difference) > WORTH_SAYING;
@@ -65,8 +73,9 @@ function computedOf(given: Report, plane: BendingPlane, solution: Solved): Compu
     method: solution.method,
     fellBack: solution.fellBack,
     strain,
+    kind: signed < 0 ? 'compression' : 'tension',
     body: plane.body,
-    place: movePoint(plane.placement, [place[0], place[1], 0]),
+    place: movePoint(plane.placements[0], [place[0], place[1], 0]),
     force: forceOf(solution, plane),
     formula,
     difference,
@@ -78,7 +87,7 @@ function computedOf(given: Report, plane: BendingPlane, solution: Solved): Compu
   };
 }
 
-function strainReason({ formula, difference, likely }: Computed, solution: Solved): string {
+function strainReason({ kind, formula, difference, likely }: Computed, solution: Solved): string {
   const how = solution.method === 'linear' ? 'small movement' : 'large movement';
   const against =
     formula === null
@@ -87,7 +96,7 @@ function strainReason({ formula, difference, likely }: Computed, solution: Solve
   const layers = solution.layers
     ? ` Judged where the layers are worst, at ${formatQuantity(degrees(solution.layers.angle), 'deg')} to their normal.`
     : '';
-  return `Computed on the outline (${how}); ${against}.${layers}`;
+  return `Computed on the outline (${kind}, ${how}); ${against}.${layers}`;
 }
 
 function strainFigure(figure: Figure, computed: Computed, solution: Solved): Figure {

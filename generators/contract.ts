@@ -91,10 +91,15 @@ export interface Motion {
 export interface BendingPlane {
   readonly model: BendingModel;
   readonly body: string;
-  /** takes x and y of the plane, and z out of it, to the coordinates of the body as built */
-  readonly placement: Placement;
+  /**
+   * Each takes x and y of the plane, and z out of it, to the coordinates of the body as built; several where the
+   * shape stands side by side in one body, at different x.
+   */
+  readonly placements: readonly [Placement, ...Placement[]];
   /** figure of the report that the solved peak strain stands for */
   readonly strainFigure: string;
+  /** what that figure counts: the largest tension, or the larger of tension and compression */
+  readonly counts: 'tension' | 'either';
   /** figures in proportion to the solved force, the force itself first; empty where none is */
   readonly forceFigures: readonly string[];
   /** secant modulus in MPa at the working strain; null where the plastic's is not known */

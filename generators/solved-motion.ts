@@ -1,42 +1,61 @@
+import type { Mesh } from '@/lib/fea/mesh/mesh';
 import { type Moment, type Moved, momentAt, readMoment } from '@/lib/fea/preview/between';
 import { type Anchors, locate } from '@/lib/fea/preview/locate';
 import type { Solved } from '@/lib/fea/solve/solution';
 import type { Placement } from '@/lib/geometry/kernel';
 import type { BendingPlane, Motion, Posed } from './contract';
 
-/** Coordinates of the body's points in the plane: xy each, folded to x >= 0 where the part is its own mirror image. */
-function intoPlane(at: Placement, rest: Float32Array, mirrored: boolean): Float32Array {
-  const points = new Float32Array((2 * rest.length) / 3);
-  for (let i = 0; i < rest.length / 3; i++) {
-    const [dx, dy, dz] = [0, 1, 2].map((k) => rest[3 * i + k]! - at[12 + k]!) as [number, number, number];
-    const x = at[0]! * dx + at[1]! * dy + at[2]! * dz;
-    points[2 * i] = mirrored ? Math.abs(x) : x;
-    points[2 * i + 1] = at[4]! * dx + at[5]! * dy + at[6]! * dz;
+type Axis = 0 | 1;
+
+/** Coordinate of a point of the body along an axis of the plane. */
+function along(at: Placement, axis: Axis, rest: Float32Array, i: number): number {
+  let sum = 0;
+  for (let k = 0; k < 3; k++) sum += at[4 * axis + k]! * (rest[3 * i + k]! - at[12 + k]!);
+  return sum;
+}
+
+/** Where the body's points are in the plane, and which way its x points for each of them. */
+interface Seen {
+  readonly anchors: Anchors;
+  /** -1 on the far side of a mirrored part */
+  readonly sides: Int8Array;
+}
+
+/** The placement whose plane has the point nearest to its middle. */
+function nearest(placements: readonly Placement[], rest: Float32Array, i: number): Placement {
+  return placements.reduce((best, at) =>
+    Math.abs(along(at, 0, rest, i)) < Math.abs(along(best, 0, rest, i)) ? at : best,
+  );
+}
+
+function look({ placements, model }: BendingPlane, mesh: Mesh, rest: Float32Array): Seen {
+  const count = rest.length / 3;
+  const points = new Float32Array(2 * count);
+  const sides = new Int8Array(count).fill(1);
+  for (let i = 0; i < count; i++) {
+    const at = nearest(placements, rest, i);
+    const x = along(at, 0, rest, i);
+    if (model.mirrored && x < 0) sides[i] = -1;
+    points[2 * i] = sides[i]! * x;
+    points[2 * i + 1] = along(at, 1, rest, i);
   }
-  return points;
+  return { anchors: locate(mesh, points), sides };
 }
 
-/** -1 for points on the far side of a mirrored part. */
-function sideOf(at: Placement, rest: Float32Array, i: number): 1 | -1 {
-  const x = [0, 1, 2].reduce((sum, k) => sum + at[k]! * (rest[3 * i + k]! - at[12 + k]!), 0);
-  return x < 0 ? -1 : 1;
-}
-
+/** Placements of one plane differ by shifts only, so the first gives the directions. */
 function poseBody(
-  plane: BendingPlane,
-  solution: Solved,
+  { placements: [at] }: BendingPlane,
+  { mesh }: Solved,
   moment: Moment,
-  anchors: Anchors,
+  { anchors, sides }: Seen,
   rest: Float32Array,
   out: Posed,
 ): void {
-  const at = plane.placement;
   const moved: Moved = { x: 0, y: 0, strain: 0 };
-  for (let i = 0; i < rest.length / 3; i++) {
-    readMoment(solution.mesh, moment, anchors, i, moved);
-    const x = plane.model.mirrored ? sideOf(at, rest, i) * moved.x : moved.x;
+  for (let i = 0; i < sides.length; i++) {
+    readMoment(mesh, moment, anchors, i, moved);
     for (let k = 0; k < 3; k++) {
-      out.positions[3 * i + k] = rest[3 * i + k]! + at[k]! * x + at[4 + k]! * moved.y;
+      out.positions[3 * i + k] = rest[3 * i + k]! + at[k]! * sides[i]! * moved.x + at[4 + k]! * moved.y;
     }
     out.strain[i] = moved.strain;
   }
@@ -47,19 +66,18 @@ function poseBody(
  * finite elements, other bodies move as the family says. Points are found in the mesh once for each set of points.
  */
 export function solvedMotion(family: Motion, plane: BendingPlane, solution: Solved): Motion {
-  const known = new WeakMap<Float32Array, Anchors>();
-  const anchorsOf = (rest: Float32Array): Anchors => {
-    const anchors =
-      known.get(rest) ?? locate(solution.mesh, intoPlane(plane.placement, rest, plane.model.mirrored));
-    known.set(rest, anchors);
-    return anchors;
+  const known = new WeakMap<Float32Array, Seen>();
+  const seen = (rest: Float32Array): Seen => {
+    const found = known.get(rest) ?? look(plane, solution.mesh, rest);
+    known.set(rest, found);
+    return found;
   };
   return {
     ...family,
     peakStrain: Math.max(solution.tension.strain, -solution.compression.strain),
     pose(body, rest, t, out) {
       if (body !== plane.body) family.pose(body, rest, t, out);
-      else poseBody(plane, solution, momentAt(solution, t), anchorsOf(rest), rest, out);
+      else poseBody(plane, solution, momentAt(solution, t), seen(rest), rest, out);
     },
   };
 }

@@ -90,8 +90,9 @@ export function bending(v: HookValues, material: Material, use: Use): Bending {
   return {
     model: planeModel(v, poisson),
     body: 'hook',
-    placement: placement(v),
+    placements: [placement(v)],
     strainFigure: 'peak-strain',
+    counts: 'tension',
     forceFigures: ['deflection-force', 'mating-force', 'mating-force-tilted', 'separation-force'],
     modulus: secantModulus(material, nominal)?.value ?? null,
     layerNormal: layerNormal(use),

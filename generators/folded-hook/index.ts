@@ -1,5 +1,6 @@
 import type { Family } from '../contract';
 import { about } from './about';
+import { bending } from './bending';
 import { callouts, stances } from './callouts';
 import { check } from './checks';
 import { build, volumes } from './geometry';
@@ -15,6 +16,7 @@ const family: Family<Values> = {
   build,
   volumes,
   motion,
+  bending,
   callouts,
   stances,
 };

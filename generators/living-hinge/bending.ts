@@ -41,8 +41,9 @@ export function bending(p: Values, material: Material, use: Use): Bending {
   return {
     model: planeModel(p),
     body: 'hinge',
-    placement: PLACEMENT,
+    placements: [PLACEMENT],
     strainFigure: 'peak-strain',
+    counts: 'tension',
     // the moment is capped where the web yields through, so it stays with the closed form
     forceFigures: [],
     modulus: secantModulus(material, nominal)?.value ?? null,

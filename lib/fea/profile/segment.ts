@@ -57,6 +57,21 @@ export function arc(
   };
 }
 
+/** The arc, shorter than a half circle, from one point through another to a third; a line where they are in line. */
+export function arcThrough(from: Point, through: Point, to: Point, tag = '', size = Infinity): Segment {
+  const [ax, ay] = [through[0] - from[0], through[1] - from[1]];
+  const [bx, by] = [to[0] - from[0], to[1] - from[1]];
+  const cross = 2 * (ax * by - ay * bx);
+  if (Math.abs(cross) < 1e-9 * (bx * bx + by * by)) return line(from, to, tag, size);
+  const [aa, bb] = [ax * ax + ay * ay, bx * bx + by * by];
+  const [cx, cy] = [(by * aa - ay * bb) / cross, (ax * bb - bx * aa) / cross];
+  const start = Math.atan2(-cy, -cx);
+  const turn = Math.atan2(by - cy, bx - cx) - start;
+  const sweep = Math.atan2(Math.sin(turn), Math.cos(turn));
+  const made = arc([from[0] + cx, from[1] + cy], Math.sqrt(cx * cx + cy * cy), start, sweep, tag, size);
+  return { ...made, x0: from[0], y0: from[1], x1: to[0], y1: to[1] };
+}
+
 export function segmentLength(s: Segment): number {
   if (s.kind === 'arc') return Math.abs(s.radius * s.sweep);
   return Math.sqrt((s.x1 - s.x0) ** 2 + (s.y1 - s.y0) ** 2);
