@@ -1,4 +1,5 @@
 import { radians } from '@/lib/units';
+import { filletFoot, type Side } from './fillet-arc';
 import type { HookValues } from './schema';
 
 /**
@@ -23,22 +24,41 @@ export const engagement = (v: HookValues): number => v.undercut - v.clearance;
 export const bearingHeight = (v: HookValues): number =>
   v.armLength - (v.returnAngle >= 90 ? 0 : engagement(v) / Math.tan(radians(v.returnAngle)));
 
-/** Faces of the window plate across the arm: from `bottom` to `top` along z. */
+/** Highest face of the window plate across the arm, and its lowest. */
 export const plateTop = (v: HookValues): number => bearingHeight(v) - v.clearance;
 export const plateBottom = (v: HookValues): number => plateTop(v) - v.baseThickness;
 
-/** Slope of the tapered back face against the straight one, rad. */
-export const taperAngle = (v: HookValues): number =>
-  Math.atan((v.rootThickness - v.tipThickness) / v.armLength);
+/** An arm in the plane of a panel as thick as its root, bending out of that plane. */
+export const inPanel = (v: HookValues): boolean => v.root === 'panel-slot' || v.root === 'panel-edge';
 
-/** Where the back fillet ends on the base, measured as positive distance from the straight face. */
-export const backFilletFoot = (v: HookValues): number => {
-  const atFillet = v.rootThickness - v.rootFillet * Math.tan(taperAngle(v));
-  return atFillet + v.rootFillet / Math.cos(taperAngle(v));
-};
+/** The sides of the arm: the straight face, the tapered back face, and half the width. */
+export const frontSide = (v: HookValues): Side => ({ root: 0, tip: 0, length: v.armLength });
+export const backSide = (v: HookValues): Side => ({
+  root: v.rootThickness,
+  tip: v.tipThickness,
+  length: v.armLength,
+});
+export const halfWidth = (v: HookValues): Side => ({
+  root: v.rootWidth / 2,
+  tip: v.tipWidth / 2,
+  length: v.armLength,
+});
 
-/** Width of the arm at height z; constant below the root and past the catch edge. */
-export const armWidth = (v: HookValues, z: number): number => {
-  const share = Math.min(Math.max(z / v.armLength, 0), 1);
-  return v.rootWidth + (v.tipWidth - v.rootWidth) * share;
-};
+/** Room the foot of a standing arm needs in the direction of bending, on both sides of its middle. */
+export const footLength = (v: HookValues): number =>
+  2 *
+  (Math.max(filletFoot(frontSide(v), v.rootFillet) + v.rootThickness, filletFoot(backSide(v), v.rootFillet)) -
+    v.rootThickness / 2);
+
+/** Room the foot of an arm in a panel needs across. */
+export const footWidth = (v: HookValues): number => 2 * filletFoot(halfWidth(v), v.rootFillet);
+
+/** Width of the slot that frees an arm inside a panel: room for the fillets and for the mate. */
+export const slotWidth = (v: HookValues): number => Math.max(1, 2 * v.clearance, 1.25 * v.rootFillet);
+
+const at = ({ root, tip, length }: Side, z: number) =>
+  root + (tip - root) * Math.min(Math.max(z / length, 0), 1);
+
+/** Thickness and width of the arm at height z without fillets; constant below the root and past the catch edge. */
+export const armThickness = (v: HookValues, z: number): number => at(backSide(v), z);
+export const armWidth = (v: HookValues, z: number): number => 2 * at(halfWidth(v), z);

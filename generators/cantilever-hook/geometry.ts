@@ -1,7 +1,9 @@
 import type { Kernel, NamedSolid, Placement, Solid } from '@/lib/geometry/kernel';
-import { backFilletFoot } from './dimensions';
+import { baseSolid, baseVolume, sunkDepth } from './base';
+import { backSide, footWidth, inPanel } from './dimensions';
+import { filletFoot } from './fillet-arc';
 import { armVolume, frontOutline, sideOutline } from './outline';
-import { plateVolume, windowPlate } from './receiver';
+import { receiver, receiverVolume } from './receiver';
 import type { HookValues } from './schema';
 
 /** Facets of a quarter-circle fillet. */
@@ -12,43 +14,26 @@ const sideUp = (width: number): Placement => [1, 0, 0, 0, 0, 0, 1, 0, 0, -1, 0, 
 /** A front view (y, z) extruded along +x from `x`. */
 const frontUp = (x: number): Placement => [0, 1, 0, 0, 0, 0, 1, 0, 1, 0, 0, 0, x, 0, 0, 1];
 
-interface Base {
-  readonly length: number;
-  readonly width: number;
-  readonly thickness: number;
-}
-
-const baseOf = (v: HookValues): Base =>
-  v.root === 'block'
-    ? { length: v.baseLength, width: v.baseWidth, thickness: v.baseThickness }
-    : { length: v.wallSpan, width: v.wallWidth, thickness: v.wallThickness };
-
-function arm(v: HookValues, kernel: Kernel, sunk: number): Solid {
-  const side = sideOutline(v, filletFacets(kernel.quality.segmentsPerTurn), sunk);
-  const swept = kernel.place(kernel.extrude(kernel.outlines.polygon(side), v.rootWidth), sideUp(v.rootWidth));
-  if (v.tipWidth === v.rootWidth) return swept;
-  const back = -backFilletFoot(v) - 1;
+function arm(v: HookValues, kernel: Kernel): Solid {
+  const { polygon } = kernel.outlines;
+  const facets = filletFacets(kernel.quality.segmentsPerTurn);
+  const sunk = sunkDepth(v);
+  const widest = inPanel(v) ? footWidth(v) + 1 : v.rootWidth;
+  const side = kernel.extrude(polygon(sideOutline(v, facets, sunk)), widest);
+  const swept = kernel.place(side, sideUp(widest));
+  if (!inPanel(v) && v.tipWidth === v.rootWidth) return swept;
+  const back = -filletFoot(backSide(v), v.rootFillet) - 1;
   const depth = v.rootFillet + v.undercut + 1 - back;
-  const front = kernel.extrude(kernel.outlines.polygon(frontOutline(v, sunk + 1)), depth);
+  const front = kernel.extrude(polygon(frontOutline(v, facets, sunk + 1)), depth);
   return kernel.intersect([swept, kernel.place(front, frontUp(back))]);
 }
 
-function hook(v: HookValues, kernel: Kernel): Solid {
-  const base = baseOf(v);
-  const body = kernel.box(
-    [base.length, base.width, base.thickness],
-    [-v.rootThickness / 2, 0, -base.thickness / 2],
-  );
-  return kernel.union([body, arm(v, kernel, Math.min(0.5, base.thickness / 2))]);
-}
-
 export function build(v: HookValues, kernel: Kernel): readonly NamedSolid[] {
-  const bodies = [{ name: 'hook', solid: hook(v, kernel) }];
-  return v.receiver ? [...bodies, { name: 'receiver', solid: windowPlate(v, kernel) }] : bodies;
+  const hook = { name: 'hook', solid: kernel.union([baseSolid(v, kernel), arm(v, kernel)]) };
+  return v.receiver ? [hook, { name: 'receiver', solid: receiver(v, kernel) }] : [hook];
 }
 
 export function volumes(v: HookValues, segmentsPerTurn: number): Readonly<Record<string, number>> {
-  const base = baseOf(v);
-  const hookVolume = base.length * base.width * base.thickness + armVolume(v, filletFacets(segmentsPerTurn));
-  return v.receiver ? { hook: hookVolume, receiver: plateVolume(v) } : { hook: hookVolume };
+  const hook = baseVolume(v) + armVolume(v, filletFacets(segmentsPerTurn));
+  return v.receiver ? { hook, receiver: receiverVolume(v) } : { hook };
 }

@@ -8,6 +8,7 @@ import {
   highestStrain,
   strainAt,
 } from '@/lib/mechanics/large-deflection';
+import { cornerConcentration, panelSprings } from '@/lib/mechanics/panel';
 import {
   blockSprings,
   heldWidthStiffening,
@@ -17,6 +18,7 @@ import {
   wallSprings,
 } from '@/lib/mechanics/root';
 import { wallStrain } from '@/lib/mechanics/thin-wall';
+import { inPanel, slotWidth } from './dimensions';
 import type { HookValues } from './schema';
 
 export const armOf = (v: HookValues): Arm => ({
@@ -27,19 +29,29 @@ export const armOf = (v: HookValues): Arm => ({
   tipWidth: v.tipWidth,
 });
 
-const sectionOf = (v: HookValues): RootSection => rootSection(armOf(v), v.rootFillet);
+/** The fillet that thickens the arm; in a panel it lies in the plane and widens the foot instead. */
+const thickeningFillet = (v: HookValues): number => (inPanel(v) ? 0 : v.rootFillet);
+
+const sectionOf = (v: HookValues): RootSection => ({
+  ...rootSection(armOf(v), thickeningFillet(v)),
+  fillet: v.rootFillet,
+});
 
 const wallOf = (v: HookValues) => ({ thickness: v.wallThickness, span: v.wallSpan, width: v.wallWidth });
 
 function springsOf(v: HookValues): readonly RootSpring[] {
   if (v.root === 'wall') return wallSprings(wallOf(v), sectionOf(v));
+  if (inPanel(v)) {
+    const slot = v.root === 'panel-slot' ? slotWidth(v) : null;
+    return panelSprings({ span: v.wallSpan, depth: v.wallWidth, slot }, sectionOf(v));
+  }
   return blockSprings(v.baseWidth, sectionOf(v));
 }
 
 /** The arm on what it stands on, for a Poisson's ratio. */
 export const flexibleArm = (v: HookValues, poisson: number): FlexibleArm => ({
   arm: armOf(v),
-  fillet: v.rootFillet,
+  fillet: thickeningFillet(v),
   springs: springsOf(v),
   poisson,
   stiffening: heldWidthStiffening(v.rootWidth, v.armLength),
@@ -59,10 +71,16 @@ export interface HookStrain {
   readonly wall: number | null;
 }
 
+/** Peak over nominal strain where the fillet ends. */
+function concentration(v: HookValues, flexible: FlexibleArm): number {
+  if (!inPanel(v)) return filletConcentration(v.rootFillet / v.rootThickness);
+  return flexible.stiffening * cornerConcentration(v.rootFillet, v.rootWidth, v.root === 'panel-slot');
+}
+
 export function strainOf(v: HookValues, flexible: FlexibleArm, deflection: number): HookStrain {
   const bent = bendArm(flexible, deflection);
   const nominal = strainAt(flexible, bent, v.rootFillet);
-  const atFillet = filletConcentration(v.rootFillet / v.rootThickness) * nominal;
+  const atFillet = concentration(v, flexible) * nominal;
   const alongArm = highestStrain(flexible, bent, v.rootFillet);
   const wall =
     v.root === 'wall' ? wallStrain(wallOf(v), sectionOf(v), v.armLength, bent.forcePerModulus) : null;

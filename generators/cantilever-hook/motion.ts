@@ -2,9 +2,9 @@ import type { Material } from '@/lib/materials/types';
 import type { FlexibleArm } from '@/lib/mechanics/large-deflection';
 import { radians } from '@/lib/units';
 import type { Motion, Posed } from '../contract';
-import { engagement } from './dimensions';
+import { engagement, noseEnd, slotWidth } from './dimensions';
 import { flexibleArm, type HookStrain, peakOf, strainOf } from './mechanics';
-import { moveArmPoint } from './pose-arm';
+import { moveArmPoint, type Point } from './pose-arm';
 import { moveBasePoint } from './pose-base';
 import type { HookValues } from './schema';
 
@@ -14,6 +14,13 @@ function plateLift(v: HookValues, deflection: number): number {
   return Math.min(engagement(v), deflection) / Math.tan(radians(v.returnAngle));
 }
 
+/** Past the root the arm; in a slotted panel only what stands inside the slot. */
+const onArm = (v: HookValues, y: number, z: number): boolean =>
+  z > 0 && (v.root !== 'panel-slot' || (Math.abs(y) < armReach(v) && z < noseEnd(v) + slotWidth(v) / 2));
+
+/** Between the arm's foot and the far side of the slot. */
+const armReach = (v: HookValues): number => v.rootWidth / 2 + slotWidth(v) - 1e-4;
+
 function poseHook(
   v: HookValues,
   flexible: FlexibleArm,
@@ -22,10 +29,11 @@ function poseHook(
   out: Posed,
 ): void {
   for (let i = 0; i < rest.length; i += 3) {
-    const [x, y, z] = [rest[i]!, rest[i + 1]!, rest[i + 2]!];
-    const moved = z > 0 ? moveArmPoint(v, flexible, state, x, z) : moveBasePoint(v, state, x, y, z);
+    const point: Point = [rest[i]!, rest[i + 1]!, rest[i + 2]!];
+    const move = onArm(v, point[1], point[2]) ? moveArmPoint : moveBasePoint;
+    const moved = move(v, flexible, state, point);
     out.positions[i] = moved.x;
-    out.positions[i + 1] = y;
+    out.positions[i + 1] = point[1];
     out.positions[i + 2] = moved.z;
     out.strain[i / 3] = moved.strain;
   }

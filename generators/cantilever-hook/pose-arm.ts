@@ -1,5 +1,6 @@
-import { type Arm, thicknessAt } from '@/lib/mechanics/beam';
+import { thicknessAt } from '@/lib/mechanics/beam';
 import { type FlexibleArm, stationValue, strainAt } from '@/lib/mechanics/large-deflection';
+import { armWidth, inPanel } from './dimensions';
 import type { HookStrain } from './mechanics';
 import type { HookValues } from './schema';
 
@@ -10,27 +11,31 @@ export interface Moved {
   readonly strain: number;
 }
 
+export type Point = readonly [x: number, y: number, z: number];
+
 const clamp = (value: number, low: number, high: number) => Math.min(Math.max(value, low), high);
 
-/** Half the depth of the side view at height z, the fillets included. */
-function halfDepth(v: HookValues, arm: Arm, z: number): number {
-  const r = v.rootFillet;
-  const below = clamp(r - z, 0, r);
-  return thicknessAt(arm, clamp(z, 0, arm.length)) / 2 + r - Math.sqrt(r * r - below * below);
+/** Half the depth of the side view at height z, the fillets of a standing arm included. */
+function halfDepth(v: HookValues, { arm }: FlexibleArm, z: number): number {
+  const half = thicknessAt(arm, clamp(z, 0, arm.length)) / 2;
+  if (inPanel(v)) return half;
+  const below = clamp(v.rootFillet - z, 0, v.rootFillet);
+  return half + v.rootFillet - Math.sqrt(v.rootFillet ** 2 - below ** 2);
 }
 
-/** Strain of the face in tension at height z: nominal on the arm, raised at the fillet, fading to the base. */
-function faceStrain(
-  v: HookValues,
-  flexible: FlexibleArm,
-  { bent, nominal, fillet }: HookStrain,
-  z: number,
-): number {
-  const r = v.rootFillet;
+/** How much of the fillet's concentration a point sees: all at the fillet's end, across a panel only at the sides. */
+function concentrated(v: HookValues, y: number, z: number): number {
+  const near = Math.max(0, 1 - Math.abs(z - v.rootFillet) / v.rootFillet) ** 2;
+  return inPanel(v) ? near * Math.min(1, Math.abs(2 * y) / armWidth(v, z)) ** 4 : near;
+}
+
+/** Strain of the face in tension: nominal on the arm, raised at the fillet; a standing arm's fades into its base. */
+function faceStrain(v: HookValues, flexible: FlexibleArm, state: HookStrain, y: number, z: number): number {
+  const { bent, nominal, fillet } = state;
+  const from = inPanel(v) ? 0 : v.rootFillet;
   const raised = nominal > 0 ? fillet / nominal - 1 : 0;
-  const near = Math.max(0, 1 - Math.abs(z - r) / r);
-  const strain = strainAt(flexible, bent, clamp(z, r, v.armLength)) * (1 + raised * near * near);
-  return z < r ? strain * Math.max(0, z / r) : strain;
+  const strain = strainAt(flexible, bent, clamp(z, from, v.armLength)) * (1 + raised * concentrated(v, y, z));
+  return z < from ? strain * Math.max(0, z / from) : strain;
 }
 
 /**
@@ -41,23 +46,22 @@ export function moveArmPoint(
   v: HookValues,
   flexible: FlexibleArm,
   state: HookStrain,
-  x: number,
-  z: number,
+  [x, y, z]: Point,
 ): Moved {
   const { arm } = flexible;
-  const s = clamp(z, 0, arm.length);
   const { bent } = state;
+  const s = clamp(z, 0, arm.length);
   const turned = stationValue(bent, bent.angle, s);
   const sine = Math.sin(turned);
   const cosine = Math.cos(turned);
   const middle = -thicknessAt(arm, s) / 2;
   const off = x - middle;
   const beyond = z - clamp(z, bent.along[0]!, arm.length);
-  const inSection = clamp(off / halfDepth(v, arm, z), -1, 1);
+  const inSection = clamp(off / halfDepth(v, flexible, z), -1, 1);
   const outside = x > 0 && z > arm.length / 2 ? Math.max(0, 1 - x / v.undercut) : 1;
   return {
     x: middle - stationValue(bent, bent.y, s) + off * cosine - beyond * sine,
     z: stationValue(bent, bent.x, s) + off * sine + beyond * cosine,
-    strain: faceStrain(v, flexible, state, z) * inSection * outside,
+    strain: faceStrain(v, flexible, state, y, z) * inSection * outside,
   };
 }

@@ -1,14 +1,25 @@
 import type { Relation } from '../parameters';
-import { backFilletFoot, catchFoot, engagement, leadInLength, plateBottom } from './dimensions';
+import {
+  catchFoot,
+  engagement,
+  footLength,
+  footWidth,
+  inPanel,
+  leadInLength,
+  plateBottom,
+  slotWidth,
+} from './dimensions';
 import type { HookValues } from './schema';
 
 const mm = (value: number) => `${Number(value.toFixed(2))} mm`;
 
-/** Room the arm's foot needs on its base, on both sides of its middle. */
-export const footprint = (v: HookValues): number =>
-  2 * Math.max(v.rootFillet + v.rootThickness / 2, backFilletFoot(v) - v.rootThickness / 2);
-
 const MARGIN = 0.2;
+
+/** Least span of a panel: the arm with its fillets, or with its slots, and a thickness of panel on each side. */
+const leastPanel = (v: HookValues): number => {
+  const freed = v.root === 'panel-slot' ? v.rootWidth + 2 * slotWidth(v) : footWidth(v);
+  return Math.max(1.6 * v.rootWidth, freed + 2 * v.rootThickness);
+};
 
 const refusals: readonly Relation<HookValues>[] = [
   {
@@ -67,8 +78,8 @@ const refusals: readonly Relation<HookValues>[] = [
     id: 'block-carries-the-foot',
     field: 'baseLength',
     severity: 'refuse',
-    holds: (v) => v.root !== 'block' || v.baseLength >= footprint(v) + MARGIN,
-    message: (v) => `Base length must be at least ${mm(footprint(v) + MARGIN)}, the arm with its fillets`,
+    holds: (v) => v.root !== 'block' || v.baseLength >= footLength(v) + MARGIN,
+    message: (v) => `Base length must be at least ${mm(footLength(v) + MARGIN)}, the arm with its fillets`,
   },
   {
     id: 'block-carries-the-width',
@@ -81,9 +92,9 @@ const refusals: readonly Relation<HookValues>[] = [
     id: 'wall-carries-the-foot',
     field: 'wallSpan',
     severity: 'refuse',
-    holds: (v) => v.root !== 'wall' || v.wallSpan >= footprint(v) + v.rootThickness,
+    holds: (v) => v.root !== 'wall' || v.wallSpan >= footLength(v) + v.rootThickness,
     message: (v) =>
-      `Wall span must be at least ${mm(footprint(v) + v.rootThickness)}, the arm with its fillets and half a thickness on each side`,
+      `Wall span must be at least ${mm(footLength(v) + v.rootThickness)}, the arm with its fillets and half a thickness on each side`,
   },
   {
     id: 'wall-carries-the-width',
@@ -93,10 +104,24 @@ const refusals: readonly Relation<HookValues>[] = [
     message: (v) => `Wall width must be at least the root width, ${mm(v.rootWidth)}`,
   },
   {
+    id: 'panel-carries-the-arm',
+    field: 'wallSpan',
+    severity: 'refuse',
+    holds: (v) => !inPanel(v) || v.wallSpan >= leastPanel(v),
+    message: (v) => `Wall span must be at least ${mm(leastPanel(v))}, the arm and some panel on both sides`,
+  },
+  {
+    id: 'panel-deep-enough',
+    field: 'wallWidth',
+    severity: 'refuse',
+    holds: (v) => !inPanel(v) || v.wallWidth >= 0.3 * v.rootWidth,
+    message: (v) => `Panel depth must be at least 0.3 of the root width, ${mm(0.3 * v.rootWidth)}`,
+  },
+  {
     id: 'plate-fits-under-the-catch',
     field: 'baseThickness',
     severity: 'refuse',
-    holds: (v) => !v.receiver || plateBottom(v) >= v.rootFillet + v.clearance,
+    holds: (v) => !v.receiver || v.root === 'panel-slot' || plateBottom(v) >= v.rootFillet + v.clearance,
     message: (v) =>
       `Base thickness, which is also the window plate's, must be at most ${mm(Math.max(0, v.baseThickness + plateBottom(v) - v.rootFillet - v.clearance))} to fit between root and catch`,
   },

@@ -14,7 +14,7 @@ const fields = {
   rootThickness: length({
     label: 'Root thickness',
     group: 'arm',
-    help: 'Thickness in the direction of bending where the arm stands on its base.',
+    help: 'Thickness in the direction of bending at the root; a panel is as thick.',
     min: 0.8,
     max: 10,
     step: 0.1,
@@ -50,7 +50,7 @@ const fields = {
   rootFillet: length({
     label: 'Root fillet',
     group: 'arm',
-    help: 'Radius where the arm meets its base. About half the root thickness is worth having; more gains little.',
+    help: 'Radius where the arm meets its base; in a panel, at its two sides. About half the root thickness is worth having.',
     min: 0.2,
     max: 6,
     step: 0.1,
@@ -99,6 +99,16 @@ const fields = {
     options: [
       { value: 'block', label: 'Thick block', help: 'A body several arm thicknesses deep' },
       { value: 'wall', label: 'Wall plate', help: 'A plate held along two edges, the arm standing on it' },
+      {
+        value: 'panel-slot',
+        label: 'Slot in a panel',
+        help: 'Cut free inside a panel that is held all round',
+      },
+      {
+        value: 'panel-edge',
+        label: 'Edge of a panel',
+        help: 'Grown from the free edge of a panel held on three sides',
+      },
     ],
     default: 'block',
   }),
@@ -114,16 +124,16 @@ const fields = {
   wallSpan: length({
     label: 'Wall span',
     group: 'root',
-    help: 'Free span of the plate between the edges that hold it, in the direction of bending.',
+    help: 'Free span between the edges that hold the plate: in the direction of bending under a standing arm, across the arm in a panel.',
     min: 6,
     max: 200,
     step: 1,
     default: 30,
   }),
   wallWidth: length({
-    label: 'Wall width',
+    label: 'Wall width or panel depth',
     group: 'root',
-    help: 'Extent of the plate along the width of the arm.',
+    help: 'Extent of a wall along the width of the arm; of a panel, how far its held edge lies behind the root.',
     min: 4,
     max: 200,
     step: 1,

@@ -1,6 +1,7 @@
 import { guideStrain, guideUndercut } from '@/lib/mechanics/beam';
 import { formatQuantity } from '@/lib/units';
 import { type Figure, judgedFigure, plainFigure } from '../report';
+import { inPanel } from './dimensions';
 import {
   armOf,
   deflectionRatio,
@@ -14,14 +15,23 @@ import {
 import { CORRECTED, GUIDE, PRACTICE } from './sources';
 import { inGuideRange, type Subject } from './subject';
 
-function peakReason({ values, strain, allowable, trouble }: Subject): string {
+/** Where the arm is strained most, in words. */
+function placeOf({ values, strain }: Subject): string {
+  if (strain.arm > strain.fillet) return 'On the thin part of the arm, away from its root.';
+  const ratio = (size: number) => Number((values.rootFillet / size).toFixed(2));
+  return inPanel(values)
+    ? `At the corners where the arm runs into the panel (radius ${ratio(values.rootWidth)} of the width), the panel giving way.`
+    : `At the end of the root fillet (radius ${ratio(values.rootThickness)} of the thickness), the root turning with the arm.`;
+}
+
+function peakReason(subject: Subject): string {
+  const { values, strain, allowable, trouble } = subject;
   if (trouble) return `Not known: ${trouble}; nothing here covers that.`;
   const limit = allowable.value === null ? allowable.because : '';
   if (strain.wall !== null && strain.wall > strain.arm) {
     return `The wall of ${values.wallThickness} mm bends harder than the arm: a thicker wall or a shorter span helps. ${limit}`.trim();
   }
-  const ratio = Number((values.rootFillet / values.rootThickness).toFixed(2));
-  return `At the end of the root fillet (radius ${ratio} of the thickness), the root turning with the arm. ${limit}`.trim();
+  return `${placeOf(subject)} ${limit}`.trim();
 }
 
 function peakFigure(subject: Subject): Figure {

@@ -193,7 +193,16 @@ const fields = {
 
 export type Values = ValuesOf<typeof fields>;
 
-export const jointOf = (p: Values): ThreadJoint => threadJoint(p);
+const joints = new WeakMap<Values, ThreadJoint>();
+
+/** The joint of these values; relations, check and shape ask for it again and again, so it is kept with them. */
+export function jointOf(p: Values): ThreadJoint {
+  const known = joints.get(p);
+  if (known) return known;
+  const joint = threadJoint(p);
+  joints.set(p, joint);
+  return joint;
+}
 
 /** Inner diameter of the ring plug, mm; 0 where so little would be left open that it is made solid. */
 export function plugInner(p: Values): number {
@@ -224,7 +233,8 @@ const plugRoom = (p: Values): number => p.neckHeight - jointOf(p).capMouth - 0.2
 
 const MIN_NECK_WALL = 1.2;
 const MIN_OVERLAP = 0.15;
-const MIN_CREST = 0.1;
+const MIN_CREST = 0.05;
+const MIN_GROOVE = 0.1;
 const MIN_TURNS = 0.5;
 
 /** Axial width of the cap ridge's crest, mm. */
@@ -234,10 +244,10 @@ function crestWidth(p: Values): number {
   return capRidgeWidth(thread, p.clearance, cap.minorDiameter / 2);
 }
 
-/** Width of the ridge at its root as a share of the pitch. */
-function rootShare(p: Values): number {
-  const { neckForm, thread } = jointOf(p);
-  return (neckForm.at(-1)![1] - neckForm[0]![1]) / thread.pitch;
+/** Axial width of a ridge of the neck at its root, mm. */
+function rootWidth(p: Values): number {
+  const { neckForm } = jointOf(p);
+  return neckForm.at(-1)![1] - neckForm[0]![1];
 }
 
 const mm = (value: number): string => `${(Math.ceil(value * 100 - 1e-6) / 100).toFixed(2)} mm`;
@@ -264,9 +274,9 @@ export const parameters = defineParameters({
       id: 'ridge-in-pitch',
       field: 'pitch',
       severity: 'refuse',
-      holds: (p) => rootShare(p) < 0.95,
+      holds: (p) => p.pitch >= rootWidth(p) + MIN_GROOVE - 1e-9,
       message: (p) =>
-        `Pitch must be larger than the thread root, which takes ${(rootShare(p) * 100).toFixed(0)} % of it at ${p.pitch} mm`,
+        `Pitch must be at least ${mm(rootWidth(p) + MIN_GROOVE)}, ${MIN_GROOVE} mm more than the root of the ridge, or its turns run together`,
     },
     {
       id: 'threads-overlap',

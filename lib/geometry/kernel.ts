@@ -49,7 +49,7 @@ export interface Outlines {
   /** round corners on growth; negative shrinks */
   offset(profile: Profile, delta: number): Profile;
   hull(profiles: readonly Profile[]): Profile;
-  /** strokes of a single-line font widened to `stroke`, baseline at y = 0, left at x = 0 */
+  /** single-line letters drawn with a round `stroke`; ink from x = 0, standing on y = 0, capitals `height` high */
   text(text: string, options: { height: number; stroke: number }): Profile;
 }
 

@@ -17,7 +17,8 @@ function slotOf(a: number, b: number, c: number, mask: number): number {
  * such a triangle removes an edge and its opposite together, so a closed mesh stays closed.
  */
 export function weld(positions: ArrayLike<number>, indices: ArrayLike<number>): TriMesh {
-  const points = Float32Array.from(positions, (value) => Math.fround(value) + 0);
+  const points = Float32Array.from(positions);
+  for (let at = 0; at < points.length; at += 1) points[at] = points[at]! + 0;
   const words = new Uint32Array(points.buffer);
   const count = points.length / 3;
   const mask = tableSize(count) - 1;
@@ -84,29 +85,29 @@ function edgeFaults(indices: Uint32Array): { open: number; overused: number } {
   return { open, overused };
 }
 
-type Corner = readonly [number, number, number];
-
-function corner(mesh: TriMesh, at: number): Corner {
-  const vertex = mesh.indices[at]! * 3;
-  return [mesh.positions[vertex]!, mesh.positions[vertex + 1]!, mesh.positions[vertex + 2]!];
+/** Twice the area of the triangle at `at`, mm2. */
+function doubleArea({ positions: p, indices }: TriMesh, at: number): number {
+  const [a, b, c] = [indices[at]! * 3, indices[at + 1]! * 3, indices[at + 2]! * 3];
+  const [ux, uy, uz] = [p[b]! - p[a]!, p[b + 1]! - p[a + 1]!, p[b + 2]! - p[a + 2]!];
+  const [vx, vy, vz] = [p[c]! - p[a]!, p[c + 1]! - p[a + 1]!, p[c + 2]! - p[a + 2]!];
+  const x = uy * vz - uz * vy;
+  const y = uz * vx - ux * vz;
+  const z = ux * vy - uy * vx;
+  return Math.sqrt(x * x + y * y + z * z);
 }
 
-const less = (a: Corner, b: Corner): Corner => [a[0] - b[0], a[1] - b[1], a[2] - b[2]];
-const cross = (a: Corner, b: Corner): Corner => [
-  a[1] * b[2] - a[2] * b[1],
-  a[2] * b[0] - a[0] * b[2],
-  a[0] * b[1] - a[1] * b[0],
-];
+function edgeSquared(p: Float32Array, a: number, b: number): number {
+  const [x, y, z] = [p[b]! - p[a]!, p[b + 1]! - p[a + 1]!, p[b + 2]! - p[a + 2]!];
+  return x * x + y * y + z * z;
+}
 
 function degenerateFacets(mesh: TriMesh): number {
+  const { positions: p, indices } = mesh;
   let count = 0;
-  for (let at = 0; at < mesh.indices.length; at += 3) {
-    const a = corner(mesh, at);
-    const b = corner(mesh, at + 1);
-    const c = corner(mesh, at + 2);
-    const longest = Math.max(Math.hypot(...less(b, a)), Math.hypot(...less(c, b)), Math.hypot(...less(a, c)));
-    const doubleArea = Math.hypot(...cross(less(b, a), less(c, a)));
-    if (!(doubleArea > longest * MIN_FACET_HEIGHT)) count += 1;
+  for (let at = 0; at < indices.length; at += 3) {
+    const [a, b, c] = [indices[at]! * 3, indices[at + 1]! * 3, indices[at + 2]! * 3];
+    const longest = Math.sqrt(Math.max(edgeSquared(p, a, b), edgeSquared(p, b, c), edgeSquared(p, c, a)));
+    if (!(doubleArea(mesh, at) > longest * MIN_FACET_HEIGHT)) count += 1;
   }
   return count;
 }
@@ -130,10 +131,7 @@ export function meshVolume(mesh: TriMesh): number {
 /** Surface area in mm2. */
 export function meshArea(mesh: TriMesh): number {
   let double = 0;
-  for (let at = 0; at < mesh.indices.length; at += 3) {
-    const a = corner(mesh, at);
-    double += Math.hypot(...cross(less(corner(mesh, at + 1), a), less(corner(mesh, at + 2), a)));
-  }
+  for (let at = 0; at < mesh.indices.length; at += 3) double += doubleArea(mesh, at);
   return double / 2;
 }
 

@@ -13,7 +13,9 @@ type Geom2 = ReturnType<typeof circle>;
 
 /** Below this half-width difference (mm) a rounded end is taken as a full half circle. */
 const FULL_ROUND = 1e-4;
-/** Cap height of the single-line font in its own units, and the characters it holds. */
+/** The single-line font counts its size without the ascent of its capitals: 14 of 21 units. */
+const SIZE_OF_CAPITALS = 14 / 21;
+/** The characters of that font. */
 const PRINTABLE = /^[ -~]+$/;
 
 function require(operation: string, holds: boolean, because: string): void {
@@ -57,9 +59,11 @@ function stroke(a: Vec2, b: Vec2, width: number, segments: number): Loop {
   return fromGeom('text', hull(ends[0]!, ends[1]!)).loops[0]!;
 }
 
+/** Strokes of all letters; the ink, not its middle line, starts at x = 0 and stands on y = 0. */
 function letterStrokes(text: string, height: number, width: number, segments: number): Loop[] {
-  const lines = vectorText({ height }, text) as Vec2[][];
-  const left = Math.min(...lines.flat().map(([x]) => x));
+  const size = (height - width) * SIZE_OF_CAPITALS + width;
+  const lines = vectorText({ height: size, extrudeOffset: width }, text) as Vec2[][];
+  const left = Math.min(...lines.flat().map(([x]) => x)) - width / 2;
   return lines.flatMap((line) =>
     line.slice(1).map((end, at) => {
       const start = line[at]!;
@@ -111,7 +115,7 @@ export function createOutlines(module: ManifoldModule, quality: Quality): Outlin
     text(text, { height, stroke: width }) {
       require('text', PRINTABLE.test(text) &&
         text.trim() !== '', 'only plain printable characters can be drawn');
-      require('text', positive(height) && positive(width), 'height and stroke must be positive');
+      require('text', positive(width) && height > width, 'the letters must be higher than their stroke');
       const segments = Math.max(8, segmentsPerTurn / 4);
       return profileOf('text', module.region(letterStrokes(text, height, width, segments)));
     },

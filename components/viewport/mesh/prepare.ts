@@ -10,10 +10,10 @@ export interface PreparedBody {
   readonly shading: Shading;
 }
 
-/** Off-chord error allowed in a bent part, as a share of its size: under half a pixel on a large screen. */
-const SAG_SHARE = 0.0006;
+/** Off-chord error allowed in a bent part, as a share of its size: about a pixel on a large screen. */
+const SAG_SHARE = 0.0012;
 /** Strain error allowed between vertices, as a share of the peak. */
-const STRAIN_SHARE = 0.03;
+const STRAIN_SHARE = 0.05;
 
 const sizeOf = ({ bounds: b }: BuiltBody): number => Math.hypot(b[3] - b[0], b[4] - b[1], b[5] - b[2]);
 

@@ -202,6 +202,31 @@ describe('screw cap: input', () => {
     ]);
   });
 
+  it('refuses a pitch that the root of the ridge fills', () => {
+    const rule = parameters.relations.find(({ id }) => id === 'ridge-in-pitch')!;
+    const fine = values({ profile: 'iso-metric', pitch: 0.5 });
+    expect(rule.severity).toBe('refuse');
+    expect(rule.holds(fine)).toBe(false);
+    expect(rule.message(fine)).toBe(
+      'Pitch must be at least 0.52 mm, 0.1 mm more than the root of the ridge, or its turns run together',
+    );
+    expect(rule.holds(values({ profile: 'iso-metric', pitch: 1 }))).toBe(true);
+  });
+
+  it('takes the coarse metric series from M6 on as it stands', () => {
+    for (const [majorDiameter, pitch] of [
+      [6, 1],
+      [8, 1.25],
+      [10, 1.5],
+      [16, 2],
+      [30, 3.5],
+    ]) {
+      expect(faults({ profile: 'iso-metric', majorDiameter, pitch, bore: 2 }), `M${majorDiameter}`).toEqual(
+        [],
+      );
+    }
+  });
+
   it('accepts the bounds it names', () => {
     expect(faults({ bore: 26.93, seal: 'none' })).toEqual([]);
     expect(faults({ capHeight: 16.7 })).toEqual([]);
