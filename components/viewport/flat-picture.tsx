@@ -44,7 +44,7 @@ interface FlatProps extends PictureProps {
 
 /** The part drawn on the processor, for browsers without WebGL. Same views, keys and dimensions. */
 export default function FlatPicture(props: FlatProps) {
-  const { moved, styles, palette, paint, scaleEnd, box, insets, onCommands, onFrame } = props;
+  const { moved, styles, palette, paint, scaleEnd, now: box, insets, onCommands, onFrame } = props;
   const svg = useRef<SVGSVGElement>(null);
   const size = useExtent(svg);
   const [stand, setStand] = useState(START);

@@ -32,7 +32,7 @@ export interface PictureProps {
   readonly bed: BedLook | null;
   /** creases of the part at rest, drawn faintly while it is bent */
   readonly ghost: readonly Moved[];
-  /** what the picture is fitted to: the part at both ends of its motion */
+  /** the part at both ends of its motion, which the picture makes room for when it moves */
   readonly box: Box;
   /** the part as it stands */
   readonly now: Box;

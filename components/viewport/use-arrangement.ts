@@ -4,7 +4,7 @@ import type { Stance } from '@/generators/contract';
 import { bedPlacements } from '@/generators/lay-on-bed';
 import type { BuiltBody } from '@/lib/geometry/kernel';
 import { arrange, type Moved } from './mesh/arrange';
-import { type Box, bedUnder, boxOf, joinBoxes } from './mesh/bounds';
+import { type Box, bedUnder, boxOf, diagonalOf, joinBoxes } from './mesh/bounds';
 import { type Peak, peakOf, prepare } from './mesh/prepare';
 import { REFINE_LIMITS } from './mesh/refine';
 import type { BedLook } from './scene-props';
@@ -26,6 +26,8 @@ export interface Arrangement {
   /** the part as it stands */
   readonly now: Box;
   readonly peak: Peak | null;
+  /** false where the part has moved so far that dimensions of the part at rest would only confuse */
+  readonly nearRest: boolean;
 }
 
 interface Wish {
@@ -46,6 +48,20 @@ function endsBox({ bodies, motion }: Build): Box {
   if (!motion) return joinBoxes(rest);
   const coarse = bodies.map((body) => prepare(body, null));
   return joinBoxes([...rest, movedBox(arrange(coarse, motion, 1))]);
+}
+
+/** Share of its size a part may move before it no longer lies by its dimensions. */
+const NEAR = 0.3;
+
+function staysNear(moved: readonly Moved[], rest: readonly Moved[], size: number): boolean {
+  return moved.every(({ positions: p }, body) => {
+    const from = rest[body]!.positions;
+    for (let k = 0; k < p.length; k += 3) {
+      const far = Math.hypot(p[k]! - from[k]!, p[k + 1]! - from[k + 1]!, p[k + 2]! - from[k + 2]!);
+      if (far > NEAR * size) return false;
+    }
+    return true;
+  });
 }
 
 /** The vertices only come near the peak the motion tells; close to it, its own figure is shown. */
@@ -84,9 +100,11 @@ export function useArrangement(build: Build | null, wish: Wish): Arrangement | n
   return useMemo(() => {
     if (!build || !moved || !rest) return null;
     const now = movedBox(moved);
+    const nearRest = moved === rest || staysNear(moved, rest, diagonalOf(movedBox(rest)));
     return {
       moved,
-      ghost: bends && ghosted ? rest : [],
+      nearRest,
+      ghost: bends && ghosted && nearRest ? rest : [],
       bed: placements && { placements, layerStep: layerStepFor(now.max[2] - now.min[2]) },
       box: ends ?? joinBoxes([now, bedUnder(now)]),
       now,

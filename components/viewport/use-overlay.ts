@@ -10,11 +10,15 @@ import type { BuildState } from './use-build';
 
 const EMPTY: OverlayContent = { dimensions: [], pin: null };
 
+/** On the place of largest strain that is nearest to the eye. */
 function pinOf(shown: Arrangement | null, project: Project): Pin | null {
   if (!shown?.peak) return null;
-  const { body, vertex, strain } = shown.peak;
-  const [x, y, z] = shown.moved[body]!.positions.subarray(3 * vertex, 3 * vertex + 3);
-  return { ...project([x!, y!, z!]), text: `${percent(strain)} ${pullWords(strain)}` };
+  const { body, vertices, strain } = shown.peak;
+  const { positions: p } = shown.moved[body]!;
+  const nearest = vertices
+    .map((vertex) => project([p[3 * vertex]!, p[3 * vertex + 1]!, p[3 * vertex + 2]!]))
+    .reduce((best, one) => (one.depth > best.depth ? one : best));
+  return { ...nearest, text: `${percent(strain)} ${pullWords(strain)}` };
 }
 
 type Wishes = Pick<ViewportProps, 'showDimensions' | 'onBed' | 'paint' | 'highlightField'>;
@@ -28,7 +32,7 @@ export function useOverlay(
 ) {
   const [overlay, setOverlay] = useState(EMPTY);
   const measured = useRef(0);
-  const callouts = showDimensions && !onBed ? build?.callouts : undefined;
+  const callouts = showDimensions && !onBed && shown?.nearRest ? build?.callouts : undefined;
   const pinned = paint === 'strain' && !onBed ? shown : null;
   const onFrame = useCallback(
     (project: Project, size: Extent) => {

@@ -1,5 +1,6 @@
 import type { Motion, Posed } from '@/generators/contract';
 import type { BuiltBody, TriMesh } from '@/lib/geometry/kernel';
+import { boxOf, diagonalOf } from './bounds';
 import { bentBy, posedLike, REFINE_LIMITS, type Refined, refine, unrefined } from './refine';
 import { type Shading, shadingOf } from './shading';
 
@@ -10,17 +11,23 @@ export interface PreparedBody {
   readonly shading: Shading;
 }
 
-/** Off-chord error allowed in a bent part, as a share of its size: about a pixel on a large screen. */
-const SAG_SHARE = 0.0012;
+/** Off-chord error allowed in a bent part, as a share of its size there: about a pixel on a large screen. */
+const SAG_SHARE = 0.0009;
 /** Strain error allowed between vertices, as a share of the peak. */
 const STRAIN_SHARE = 0.05;
 
-const sizeOf = ({ bounds: b }: BuiltBody): number => Math.hypot(b[3] - b[0], b[4] - b[1], b[5] - b[2]);
+/** The smaller of the sizes at both ends of the motion: a strap is looked at flat, and closed from nearer by. */
+function sizeOf({ name, mesh }: BuiltBody, motion: Motion): number {
+  const moved = posedLike(mesh.positions);
+  motion.pose(name, mesh.positions, 1, moved);
+  const sizes = [mesh.positions, moved.positions].map((points) => diagonalOf(boxOf([{ points }])));
+  return Math.min(...sizes);
+}
 
 function fineEnough(body: BuiltBody, motion: Motion | null, maxTriangles: number): Refined {
   if (!motion) return unrefined(body.mesh);
   const strainStep = Math.max(motion.peakStrain * STRAIN_SHARE, 1e-6);
-  const rule = bentBy(motion, body.name, sizeOf(body) * SAG_SHARE, strainStep);
+  const rule = bentBy(motion, body.name, sizeOf(body, motion) * SAG_SHARE, strainStep);
   return refine(body.mesh, rule, { ...REFINE_LIMITS, maxTriangles });
 }
 
@@ -45,19 +52,25 @@ export function posed(body: PreparedBody, motion: Motion | null, t: number): Pos
 export interface Peak {
   /** signed, as a fraction */
   readonly strain: number;
+  /** index of the body */
   readonly body: number;
-  readonly vertex: number;
+  /** its vertices strained as much, within a fiftieth */
+  readonly vertices: readonly number[];
 }
 
-/** The vertex of largest absolute strain over all bodies; null where nothing strains. */
-export function peakOf(moments: readonly Posed[]): Peak | null {
-  let peak: Peak | null = null;
-  moments.forEach(({ strain }, body) => {
-    for (let vertex = 0; vertex < strain.length; vertex += 1) {
-      if (Math.abs(strain[vertex]!) > Math.abs(peak?.strain ?? 1e-9)) {
-        peak = { strain: strain[vertex]!, body, vertex };
-      }
-    }
+const AS_MUCH = 0.98;
+
+/** The largest absolute strain over all bodies, and where it is; null where nothing strains. */
+export function peakOf(moments: readonly Pick<Posed, 'strain'>[]): Peak | null {
+  const largest = ({ strain }: Pick<Posed, 'strain'>) =>
+    strain.reduce((peak, one) => (Math.abs(one) > Math.abs(peak) ? one : peak), 0);
+  const peaks = moments.map(largest);
+  const body = peaks.reduce((best, one, k) => (Math.abs(one) > Math.abs(peaks[best]!) ? k : best), 0);
+  const peak = peaks[body] ?? 0;
+  if (Math.abs(peak) < 1e-9) return null;
+  const vertices: number[] = [];
+  moments[body]!.strain.forEach((one, vertex) => {
+    if (one / peak >= AS_MUCH) vertices.push(vertex);
   });
-  return peak;
+  return { strain: peak, body, vertices };
 }

@@ -1,6 +1,8 @@
 import type { Motion, Posed } from '@/generators/contract';
 import type { TriMesh } from '@/lib/geometry/kernel';
 import { type Edges, edgesOf } from './edges';
+import { type Coplanar, type FlatTriangles, relaxed } from './flips';
+import { faceNormals } from './shading';
 
 /** A mesh with split edges, and for each of its triangles the one it was cut from. */
 export interface Refined {
@@ -26,7 +28,10 @@ export interface RefineLimits {
   readonly maxRounds: number;
 }
 
-export const REFINE_LIMITS: RefineLimits = { maxTriangles: 16_000, maxRounds: 6 };
+export const REFINE_LIMITS: RefineLimits = { maxTriangles: 16_000, maxRounds: 10 };
+
+/** Cosine above which two faces count as one plane: a fortieth of a degree. */
+const FLAT = 1 - 1e-7;
 
 /** Pieces an edge is cut into in one round at most. */
 const MOST_PIECES = 8;
@@ -138,6 +143,10 @@ class Triangles {
     this.indices.push(a, b, c);
     this.parent.push(parent);
   }
+
+  packed(): FlatTriangles {
+    return { indices: Uint32Array.from(this.indices), parent: Uint32Array.from(this.parent) };
+  }
 }
 
 /** Fills the strip between two chains of points that run beside each other, seen from outside `left` on the left. */
@@ -197,6 +206,13 @@ interface Points {
   readonly positions: Float32Array;
 }
 
+function joinedWhole(first: Uint32Array, second: Uint32Array): Uint32Array {
+  const both = new Uint32Array(first.length + second.length);
+  both.set(first);
+  both.set(second, first.length);
+  return both;
+}
+
 /** New vertices, evenly along each edge from its first end to its second. */
 function pointsOn(p: Float32Array, { count, ends }: Edges, pieces: Uint8Array): Points {
   const first = new Uint32Array(count);
@@ -215,34 +231,62 @@ function pointsOn(p: Float32Array, { count, ends }: Edges, pieces: Uint8Array): 
   return { first, positions: joined(p, Float32Array.from(points)) };
 }
 
-interface Batch {
-  readonly indices: ArrayLike<number>;
-  readonly parent: ArrayLike<number>;
-}
-
 /**
  * Splits edges evenly, round by round, until the rule asks for no more or a limit is met. An edge is split for both
  * its triangles alike, so a closed mesh stays closed, without cracks; the surface at rest is the same. A triangle
  * none of whose edges is to be split is done and not looked at again.
  */
 export function refine(mesh: TriMesh, rule: SplitRule, limits: RefineLimits = REFINE_LIMITS): Refined {
+  const coplanar = coplanarIn(mesh);
   let { positions } = mesh;
-  let active: Batch = { indices: mesh.indices, parent: unrefined(mesh).parent };
+  let active: FlatTriangles = { indices: mesh.indices, parent: unrefined(mesh).parent };
   const done = new Triangles();
   for (let round = 0; round < limits.maxRounds; round += 1) {
-    const edges = edgesOf(Uint32Array.from(active.indices));
+    const edges = edgesOf(active.indices);
     const scores = rule({ positions, edges, middles: middlesOf(positions, edges) });
-    const pieces = piecesOf(scores, limits.maxTriangles - done.parent.length - active.parent.length);
+    const budget = limits.maxTriangles - done.parent.length - active.parent.length;
+    const pieces = piecesOf(ridgesFirst(scores, edges, active.parent, coplanar), budget);
     if (pieces.every((count) => count === 1)) break;
     const points = pointsOn(positions, edges, pieces);
-    active = divide(active, { edges, scores, pieces, first: points.first }, done);
     positions = points.positions;
+    active = relaxed(
+      positions,
+      divide(active, { edges, scores, pieces, first: points.first }, done).packed(),
+      coplanar,
+    );
   }
   if (positions === mesh.positions) return unrefined(mesh);
+  const { indices, parent } = done.packed();
   return {
-    mesh: { positions, indices: Uint32Array.from([...done.indices, ...Array.from(active.indices)]) },
-    parent: Uint32Array.from([...done.parent, ...Array.from(active.parent)]),
+    mesh: { positions, indices: joinedWhole(indices, active.indices) },
+    parent: joinedWhole(parent, active.parent),
   };
+}
+
+function coplanarIn(mesh: TriMesh): Coplanar {
+  const n = faceNormals(mesh);
+  return (one, other) =>
+    one === other ||
+    n[3 * one]! * n[3 * other]! + n[3 * one + 1]! * n[3 * other + 1]! + n[3 * one + 2]! * n[3 * other + 2]! >
+      FLAT;
+}
+
+/**
+ * While an edge between faces that are not in one plane is to be split, edges inside flat faces wait: once the rim
+ * of a face has its points, most of its long edges turn into short ones.
+ */
+function ridgesFirst(
+  scores: Float32Array,
+  { sides }: Edges,
+  parent: Uint32Array,
+  coplanar: Coplanar,
+): Float32Array {
+  const ridges = scores.map((score, edge) => {
+    const [one, other] = [sides[2 * edge]!, sides[2 * edge + 1]!];
+    const inside = other < 0 || coplanar(parent[Math.floor(one / 3)]!, parent[Math.floor(other / 3)]!);
+    return inside ? 0 : score;
+  });
+  return ridges.some((score) => score > 1) ? ridges : scores;
 }
 
 interface Plan {
@@ -253,7 +297,7 @@ interface Plan {
 }
 
 /** One round: cut triangles stay active, triangles whose edges all pass go to `done`. */
-function divide(active: Batch, plan: Plan, done: Triangles): Triangles {
+function divide(active: FlatTriangles, plan: Plan, done: Triangles): Triangles {
   const { ofSide } = plan.edges;
   const next = new Triangles();
   for (let corner = 0; corner < active.indices.length; corner += 3) {

@@ -1,7 +1,7 @@
 'use client';
 import { useThree } from '@react-three/fiber';
 import { useEffect, useLayoutEffect, useMemo } from 'react';
-import type { Plane } from 'three';
+import { DoubleSide, type Plane } from 'three';
 import { PAINT_INK } from '../drawing/ramp';
 import type { Moved } from '../mesh/arrange';
 import { bodyColour } from '../palette';
@@ -39,14 +39,25 @@ function Body({ moved, style, look, ramp }: BodyProps) {
         frustumCulled={false}
         renderOrder={seeThrough ? 4 : 1}
       />
-      {!seeThrough && (
+      {seeThrough ? (
+        <mesh geometry={model.faces} frustumCulled={false} renderOrder={3}>
+          <meshBasicMaterial
+            colorWrite={false}
+            side={DoubleSide}
+            clippingPlanes={look.planes}
+            polygonOffset
+            polygonOffsetFactor={1.5}
+            polygonOffsetUnits={2}
+          />
+        </mesh>
+      ) : (
         <mesh geometry={model.faces} material={outline} frustumCulled={false} renderOrder={1} />
       )}
       <lineSegments geometry={model.creases} frustumCulled={false} renderOrder={seeThrough ? 5 : 2}>
         <lineBasicMaterial
           color={seeThrough ? look.rim : look.line}
           transparent
-          opacity={seeThrough ? 0.45 : 0.85}
+          opacity={seeThrough ? 0.55 : 0.85}
           clippingPlanes={look.planes}
         />
       </lineSegments>

@@ -14,11 +14,14 @@ import {
   type ViewCommands,
   viewNamed,
 } from '../drawing/views';
-import { diagonalOf } from '../mesh/bounds';
+import { type Box, diagonalOf, joinBoxes } from '../mesh/bounds';
 import type { PictureProps } from '../scene-props';
 
 const DEGREES = 180 / Math.PI;
 const CLOSEST = 400;
+/** Shares of the picture beyond which the part is fitted anew while it is changed or moved. */
+const TOO_LARGE = 0.98;
+const TOO_SMALL = 0.42;
 
 function directionOf(controls: Controls): Direction {
   return {
@@ -27,21 +30,21 @@ function directionOf(controls: Controls): Direction {
   };
 }
 
-type RigProps = Pick<PictureProps, 'box' | 'insets' | 'fitKey' | 'onCommands' | 'onFrame'>;
+type RigProps = Pick<PictureProps, 'box' | 'now' | 'insets' | 'fitKey' | 'onCommands' | 'onFrame'>;
 
 /** The eye: orbit, fit, standard views, and where points are on the screen. */
-export function Rig({ box, insets, fitKey, onCommands, onFrame }: RigProps) {
+export function Rig({ box, now, insets, fitKey, onCommands, onFrame }: RigProps) {
   const camera = useThree((state) => state.camera) as OrthographicCamera;
   const size = useThree((state) => state.size);
   const element = useThree((state) => state.gl.domElement);
   const invalidate = useThree((state) => state.invalidate);
   const controls = useRef<Controls>(null);
-  const current = useRef({ box, size, insets });
-  current.current = { box, size, insets };
+  const current = useRef({ now, size, insets });
+  current.current = { now, size, insets };
 
   const stand = useCallback(
     (direction: Direction, target: Vec3, scale: number) => {
-      const distance = 4 * diagonalOf(current.current.box) + 50;
+      const distance = 4 * diagonalOf(current.current.now) + 50;
       const { eye } = frameOf({ turn: direction.turn, rise: Math.max(-90, Math.min(90, direction.rise)) });
       controls.current!.target.set(...target);
       camera.position.set(...target).addScaledVector(new Vector3(...eye), distance);
@@ -55,8 +58,8 @@ export function Rig({ box, insets, fitKey, onCommands, onFrame }: RigProps) {
     [camera, invalidate],
   );
   const frameAll = useCallback(
-    (direction: Direction) => {
-      const { box, size, insets } = current.current;
+    (direction: Direction, box: Box = current.current.now) => {
+      const { size, insets } = current.current;
       const { target, scale } = fitBox(box, frameOf(direction), size, insets);
       stand(direction, target, scale);
     },
@@ -70,12 +73,23 @@ export function Rig({ box, insets, fitKey, onCommands, onFrame }: RigProps) {
     first.current = false;
   }, [frameAll, fitKey, size.width, size.height, insets]);
 
+  const filled = useCallback(
+    (direction: Direction) => {
+      const { now, size, insets } = current.current;
+      return (FILL * camera.zoom) / fitBox(now, frameOf(direction), size, insets).scale;
+    },
+    [camera],
+  );
+  // biome-ignore lint/correctness/useExhaustiveDependencies: looks again when the part has moved
   useLayoutEffect(() => {
     const direction = directionOf(controls.current!);
-    const { scale } = fitBox(box, frameOf(direction), current.current.size, current.current.insets);
-    const share = (FILL * camera.zoom) / scale;
-    if (share > 0.98 || share < 0.42) frameAll(direction);
-  }, [box, camera, frameAll]);
+    if (filled(direction) > TOO_LARGE) frameAll(direction, joinBoxes([box, now]));
+  }, [now, filled, frameAll]);
+  // biome-ignore lint/correctness/useExhaustiveDependencies: looks again when another part is shown
+  useLayoutEffect(() => {
+    const direction = directionOf(controls.current!);
+    if (filled(direction) < TOO_SMALL) frameAll(direction);
+  }, [box, filled, frameAll]);
 
   useEffect(() => {
     const target = () => controls.current!.target.toArray() as unknown as Vec3;

@@ -34,6 +34,7 @@ export default function Scene(props: SceneProps) {
       <Contents {...props} />
       <Rig
         box={props.box}
+        now={props.now}
         insets={props.insets}
         fitKey={props.fitKey}
         onCommands={props.onCommands}

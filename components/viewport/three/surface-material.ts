@@ -1,9 +1,11 @@
 import {
   Color,
   DataTexture,
+  DoubleSide,
   LinearFilter,
   MeshStandardMaterial,
   type Plane,
+  ShaderChunk,
   SRGBColorSpace,
   type Texture,
 } from 'three';
@@ -93,11 +95,18 @@ if (uLayerStep > 0.0) {
 vec3 ownLight = diffuseColor.rgb * uFlat;
 diffuseColor.rgb *= 1.0 - uFlat;`;
 
+/**
+ * The normals given hold for both sides of a triangle: slivers that bending turned over belong to the side that is
+ * seen, and left out they would be cracks.
+ */
+const GIVEN_NORMALS = ShaderChunk.normal_fragment_begin.replace('gl_FrontFacing ? 1.0 : - 1.0', '1.0');
+
 /** A matt plastic that can be painted by strain, hatched where squeezed or beyond the allowable, and lined by layers. */
 export function surfaceMaterial(ramp: Texture): SurfaceMaterial {
   const material = new MeshStandardMaterial({
     roughness: 0.62,
     metalness: 0,
+    side: DoubleSide,
     polygonOffset: true,
     polygonOffsetFactor: 1,
     polygonOffsetUnits: 1,
@@ -119,6 +128,7 @@ export function surfaceMaterial(ramp: Texture): SurfaceMaterial {
       .replace('#include <begin_vertex>', `#include <begin_vertex>${VERTEX_BODY}`);
     shader.fragmentShader = shader.fragmentShader
       .replace('#include <common>', `#include <common>${FRAGMENT_HEAD}`)
+      .replace('#include <normal_fragment_begin>', GIVEN_NORMALS)
       .replace('#include <color_fragment>', `#include <color_fragment>${FRAGMENT_COLOUR}`)
       .replace(
         '#include <emissivemap_fragment>',

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import { relaxed } from '@/components/viewport/mesh/flips';
 import { bentBy, longerThan, refine, unrefined } from '@/components/viewport/mesh/refine';
 import { faceNormals, shadingOf, writeDrawn } from '@/components/viewport/mesh/shading';
 import { flatten, signedArea, slice } from '@/components/viewport/mesh/slice';
@@ -25,6 +26,12 @@ const rolled = (r: number): Motion => ({
     }
   },
 });
+
+const totalLength = ({ positions: p, indices }: TriMesh) =>
+  Array.from(indices, (a, side) => {
+    const b = indices[side % 3 === 2 ? side - 2 : side + 1]!;
+    return Math.hypot(...[0, 1, 2].map((k) => p[3 * a + k]! - p[3 * b + k]!));
+  }).reduce((sum, one) => sum + one, 0);
 
 const longestEdge = ({ positions: p, indices }: ReturnType<typeof boxMesh>) =>
   Math.max(
@@ -87,6 +94,59 @@ describe('splitting long edges', () => {
 });
 
 const shaded = (mesh: TriMesh) => shadingOf(unrefined(mesh), mesh);
+
+/** A plate whose top and back are fans from one corner to points along the rim. */
+function fannedPlate(length: number, width: number, points: number): TriMesh {
+  const { positions } = boxMesh(length, width, 1);
+  const plate = boxMesh(length, width, 1);
+  const middle = Array.from({ length: points }, (_, k) => [
+    ((k + 1) * length) / (points + 1),
+    width,
+    1,
+  ]).flat();
+  const [low, high] = [4, 5];
+  const rim = [6, ...Array.from({ length: points }, (_, k) => 8 + k), 7];
+  const top = rim.slice(1).flatMap((vertex, k) => [low, vertex, rim[k]!]);
+  const back = rim.slice(1).flatMap((vertex, k) => [2, rim[k]!, vertex]);
+  const kept = [...plate.indices].slice(0, 6);
+  const rest = [...plate.indices].slice(12, 18).concat([...plate.indices].slice(24));
+  const indices = [...kept, ...top, low, high, 7, ...back, 2, 7, 3, ...rest];
+  return { positions: new Float32Array([...positions, ...middle]), indices: Uint32Array.from(indices) };
+}
+
+describe('turning edges inside flat faces', () => {
+  const plate = fannedPlate(60, 4, 9);
+  const triangles = { indices: plate.indices, parent: unrefined(plate).parent };
+  const inOnePlane = (one: number, other: number) => {
+    const n = faceNormals(plate);
+    return [0, 1, 2].reduce((sum, k) => sum + n[3 * one + k]! * n[3 * other + k]!, 0) > 1 - 1e-6;
+  };
+
+  it('starts here from a closed plate with a long fan across it', () => {
+    expect(openSides(plate)).toBe(0);
+    expect(volumeOf(plate)).toBeCloseTo(240, 3);
+  });
+
+  it('keeps the plate closed and its volume, and shortens the fan', () => {
+    const { indices } = relaxed(plate.positions, triangles, inOnePlane);
+    const turned = { positions: plate.positions, indices };
+    expect(openSides(turned)).toBe(0);
+    expect(volumeOf(turned)).toBeCloseTo(240, 3);
+    expect(totalLength(turned)).toBeLessThan(totalLength(plate) - 1);
+  });
+
+  it('leaves edges between faces that are not in one plane', () => {
+    const { indices } = relaxed(plate.positions, triangles, () => false);
+    expect([...indices]).toEqual([...plate.indices]);
+  });
+
+  it('makes a long thin plate fine with few triangles', () => {
+    const { mesh } = refine(plate, longerThan(3));
+    expect(openSides(mesh)).toBe(0);
+    expect(volumeOf(mesh)).toBeCloseTo(240, 3);
+    expect(mesh.indices.length / 3).toBeLessThan(700);
+  });
+});
 
 describe('shading', () => {
   it('gives a box its 24 corners of flat faces and 12 creases', () => {
