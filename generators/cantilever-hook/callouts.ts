@@ -50,5 +50,6 @@ export function callouts(v: HookValues): readonly Callout[] {
     value: v.rootFillet,
     unit: 'mm',
   };
-  return [...lines.map((line) => lengthOf(v, line)), fillet];
+  const lengths = lines.map((line) => lengthOf(v, line));
+  return v.rootFillet > 0 ? [...lengths, fillet] : lengths;
 }

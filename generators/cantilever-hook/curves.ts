@@ -72,7 +72,7 @@ function strainCurve(undercut: number, steps: readonly Step[]): Curve {
 }
 
 export function curvesOf(subject: Subject): readonly Curve[] {
-  const { values: v, material, trouble } = subject;
+  const { values: v, material, trouble, strainTrouble } = subject;
   if (trouble) return [];
   const steps = stepsOf(subject);
   const push: Face = {
@@ -92,6 +92,6 @@ export function curvesOf(subject: Subject): readonly Curve[] {
   return [
     ...forceCurve(push, steps, material.friction),
     ...forceCurve(pull, steps, material.friction),
-    strainCurve(v.undercut, steps),
+    ...(strainTrouble ? [] : [strainCurve(v.undercut, steps)]),
   ];
 }

@@ -15,8 +15,9 @@ export function filletFoot(side: Side, radius: number): number {
   return side.root - radius * Math.tan(lean) + radius / Math.cos(lean);
 }
 
-/** The fillet between the side and the base at height 0, as points [out, up] from the arm down to the base. */
+/** The fillet between the side and the base at height 0, as points [out, up] from the arm down to the base; one point where it is sharp. */
 export function filletArc(side: Side, radius: number, facets: number): readonly Vec2[] {
+  if (radius === 0) return [[side.root, 0]];
   const lean = leanOf(side);
   const centre = filletFoot(side, radius);
   return Array.from({ length: facets + 1 }, (_, i) => {

@@ -38,11 +38,20 @@ const guide: Guide = {
       source: GUIDE,
     },
     {
-      name: 'Corrected strain and force',
-      formula: 'E b y / P = 4 λ³ + 2.4 (1 + nu) λ + phi (λ + beta)²,  peak = Kt · 6 P (l - R) / (E b h²)',
+      name: 'Corrected force',
+      formula: 'E b y / P = 4 λ³ + 2.4 (1 + nu) λ + phi (λ + beta)²',
       symbols:
-        'λ = (l - 0.67 R)/h, R root fillet, phi and beta of what the arm stands on, Kt = 1 + 0.173 (R/h)^-0.766; written for an even arm, integrated for tapers and for the lever that shortens as the arm turns',
-      validity: 'l/h from 2, y up to l/2, R/h from 0.1 to 1; elastic plastic, no layers',
+        'λ = (l - 0.65 R)/h with R the root fillet; phi and beta say how far the base turns; written for an even arm, integrated along tapers and with the lever that shortens as the arm turns',
+      validity:
+        'l/h from 2, y up to l/2; elastic plastic, no layers; within 5 % of finite elements, exceptions in the README of the family',
+      source: CORRECTED,
+    },
+    {
+      name: 'Corrected peak strain',
+      formula: 'eps = Kt · 6 P (l - R) / (E b h²), Kt = 1 + 0.173 (R/h)^-0.766',
+      symbols:
+        'taken where the fillet ends; a thin wall under the arm or a thin tip is checked too and the largest counts',
+      validity: 'R/h from 0.1 to 1',
       source: CORRECTED,
     },
   ],

@@ -1,5 +1,5 @@
 import { type Arm, guideStrain } from '@/lib/mechanics/beam';
-import { filletConcentration } from '@/lib/mechanics/fillet';
+import { filletConcentration, narrowingAtFillet } from '@/lib/mechanics/fillet';
 import {
   type BentArm,
   bendArm,
@@ -11,11 +11,12 @@ import {
 import { cornerConcentration, panelSprings } from '@/lib/mechanics/panel';
 import {
   blockSprings,
-  heldWidthStiffening,
+  narrowingSlope,
   type RootSection,
   type RootSpring,
   rootSection,
   wallSprings,
+  widthStiffening,
 } from '@/lib/mechanics/root';
 import { wallStrain } from '@/lib/mechanics/thin-wall';
 import { inPanel, slotWidth } from './dimensions';
@@ -39,12 +40,15 @@ const sectionOf = (v: HookValues): RootSection => ({
 
 const wallOf = (v: HookValues) => ({ thickness: v.wallThickness, span: v.wallSpan, width: v.wallWidth });
 
+const panelOf = (v: HookValues) => ({
+  span: v.wallSpan,
+  depth: v.wallWidth,
+  slot: v.root === 'panel-slot' ? slotWidth(v) : null,
+});
+
 function springsOf(v: HookValues): readonly RootSpring[] {
   if (v.root === 'wall') return wallSprings(wallOf(v), sectionOf(v));
-  if (inPanel(v)) {
-    const slot = v.root === 'panel-slot' ? slotWidth(v) : null;
-    return panelSprings({ span: v.wallSpan, depth: v.wallWidth, slot }, sectionOf(v));
-  }
+  if (inPanel(v)) return panelSprings(panelOf(v), sectionOf(v));
   return blockSprings(v.baseWidth, sectionOf(v));
 }
 
@@ -54,7 +58,7 @@ export const flexibleArm = (v: HookValues, poisson: number): FlexibleArm => ({
   fillet: thickeningFillet(v),
   springs: springsOf(v),
   poisson,
-  stiffening: heldWidthStiffening(v.rootWidth, v.armLength),
+  stiffening: widthStiffening(armOf(v)),
 });
 
 /** Strains of the arm bent by some deflection at its tip; all fractions, tension positive. */
@@ -71,10 +75,11 @@ export interface HookStrain {
   readonly wall: number | null;
 }
 
-/** Peak over nominal strain where the fillet ends. */
+/** Peak over nominal strain where the fillet ends; infinite where there is none. */
 function concentration(v: HookValues, flexible: FlexibleArm): number {
-  if (!inPanel(v)) return filletConcentration(v.rootFillet / v.rootThickness);
-  return flexible.stiffening * cornerConcentration(v.rootFillet, v.rootWidth, v.root === 'panel-slot');
+  const narrowing = narrowingAtFillet(narrowingSlope(armOf(v)));
+  if (!inPanel(v)) return narrowing * filletConcentration(v.rootFillet / v.rootThickness);
+  return flexible.stiffening * cornerConcentration(panelOf(v), sectionOf(v), v.armLength);
 }
 
 export function strainOf(v: HookValues, flexible: FlexibleArm, deflection: number): HookStrain {
@@ -87,6 +92,7 @@ export function strainOf(v: HookValues, flexible: FlexibleArm, deflection: numbe
   return { deflection, bent, nominal, fillet: atFillet, arm: Math.max(atFillet, alongArm), wall };
 }
 
+/** Infinite where the root is sharp. */
 export const peakOf = (strain: HookStrain): number => Math.max(strain.arm, strain.wall ?? 0);
 
 /** Deflection in mm at which the peak strain reaches `allowed`; null past the reach of the formulas. */

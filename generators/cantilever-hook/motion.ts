@@ -53,7 +53,7 @@ export function motion(v: HookValues, material: Material): Motion {
     label: 'Flex',
     from: 'closed',
     to: 'past the edge',
-    peakStrain: peakOf(full),
+    peakStrain: v.rootFillet > 0 ? peakOf(full) : full.nominal,
     pose(body, rest, t, out) {
       const deflection = t * v.undercut;
       if (body === 'receiver') posePlate(plateLift(v, deflection), rest, out);

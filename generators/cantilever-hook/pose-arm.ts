@@ -25,6 +25,7 @@ function halfDepth(v: HookValues, { arm }: FlexibleArm, z: number): number {
 
 /** How much of the fillet's concentration a point sees: all at the fillet's end, across a panel only at the sides. */
 function concentrated(v: HookValues, y: number, z: number): number {
+  if (v.rootFillet === 0) return 0;
   const near = Math.max(0, 1 - Math.abs(z - v.rootFillet) / v.rootFillet) ** 2;
   return inPanel(v) ? near * Math.min(1, Math.abs(2 * y) / armWidth(v, z)) ** 4 : near;
 }
@@ -33,7 +34,7 @@ function concentrated(v: HookValues, y: number, z: number): number {
 function faceStrain(v: HookValues, flexible: FlexibleArm, state: HookStrain, y: number, z: number): number {
   const { bent, nominal, fillet } = state;
   const from = inPanel(v) ? 0 : v.rootFillet;
-  const raised = nominal > 0 ? fillet / nominal - 1 : 0;
+  const raised = nominal > 0 && Number.isFinite(fillet) ? fillet / nominal - 1 : 0;
   const strain = strainAt(flexible, bent, clamp(z, from, v.armLength)) * (1 + raised * concentrated(v, y, z));
   return z < from ? strain * Math.max(0, z / from) : strain;
 }

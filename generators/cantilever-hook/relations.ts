@@ -15,6 +15,10 @@ const mm = (value: number) => `${Number(value.toFixed(2))} mm`;
 
 const MARGIN = 0.2;
 
+/** A fillet measures by the thickness it joins: of a standing arm its own, in a panel the width. */
+const worthwhileFillet = (v: HookValues) => (inPanel(v) ? 0.1 * v.rootWidth : 0.5 * v.rootThickness);
+const largestFillet = (v: HookValues) => (inPanel(v) ? v.rootWidth / 3 : v.rootThickness);
+
 /** Least span of a panel: the arm with its fillets, or with its slots, and a thickness of panel on each side. */
 const leastPanel = (v: HookValues): number => {
   const freed = v.root === 'panel-slot' ? v.rootWidth + 2 * slotWidth(v) : footWidth(v);
@@ -170,17 +174,15 @@ const cautions: readonly Relation<HookValues>[] = [
     id: 'fillet-worth-having',
     field: 'rootFillet',
     severity: 'warn',
-    holds: (v) => v.rootFillet >= 0.5 * v.rootThickness - 1e-9,
-    message: (v) =>
-      `A root fillet under half the thickness (${mm(v.rootThickness / 2)}) raises the strain at the root`,
+    holds: (v) => v.rootFillet >= worthwhileFillet(v) - 1e-9,
+    message: (v) => `A root fillet under ${mm(worthwhileFillet(v))} raises the strain at the root`,
   },
   {
     id: 'fillet-past-the-known',
     field: 'rootFillet',
     severity: 'warn',
-    holds: (v) => v.rootFillet <= v.rootThickness,
-    message: (v) =>
-      `Beyond the root thickness (${mm(v.rootThickness)}) a larger fillet only shortens the arm`,
+    holds: (v) => v.rootFillet <= largestFillet(v) + 1e-9,
+    message: (v) => `Past ${mm(largestFillet(v))} a larger root fillet only shortens the arm`,
   },
   {
     id: 'captive-land',

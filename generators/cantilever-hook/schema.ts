@@ -51,7 +51,7 @@ const fields = {
     label: 'Root fillet',
     group: 'arm',
     help: 'Radius where the arm meets its base; in a panel, at its two sides. About half the root thickness is worth having.',
-    min: 0.2,
+    min: 0,
     max: 6,
     step: 0.1,
     default: 1,
@@ -151,11 +151,11 @@ const fields = {
   baseWidth: length({
     label: 'Base width',
     group: 'root',
-    help: 'Width of the block along the width of the arm.',
+    help: 'Width of the block along the width of the arm. The same as the arm prints on its side without support.',
     min: 2,
     max: 120,
     step: 0.5,
-    default: 14,
+    default: 8,
   }),
   baseThickness: length({
     label: 'Base thickness',

@@ -25,8 +25,8 @@ function placeOf({ values, strain }: Subject): string {
 }
 
 function peakReason(subject: Subject): string {
-  const { values, strain, allowable, trouble } = subject;
-  if (trouble) return `Not known: ${trouble}; nothing here covers that.`;
+  const { values, strain, allowable, strainTrouble } = subject;
+  if (strainTrouble) return `Not known: ${strainTrouble}.`;
   const limit = allowable.value === null ? allowable.because : '';
   if (strain.wall !== null && strain.wall > strain.arm) {
     return `The wall of ${values.wallThickness} mm bends harder than the arm: a thicker wall or a shorter span helps. ${limit}`.trim();
@@ -35,12 +35,12 @@ function peakReason(subject: Subject): string {
 }
 
 function peakFigure(subject: Subject): Figure {
-  const { values, strain, allowable, trouble } = subject;
+  const { values, strain, allowable, strainTrouble } = subject;
   return judgedFigure({
     id: 'peak-strain',
     label: 'Peak strain',
     unit: 'strain',
-    value: trouble ? null : peakOf(strain),
+    value: strainTrouble ? null : peakOf(strain),
     handbook: inGuideRange(values) ? guideStrain(armOf(values), values.undercut) : null,
     limit: allowable.value,
     because: peakReason(subject),
@@ -48,9 +48,9 @@ function peakFigure(subject: Subject): Figure {
   });
 }
 
-function permissibleFigure({ values, flexible, allowable, trouble }: Subject): Figure {
+function permissibleFigure({ values, flexible, allowable, strainTrouble }: Subject): Figure {
   const limit = allowable.value;
-  const value = limit === null || trouble ? null : permissibleDeflection(values, flexible, limit);
+  const value = limit === null || strainTrouble ? null : permissibleDeflection(values, flexible, limit);
   return plainFigure({
     id: 'permissible-undercut',
     label: 'Undercut the arm can pass',
@@ -67,14 +67,14 @@ function permissibleFigure({ values, flexible, allowable, trouble }: Subject): F
   });
 }
 
-function wallFigure({ strain, trouble }: Subject): Figure[] {
+function wallFigure({ strain, strainTrouble }: Subject): Figure[] {
   if (strain.wall === null) return [];
   return [
     plainFigure({
       id: 'wall-strain',
       label: 'Strain in the wall',
       unit: 'strain',
-      value: trouble ? null : strain.wall,
+      value: strainTrouble ? null : strain.wall,
       because: 'At the end of the fillet in the wall plate; counts where it is higher than the arm.',
       source: CORRECTED,
     }),

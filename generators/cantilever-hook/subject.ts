@@ -2,6 +2,7 @@ import { type AllowableStrain, allowableStrain } from '@/lib/materials/allowable
 import { secantModulus } from '@/lib/materials/secant';
 import type { Material, Use } from '@/lib/materials/types';
 import type { FlexibleArm } from '@/lib/mechanics/large-deflection';
+import { inPanel } from './dimensions';
 import {
   deflectionRatio,
   flexibleArm,
@@ -24,23 +25,32 @@ export interface Subject {
   readonly strain: HookStrain;
   /** why the corrected figures do not hold for these values; null where they do */
   readonly trouble: string | null;
+  /** the same for the strains alone */
+  readonly strainTrouble: string | null;
 }
 
 function troubleOf(v: HookValues): string | null {
   if (deflectionRatio(v) > MOST_DEFLECTION) return 'the arm bends by more than half its length';
   if (slenderness(v) < LEAST_SLENDERNESS) return 'the arm is shorter than twice its thickness';
+  const flatness = v.rootWidth / v.rootThickness;
+  if (inPanel(v) && (flatness < 1 || flatness > 8)) {
+    return 'in a panel the arm must be one to eight times as wide as thick';
+  }
   return null;
 }
 
 export function subjectOf(values: HookValues, material: Material, use: Use): Subject {
   const flexible = flexibleArm(values, material.poisson.value);
+  const trouble = troubleOf(values);
   return {
     values,
     material,
     allowable: allowableStrain(material, use),
     flexible,
     strain: strainOf(values, flexible, values.undercut),
-    trouble: troubleOf(values),
+    trouble,
+    strainTrouble:
+      trouble ?? (values.rootFillet > 0 ? null : 'a sharp root has no finite strain, give it a fillet'),
   };
 }
 

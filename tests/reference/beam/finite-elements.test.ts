@@ -5,10 +5,10 @@ import { bendArm, compliance, type FlexibleArm, strainAt } from '@/lib/mechanics
 import { type Panel, panelSprings } from '@/lib/mechanics/panel';
 import {
   blockSprings,
-  heldWidthStiffening,
   type RootSpring,
   rootSection,
   wallSprings,
+  widthStiffening,
 } from '@/lib/mechanics/root';
 import { narrowingStrain, sharpRootStrain, shortStiffness } from '@/lib/mechanics/short-beam';
 import {
@@ -24,8 +24,8 @@ import {
 /** Agreement asked of every case, percent. */
 const TOLERANCE = 5;
 
-const within = (value: number, reference: number, percent = TOLERANCE) =>
-  expect(Math.abs(errorPercent(value, reference))).toBeLessThanOrEqual(percent);
+const within = (value: number, reference: number) =>
+  expect(Math.abs(errorPercent(value, reference))).toBeLessThanOrEqual(TOLERANCE);
 
 const armOf = (of: FiniteElementCase, k = 1, q = 1): Arm => {
   const [h, b] = [input(of, 'h'), input(of, 'b')];
@@ -103,7 +103,7 @@ const standing = casesOf('root_Q').filter(({ inputs }) => /^(perp|solid)/.test(S
 describe('arms standing on blocks and walls, solid model', () => {
   test.each(standing.map((of) => [of.id, of] as const))('%s', (_, of) => {
     const arm = armOf(of);
-    const stiffening = heldWidthStiffening(arm.rootWidth, arm.length);
+    const stiffening = widthStiffening(arm);
     const flexible: FlexibleArm = {
       arm,
       fillet: 0,
@@ -118,7 +118,11 @@ describe('arms standing on blocks and walls, solid model', () => {
 /** Sides so far away that only the held edge behind the root counts, and the other way round. mm. */
 const FAR = 1000;
 
-/** How the reference panels are held and slotted; a layout the mechanics do not offer is null. */
+/**
+ * How the reference panels are held and slotted. Null, and so not covered, are the 19 cases of panels free along the
+ * edge behind the root or, deep ones, along their sides: layouts the mechanics do not offer. The slot of the slotted
+ * panels is not on record; 1 mm and a depth of 20 mm repeat them.
+ */
 function panelOf(of: FiniteElementCase): Panel | null {
   const wall = String(of.inputs.wall);
   const depth = Number(/D(\d+)/.exec(wall)?.[1]);
@@ -129,14 +133,6 @@ function panelOf(of: FiniteElementCase): Panel | null {
   return slotted ? { span: Number(slotted[1]), depth: 20, slot: 1 } : null;
 }
 
-/** Larger errors, percent of the force: what the panel model does not reach in these references. */
-const EXCEPTIONS: Readonly<Record<string, number>> = {
-  // slotted panels were solved on a coarse mesh and their slot is not on record; our own solution is within 1 %
-  '4 uslot span20 all clamped L/h=5': 8,
-  // short arm on a strip of panel with free sides
-  '4 edge back D10 L/h=3': 7,
-};
-
 const inPanels = casesOf('root_Q').flatMap((of) => {
   const panel = panelOf(of);
   return panel ? [[of.id, of, panel] as const] : [];
@@ -145,20 +141,15 @@ const inPanels = casesOf('root_Q').flatMap((of) => {
 describe('arms in the plane of a panel, solid model', () => {
   test('every layout the family offers is among the cases', () => expect(inPanels.length).toBe(22));
 
-  test.each(inPanels)('%s', (id, of, panel) => {
+  test.each(inPanels)('%s', (_, of, panel) => {
     const arm = armOf(of);
     const flexible: FlexibleArm = {
       arm,
       fillet: 0,
       springs: panelSprings(panel, rootSection(arm, 0)),
       poisson: CASE_POISSON,
-      stiffening: heldWidthStiffening(arm.rootWidth, arm.length),
+      stiffening: widthStiffening(arm),
     };
-    const reached = CASE_MODULUS / compliance(flexible);
-    within(reached, expected(of, 'force_per_mm'), EXCEPTIONS[id] ?? TOLERANCE);
-  });
-
-  test('only the exceptions named are needed', () => {
-    for (const id of Object.keys(EXCEPTIONS)) expect(inPanels.map(([name]) => name)).toContain(id);
+    within(CASE_MODULUS / compliance(flexible), expected(of, 'force_per_mm'));
   });
 });

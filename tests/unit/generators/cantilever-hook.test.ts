@@ -97,6 +97,27 @@ describe('cantilever hook: strain', () => {
     expect(figure(report, 'deflection-force').because).toMatch(/more than half its length/);
   });
 
+  it('is not known at a sharp root, where the force still is', () => {
+    const report = checked({ rootFillet: 0 });
+    expect(figure(report, 'peak-strain').value).toBeNull();
+    expect(figure(report, 'peak-strain').because).toMatch(/sharp root/);
+    expect(figure(report, 'permissible-undercut').value).toBeNull();
+    expect(figure(report, 'deflection-force').value).toBeGreaterThan(0);
+    expect(report.verdict).toBe('not-known');
+  });
+
+  it('is taken at the corners of an arm in a panel, and falls with a rounder one', () => {
+    const panel = { root: 'panel-slot', wallSpan: 30, wallWidth: 12 } as const;
+    expect(figure(checked(panel), 'peak-strain').because).toMatch(/^At the corners/);
+    expect(sized({ ...panel, rootFillet: 1.6 })).toBeLessThan(sized({ ...panel, rootFillet: 0.8 }));
+    expect(sized({ ...panel, wallSpan: 60 })).toBeLessThan(sized(panel));
+  });
+
+  it('is higher up a thin arm than at its root', () => {
+    const report = checked({ tipThickness: 0.5, rootFillet: 2 });
+    expect(figure(report, 'peak-strain').because).toMatch(/thin part of the arm/);
+  });
+
   it('has no limit where the plastic has none for the use, and says so', () => {
     const report = hook.check(values(), { ...toughPlastic, allowableOnce: null }, DEFAULT_USE);
     expect(report.verdict).toBe('not-known');
