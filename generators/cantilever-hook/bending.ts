@@ -4,11 +4,12 @@ import type { Root } from '@/lib/fea/shapes/root';
 import type { Placement } from '@/lib/geometry/kernel';
 import { secantModulus } from '@/lib/materials/secant';
 import type { Material, Use } from '@/lib/materials/types';
+import { narrowingAtFillet } from '@/lib/mechanics/fillet';
 import { compliance, type FlexibleArm } from '@/lib/mechanics/large-deflection';
-import { blockSprings, rootSection, wallSprings } from '@/lib/mechanics/root';
-import { narrowingStrain } from '@/lib/mechanics/short-beam';
+import { blockSprings, narrowingSlope, rootSection, wallSprings } from '@/lib/mechanics/root';
 import { radians } from '@/lib/units';
 import type { Bending } from '../contract';
+import { inPanel } from './dimensions';
 import { armOf, flexibleArm, strainOf } from './mechanics';
 import type { HookValues } from './schema';
 
@@ -56,7 +57,7 @@ function widthFactor(v: HookValues, poisson: number): Factor {
 }
 
 function factorsOf(v: HookValues, poisson: number): Factor[] {
-  const narrowing = narrowingStrain(v.tipWidth / v.rootWidth);
+  const narrowing = narrowingAtFillet(narrowingSlope(armOf(v)));
   const taper = { force: 1, strain: narrowing, because: 'an arm that narrows carries more at mid-width' };
   return narrowing > 1 ? [widthFactor(v, poisson), taper] : [widthFactor(v, poisson)];
 }
@@ -84,7 +85,16 @@ export function planeModel(v: HookValues, poisson: number): BendingModel {
 /** Printed standing, the layers lie across the arm; on its side they lie in the plane of bending. */
 const layerNormal = (use: Use): number | null => (use.layers === 'across' ? Math.PI / 2 : null);
 
+/** Why a hook has no plane model; null where it has one. */
+function withoutPlane(v: HookValues): string | null {
+  if (inPanel(v)) return 'An arm cut from a panel bends the panel as a plate, not as a plane section.';
+  if (v.rootFillet === 0) return 'A sharp root has no finite strain to compute.';
+  return null;
+}
+
 export function bending(v: HookValues, material: Material, use: Use): Bending {
+  const none = withoutPlane(v);
+  if (none) return { none };
   const poisson = material.poisson.value;
   const { nominal } = strainOf(v, flexibleArm(v, poisson), v.undercut);
   return {
