@@ -67,7 +67,8 @@ function computedOf(given: Report, plane: BendingPlane, solution: Solved): Compu
   const { strain: signed, place } = peakOf(solution, plane);
   const strain = Math.abs(signed);
   const formula = figureOf(given, plane.strainFigure)?.value ?? null;
-  const difference = formula === null || formula === 0 ? null : strain / formula - 1;
+  const isBeside = plane.beside !== null && plane.beside.strain > strain;
+  const difference = formula === null || formula === 0 || isBeside ? null : strain / formula - 1;
   const tells = difference !== null && Math.abs(difference) > WORTH_SAYING;
   return {
     method: solution.method,
@@ -99,7 +100,16 @@ function strainReason({ kind, formula, difference, likely }: Computed, solution:
   return `Computed on the outline (${kind}, ${how}); ${against}.${layers}`;
 }
 
-function strainFigure(figure: Figure, computed: Computed, solution: Solved): Figure {
+function strainFigure(
+  figure: Figure,
+  computed: Computed,
+  solution: Solved,
+  beside: BendingPlane['beside'],
+): Figure {
+  if (beside && beside.strain > computed.strain) {
+    const because = `${beside.because} That place comes from the formula; on the outline ${formatQuantity(computed.strain, 'strain')} is computed.`;
+    return { ...figure, value: beside.strain, because };
+  }
   const value = solution.layers?.strain ?? computed.strain;
   const limit = solution.layers?.allowable ?? figure.limit;
   const verdict = figure.verdict === null ? null : judge(value, limit, figure.limitKind);
@@ -128,7 +138,7 @@ export function withComputed(given: Report, plane: BendingPlane, solution: Solve
   const formula = main === undefined ? null : (figureOf(given, main)?.value ?? null);
   const ratio = formula && computed.force !== null ? computed.force / formula : null;
   const figures = given.figures.map((figure) => {
-    if (figure.id === plane.strainFigure) return strainFigure(figure, computed, solution);
+    if (figure.id === plane.strainFigure) return strainFigure(figure, computed, solution, plane.beside);
     if (ratio !== null && plane.forceFigures.includes(figure.id)) return scaled(figure, ratio);
     return figure;
   });

@@ -100,6 +100,8 @@ export interface BendingPlane {
   readonly strainFigure: string;
   /** what that figure counts: the largest tension, or the larger of tension and compression */
   readonly counts: 'tension' | 'either';
+  /** strain of a place that the plane does not show, from the formulas; counts where it is the larger. Null: none */
+  readonly beside: { readonly strain: number; readonly because: string } | null;
   /** figures in proportion to the solved force, the force itself first; empty where none is */
   readonly forceFigures: readonly string[];
   /** secant modulus in MPa at the working strain; null where the plastic's is not known */

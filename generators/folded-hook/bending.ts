@@ -135,6 +135,7 @@ export function bending(p: Values, material: Material, use: Use): Bending {
     strainFigure: 'peak-strain',
     // pressed in, the inside of the bend is in compression
     counts: 'either',
+    beside: null,
     forceFigures: ['deflection-force', 'mating-force', 'separation-force'],
     modulus: secantModulus(material, foldedStrain(p).peak)?.value ?? null,
     layerNormal: layerNormal(use),

@@ -44,6 +44,7 @@ export function bending(p: Values, material: Material, use: Use): Bending {
     placements: [PLACEMENT],
     strainFigure: 'peak-strain',
     counts: 'tension',
+    beside: null,
     // the moment is capped where the web yields through, so it stays with the closed form
     forceFigures: [],
     modulus: secantModulus(material, nominal)?.value ?? null,

@@ -121,6 +121,7 @@ export function bending(p: Values, material: Material, use: Use): Bending {
     placements: [first, ...others],
     strainFigure: 'peak-strain',
     counts: 'tension',
+    beside: null,
     forceFigures: ['deflection-force', 'mating-force', 'separation-force'],
     modulus: secantModulus(material, clipMechanics(p).strain)?.value ?? null,
     layerNormal: layerNormal(use),

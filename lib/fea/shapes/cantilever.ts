@@ -31,6 +31,9 @@ export interface Cantilever {
  */
 const PRESSED = 0.2;
 
+/** Reach of the sharp inner corner under the catch, in tip thicknesses: strain there says nothing on so sharp a corner. */
+const SHADOW = 0.5;
+
 /** Where a tapering back face reaches its tip thickness. */
 function taperEnd({ length, thickness, tipThickness }: Cantilever): Corner[] {
   if (tipThickness === thickness) return [];
@@ -51,6 +54,7 @@ function tipCorners(arm: Cantilever): Corner[] {
   const foot = length - (hook.back >= Math.PI / 2 ? 0 : hook.height / Math.tan(hook.back));
   const end = length + hook.land + hook.height / Math.tan(hook.lead);
   return [
+    { at: [front, Math.max(foot - SHADOW * tipThickness, foot / 2)], tag: 'under-catch' },
     { at: [front, foot], tag: 'return' },
     { at: [peak, length], tag: 'land' },
     { at: [peak, length + PRESSED * hook.land], tag: 'flat' },

@@ -22,7 +22,7 @@ export interface RootFillets {
 }
 
 /**
- * Corners from the arm's back round the base to its front, arm along +y with its root at y = 0. The edges leaving
+ * Corners from the arm's back round the base to its front, arm along +y with its root at y = 0. The edge leaving
  * the last corner is the arm's front face, tagged `front`; fillets are tagged `front-fillet` and `back-fillet`.
  */
 export function rootCorners(root: Root, thickness: number, fillets: RootFillets): Corner[] {

@@ -107,3 +107,20 @@ export function factorise(
   }
   return { structure, columns, notPositive };
 }
+
+/**
+ * Smallest pivot over the largest; negative or near the round-off of the machine (1e-16 times the size) where the
+ * matrix is indefinite or singular, as for a part that nothing holds.
+ */
+export function pivotRatio({ structure, columns }: Factor): number {
+  let smallest = Infinity;
+  let largest = 0;
+  for (const { pivots, size, at } of structure.fronts) {
+    for (let k = 0; k < pivots; k++) {
+      const pivot = columns[at + k * size + k]!;
+      smallest = Math.min(smallest, pivot);
+      largest = Math.max(largest, pivot);
+    }
+  }
+  return smallest / largest;
+}

@@ -79,7 +79,7 @@ describe('a solved hook', () => {
 
   it('has a force proportional to the width', () => {
     const wide = bend(cantileverModel({ ...HOOK, width: { kind: 'even', width: 9 } }));
-    expect(last(wide).force).toBeCloseTo(1.5 * last(small).force, 9);
+    expect(last(wide).force / last(small).force).toBeCloseTo(1.5, 8);
   });
 
   it('gives the same bytes when solved again', () => {
