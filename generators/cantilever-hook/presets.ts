@@ -8,7 +8,7 @@ export const presets: readonly Preset<HookValues>[] = [
     purpose: 'Holds the battery hatch of a glider and is pulled open at every flight.',
     material: 'petg',
     use: { opening: 'often', layers: 'along', temperature: 23 },
-    values: {},
+    values: { baseWidth: 8 },
   },
   {
     id: 'receiver-box-lid',

@@ -155,7 +155,7 @@ const fields = {
     min: 2,
     max: 120,
     step: 0.5,
-    default: 8,
+    default: 14,
   }),
   baseThickness: length({
     label: 'Base thickness',
