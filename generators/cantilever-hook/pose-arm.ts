@@ -30,13 +30,14 @@ function concentrated(v: HookValues, y: number, z: number): number {
   return inPanel(v) ? near * Math.min(1, Math.abs(2 * y) / armWidth(v, z)) ** 4 : near;
 }
 
-/** Strain of the face in tension: nominal on the arm, raised at the fillet; a standing arm's fades into its base. */
+/** Strain of the face in tension: nominal on the arm, raised at the fillet; a standing arm's runs out into its base. */
 function faceStrain(v: HookValues, flexible: FlexibleArm, state: HookStrain, y: number, z: number): number {
   const { bent, nominal, fillet } = state;
   const from = inPanel(v) ? 0 : v.rootFillet;
   const raised = nominal > 0 && Number.isFinite(fillet) ? fillet / nominal - 1 : 0;
   const strain = strainAt(flexible, bent, clamp(z, from, v.armLength)) * (1 + raised * concentrated(v, y, z));
-  return z < from ? strain * Math.max(0, z / from) : strain;
+  const up = Math.max(0, Math.min(1, z / from));
+  return z < from ? strain * up + (state.wall ?? 0) * (1 - up) : strain;
 }
 
 /**

@@ -26,10 +26,11 @@ function wallPoint(v: HookValues, state: HookStrain, turned: number, [x, y, z]: 
   const sideways = fade(aside(v, y), v.wallSpan / 2);
   const slope = turned * sideways * (1 - share) * (1 - 3 * share);
   const depth = (2 * z) / v.wallThickness + 1;
+  const side = Math.max(-1, Math.min(1, off / (v.rootThickness / 2 + v.rootFillet)));
   return {
     x: x - slope * (z + v.wallThickness / 2),
     z: z + turned * sideways * off * (1 - share) ** 2,
-    strain: (state.wall ?? 0) * Math.sign(off) * (1 - 1.5 * share) * depth * sideways,
+    strain: (state.wall ?? 0) * side * (1 - 1.5 * share) * depth * sideways,
   };
 }
 
