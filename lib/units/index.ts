@@ -79,10 +79,14 @@ export function significant(value: number, digits = 3): string {
   return text.includes('.') ? text.replace(/\.?0+$/, '') : text;
 }
 
+/** Digits of a whole number in threes from 10 000 on: "1 000 000". */
+const grouped = (text: string): string =>
+  /^-?\d{5,}$/.test(text) ? text.replace(/\B(?=(\d{3})+$)/g, '\u202f') : text;
+
 /** A figure with its unit, strain in percent: "1.22 %", "6.4 N", "30°". */
 export function formatQuantity(value: number | null, unit: Unit, digits = 3): string {
   if (value === null || !Number.isFinite(value)) return 'not known';
-  const shown = significant(unit === 'strain' ? value * 100 : value, digits);
+  const shown = grouped(significant(unit === 'strain' ? value * 100 : value, digits));
   const symbol = UNIT_SYMBOL[unit];
   if (symbol === '') return shown;
   return unit === 'deg' ? `${shown}${symbol}` : `${shown}\u202f${symbol}`;

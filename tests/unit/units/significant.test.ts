@@ -19,6 +19,7 @@ describe('a figure on screen', () => {
 
   it('is followed by its unit, strain in percent', () => {
     expect(formatQuantity(0.024, 'strain')).toBe('2.4\u202f%');
+    expect(formatQuantity(1_000_000, 'cycles')).toBe('1\u202f000\u202f000\u202fcycles');
     expect(formatQuantity(30, 'deg')).toBe('30°');
     expect(formatQuantity(null, 'N')).toBe('not known');
   });
