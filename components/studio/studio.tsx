@@ -76,7 +76,7 @@ function Bench({ session, query }: { session: Session; query: string }) {
       <UnknownWords words={startOf(family, query).unknown} />
       <Faults />
       <StrainBand />
-      <div className="grid items-start gap-4 lg:grid-cols-[minmax(0,1fr)_27rem]">
+      <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-4 lg:grid-cols-[minmax(0,1fr)_27rem]">
         <div className="grid min-w-0 gap-4 lg:sticky lg:top-[4.5rem]">
           <ViewPanel stance={stance} onStance={setStance} state={picture} onState={setPicture} />
           <Remedies />
@@ -84,7 +84,7 @@ function Bench({ session, query }: { session: Session; query: string }) {
         <DimensionSheet />
       </div>
       <ChecksList />
-      <div className="grid items-start gap-4 xl:grid-cols-2">
+      <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-4 xl:grid-cols-[repeat(2,minmax(0,1fr))]">
         <Curves />
         <Plastics />
       </div>

@@ -5,6 +5,7 @@ import { type Figure, type Report, VERDICT_WORDS } from '@/generators/report';
 import { figureOf } from '@/generators/sensitivity';
 import { formatQuantity } from '@/lib/units';
 import { useReading } from '../session-context';
+import { UseStrip } from '../sheet/use-strip';
 import { SourceNote } from '../source-note';
 import { marginWords, VerdictIcon, VerdictMark } from '../verdict';
 import { BandScale, BandStripScale } from './band-scale';
@@ -60,7 +61,7 @@ function Governing({ figure, report }: { figure: Figure; report: Report }) {
 function Headline({ figure }: { figure: Figure }) {
   const banded = figure.low !== null && figure.high !== null && figure.low !== figure.high;
   return (
-    <div className="xl:max-w-28">
+    <div className="xl:max-w-36">
       <dt className="mb-1.5 text-muted text-sm leading-tight">{figure.label}</dt>
       <dd>
         <BigFigure value={figure.value} unit={figure.unit} size="text-[2.1rem]" />
@@ -74,8 +75,10 @@ function Headline({ figure }: { figure: Figure }) {
   );
 }
 
+/** The factors where the limit is their product, else why the limit is what it is. */
 function Basis({ figure, report }: { figure: Figure; report: Report }) {
-  if (figure.unit === 'strain') return <Factors allowable={report.allowable} />;
+  if (figure.unit === 'strain' && figure.limit === report.allowable.value)
+    return <Factors allowable={report.allowable} />;
   return (
     <div className="max-w-prose text-sm">
       {figure.because} <SourceNote source={figure.source} of={figure.label} />
@@ -132,21 +135,24 @@ export function StrainBand() {
       <section
         ref={element}
         aria-label="Verdict"
-        className="grid gap-x-10 gap-y-5 rounded-sheet border border-hair bg-sheet px-5 py-5 shadow-lift sm:px-7 lg:grid-cols-[auto_1fr_auto]"
+        className="rounded-sheet border border-hair bg-sheet shadow-lift"
       >
-        <Governing figure={figure} report={report} />
-        <div className="grid content-start gap-3">
-          <TwoFigures figure={figure} />
-          <BandScale figure={figure} />
-          <Basis figure={figure} report={report} />
+        <div className="grid gap-x-10 gap-y-5 px-5 pt-5 pb-4 sm:px-7 lg:grid-cols-[auto_1fr_auto]">
+          <Governing figure={figure} report={report} />
+          <div className="grid content-start gap-3">
+            <TwoFigures figure={figure} />
+            <BandScale figure={figure} />
+            <Basis figure={figure} report={report} />
+          </div>
+          {headlines.length > 0 && (
+            <dl className="flex flex-wrap content-start gap-x-8 gap-y-4 border-hair border-t pt-4 lg:max-w-56 lg:border-t-0 lg:border-l lg:pt-0 lg:pl-7 xl:max-w-none xl:flex-nowrap">
+              {headlines.map((one) => (
+                <Headline key={one.id} figure={one} />
+              ))}
+            </dl>
+          )}
         </div>
-        {headlines.length > 0 && (
-          <dl className="flex flex-wrap content-start gap-x-8 gap-y-4 border-hair border-t pt-4 lg:max-w-56 lg:border-t-0 lg:border-l lg:pt-0 lg:pl-7 xl:max-w-none xl:flex-nowrap">
-            {headlines.map((one) => (
-              <Headline key={one.id} figure={one} />
-            ))}
-          </dl>
-        )}
+        <UseStrip />
         <p role="status" className="sr-only">
           {spoken(figure)}
         </p>

@@ -45,7 +45,7 @@ function Check({ figure }: { figure: Figure }) {
           {figure.because} <SourceNote source={figure.source} of={figure.label} />
         </div>
       </div>
-      <div className="col-start-2 sm:col-start-3 sm:w-40 sm:text-right">
+      <div className="col-start-2 sm:col-start-3 sm:w-44 sm:text-right">
         <p className="font-bold font-heading text-2xl tabular-nums leading-tight tracking-tight">
           {text(figure.value, figure)}
         </p>

@@ -10,13 +10,16 @@ const KEYS: readonly { keys: string; does: string }[] = [
   { keys: 'Ctrl Z', does: 'undo; Cmd on a Mac' },
   { keys: 'Ctrl Shift Z', does: 'redo; Ctrl Y too' },
   { keys: 'Esc', does: 'close a note' },
+  { keys: '← → ↑ ↓', does: 'turn the part, in the picture' },
+  { keys: '+ − F', does: 'nearer, farther, fit' },
+  { keys: '1 … 7', does: 'standard views' },
 ];
 
 export function Keys() {
   return (
     <Note
       aria-label="Keys"
-      className={classNames(buttonClass('quiet'), 'hidden px-2.5! pointer-fine:inline-flex')}
+      className={classNames(buttonClass('quiet'), 'px-2.5! pointer-coarse:hidden')}
       trigger={<Keyboard aria-hidden="true" size={19} />}
     >
       <h2 className="mb-2 font-bold">Keys</h2>

@@ -4,7 +4,7 @@ import { SelectField } from '@/components/ui/select-field';
 import { SwitchField } from '@/components/ui/switch-field';
 import type { ChoiceField, ToggleField } from '@/generators/parameters';
 import { useEntry, useIssue, useSession } from '../session-context';
-import { describedBy, FieldRow, fieldId } from './field-row';
+import { describedBy, FieldRow, fieldId, type RowLayout } from './field-row';
 
 function ChoiceHelp({ field }: { field: ChoiceField }) {
   const explained = field.options.filter((option) => option.help);
@@ -20,7 +20,15 @@ function ChoiceHelp({ field }: { field: ChoiceField }) {
   );
 }
 
-export function ChoiceRow({ name, field }: { name: string; field: ChoiceField }) {
+export function ChoiceRow({
+  name,
+  field,
+  layout = 'wide',
+}: {
+  name: string;
+  field: ChoiceField;
+  layout?: RowLayout;
+}) {
   const session = useSession();
   const value = useEntry(name);
   const issue = useIssue(name);
@@ -29,7 +37,7 @@ export function ChoiceRow({ name, field }: { name: string; field: ChoiceField })
     <FieldRow
       name={name}
       label={field.label}
-      wide
+      layout={layout}
       help={<ChoiceHelp field={field} />}
       error={issue?.message}
       control={
@@ -57,7 +65,7 @@ export function ToggleRow({ name, field }: { name: string; field: ToggleField })
     <FieldRow
       name={name}
       label={field.label}
-      wide
+      layout="wide"
       help={<p>{field.help}</p>}
       error={issue?.message}
       control={

@@ -13,7 +13,6 @@ import { ChoiceRow, ToggleRow } from './choice-row';
 import { EffectCell } from './effect-cell';
 import { Group } from './group';
 import { NumberRow } from './number-row';
-import { UseGroup } from './use-group';
 
 function useEffects() {
   const subject = useSubject();
@@ -70,7 +69,6 @@ export function DimensionSheet() {
       <h2 id="dimensions" className="sr-only">
         Dimensions
       </h2>
-      <UseGroup />
       {groups.map(([id, title, keys], at) => (
         <Group
           key={id}

@@ -1,6 +1,7 @@
 'use client';
 
 import type { KeyboardEvent, ReactNode } from 'react';
+import { classNames } from '@/components/ui/class-names';
 import { Note } from '@/components/ui/note';
 import { useSession } from '../session-context';
 import { VerdictIcon } from '../verdict';
@@ -8,6 +9,21 @@ import { VerdictIcon } from '../verdict';
 export const fieldId = (key: string): string => `field-${key}`;
 const helpId = (key: string): string => `help-${key}`;
 const errorId = (key: string): string => `error-${key}`;
+
+/** With room for an effect, with a wide control instead, or the control under its name. */
+export type RowLayout = 'line' | 'wide' | 'stack';
+
+const ROW: Readonly<Record<RowLayout, string>> = {
+  line: 'border-l-4 py-1 pr-4 pl-3 sm:pr-5 sm:pl-4',
+  wide: 'border-l-4 py-1 pr-4 pl-3 sm:pr-5 sm:pl-4',
+  stack: 'min-w-0 border-t-4 px-2 pt-0.5 pb-2',
+};
+
+const CELLS: Readonly<Record<RowLayout, string>> = {
+  line: 'grid grid-cols-[1fr_7.25rem_4.25rem] items-center gap-2.5 sm:grid-cols-[1fr_7rem_6.25rem] sm:gap-2.5',
+  wide: 'grid grid-cols-[1fr_12.5rem] items-center gap-3',
+  stack: 'grid grid-cols-[minmax(0,1fr)] gap-0.5',
+};
 
 /** "?" is no part of a number or a choice, so it asks for the field's help. */
 function askHelp(event: KeyboardEvent, key: string): void {
@@ -26,7 +42,7 @@ export function FieldRow({
   help,
   control,
   effect,
-  wide,
+  layout = 'line',
   error,
 }: {
   name: string;
@@ -34,26 +50,28 @@ export function FieldRow({
   help: ReactNode;
   control: ReactNode;
   effect?: ReactNode;
-  wide?: boolean;
+  layout?: RowLayout;
   error?: ReactNode;
 }) {
   const { focused } = useSession();
   return (
     // biome-ignore lint/a11y/noStaticElementInteractions: listens to the control inside, which has the role
     <div
-      className="border-transparent border-l-4 py-1 pr-4 pl-3 focus-within:border-marker focus-within:bg-tint sm:pr-5 sm:pl-4"
+      className={classNames(
+        'border-transparent focus-within:border-marker focus-within:bg-tint',
+        ROW[layout],
+      )}
       onFocus={() => focused.setState({ field: name })}
       onBlur={() => focused.setState({ field: null })}
       onKeyDown={(event) => askHelp(event, name)}
     >
-      <div
-        className={
-          wide
-            ? 'grid grid-cols-[1fr_12.5rem] items-center gap-3'
-            : 'grid grid-cols-[1fr_7.25rem_4.25rem] items-center gap-2.5 sm:grid-cols-[1fr_7.25rem_5.5rem] sm:gap-3'
-        }
-      >
-        <div className="flex items-center gap-1 leading-tight">
+      <div className={CELLS[layout]}>
+        <div
+          className={classNames(
+            'flex items-center gap-1 leading-tight',
+            layout === 'stack' && 'text-muted text-sm',
+          )}
+        >
           <label htmlFor={fieldId(name)}>{label}</label>
           <Note
             noteId={helpId(name)}

@@ -6,7 +6,7 @@ import type { NumberField as NumberSpec } from '@/generators/parameters';
 import { formatQuantity, UNIT_SYMBOL } from '@/lib/units';
 import { useEntry, useIssue, useSession } from '../session-context';
 import { stepEntry, tidyEntry } from '../step-entry';
-import { describedBy, FieldRow, fieldId } from './field-row';
+import { describedBy, FieldRow, fieldId, type RowLayout } from './field-row';
 
 const rangeOf = ({ min, max, unit }: NumberSpec): string => `${min} to ${formatQuantity(max, unit, 6)}`;
 
@@ -15,14 +15,14 @@ export function NumberRow({
   field,
   valid,
   effect,
-  wide,
+  layout,
 }: {
   name: string;
   field: NumberSpec;
   /** value of the part that is shown */
   valid: number;
   effect?: ReactNode;
-  wide?: boolean;
+  layout?: RowLayout;
 }) {
   const session = useSession();
   const text = useEntry(name);
@@ -36,7 +36,7 @@ export function NumberRow({
     <FieldRow
       name={name}
       label={field.label}
-      wide={wide}
+      layout={layout}
       effect={effect}
       help={
         <>

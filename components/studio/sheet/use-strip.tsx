@@ -5,7 +5,6 @@ import { USE_FIELDS } from '@/generators/url-state';
 import { useEntry, useIssue, useReading, useSession } from '../session-context';
 import { ChoiceRow } from './choice-row';
 import { describedBy, FieldRow, fieldId } from './field-row';
-import { Group } from './group';
 import { NumberRow } from './number-row';
 
 function MaterialRow() {
@@ -23,7 +22,7 @@ function MaterialRow() {
     <FieldRow
       name="material"
       label="Plastic"
-      wide
+      layout="stack"
       help={<p>{material.summary}</p>}
       error={issue && `${issue.message}; the check is for ${material.shortName}.`}
       control={
@@ -48,14 +47,15 @@ function MaterialRow() {
 }
 
 /** Plastic and how the part is used: what the allowed strain comes from. */
-export function UseGroup() {
+export function UseStrip() {
   const temperature = useReading((reading) => reading.design.use.temperature);
   return (
-    <Group id="use" title="Plastic and use">
+    <fieldset className="grid grid-cols-2 gap-x-2 border-hair border-t px-3 pt-1 pb-2 sm:gap-x-4 sm:px-5 lg:grid-cols-[2fr_1fr_1.2fr_1fr]">
+      <legend className="sr-only">Plastic and use</legend>
       <MaterialRow />
-      <ChoiceRow name="opening" field={USE_FIELDS.opening} />
-      <ChoiceRow name="layers" field={USE_FIELDS.layers} />
-      <NumberRow name="temperature" field={USE_FIELDS.temperature} valid={temperature} wide />
-    </Group>
+      <ChoiceRow name="opening" field={USE_FIELDS.opening} layout="stack" />
+      <ChoiceRow name="layers" field={USE_FIELDS.layers} layout="stack" />
+      <NumberRow name="temperature" field={USE_FIELDS.temperature} valid={temperature} layout="stack" />
+    </fieldset>
   );
 }

@@ -15,7 +15,7 @@ function Look({ pressed, onPress, children }: { pressed: boolean; onPress: () =>
       aria-pressed={pressed}
       onClick={onPress}
       className={classNames(
-        'min-h-9 rounded-field border px-3 font-semibold text-sm pointer-coarse:min-h-11',
+        'min-h-9 rounded-field border px-2.5 font-semibold text-sm pointer-coarse:min-h-11',
         pressed ? 'border-ink bg-ink text-paper' : 'border-edge bg-sheet hover:border-ink',
       )}
     >
@@ -89,7 +89,7 @@ export function ViewBar({
     <div className="border-hair border-t">
       <div className="flex flex-wrap items-center gap-x-5 gap-y-2 px-4 py-2">
         {!view.onBed && <FlexSlider motion={motion} flex={view.flex} onFlex={(flex) => onView({ flex })} />}
-        <fieldset className="flex flex-wrap gap-2">
+        <fieldset className="flex flex-wrap gap-1.5">
           <legend className="sr-only">Show</legend>
           {motion.peakStrain > 0 && (
             <Look

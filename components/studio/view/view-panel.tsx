@@ -5,6 +5,8 @@ import { useMemo, useState } from 'react';
 import { useStore } from 'zustand';
 import { Sheet } from '@/components/ui/sheet';
 import type { ViewportState } from '@/components/viewport/types';
+import type { Report } from '@/generators/report';
+import { figureOf } from '@/generators/sensitivity';
 import { useReading, useSession, useSubject } from '../session-context';
 import { InWords } from './in-words';
 import { ViewBar } from './view-bar';
@@ -14,6 +16,12 @@ const Viewport = dynamic(() => import('@/components/viewport/viewport'), {
   ssr: false,
   loading: () => <p className="grid h-full place-items-center text-muted">Setting up the view</p>,
 });
+
+/** The limit the picture's scale is marked with: that of the verdict where it is about strain. */
+function strainLimit(report: Report): number | null {
+  const governing = figureOf(report, report.governing);
+  return governing?.unit === 'strain' ? governing.limit : report.allowable.value;
+}
 
 /** What the picture needs of the part; the same objects as long as the part is the same. */
 function useScene() {
@@ -56,7 +64,7 @@ export function ViewPanel({
           motion={motion}
           flex={view.onBed ? 0 : view.flex}
           paint={view.onBed || motion.peakStrain === 0 ? 'solid' : view.paint}
-          strainScale={report.allowable.value}
+          strainScale={strainLimit(report)}
           showDimensions={view.dimensions}
           cut={view.cut}
           onBed={view.onBed}
