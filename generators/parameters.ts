@@ -2,6 +2,9 @@ import { z } from 'zod';
 import type { FieldIssue } from '@/lib/errors';
 import { UNIT_SYMBOL, type Unit } from '@/lib/units';
 
+// Without code made at run time, which the content security policy of the site forbids.
+z.config({ jitless: true });
+
 interface FieldBase {
   readonly label: string;
   readonly group: string;
