@@ -1,6 +1,7 @@
 import type { Family } from '@/generators/contract';
-import { linkEntries } from '@/generators/url-state';
+import { type Entries, linkEntries } from '@/generators/url-state';
 import { presetTyped, type Typed } from './session';
+import { tidyEntry } from './step-entry';
 
 /** Kept work of another version is not read. */
 const VERSION = 1;
@@ -63,9 +64,24 @@ export interface Start {
   readonly linked: boolean;
 }
 
+/** Numbers of a link written as their fields write them. */
+function tidied(family: Family, entries: Entries): Entries {
+  const { fields } = family.parameters;
+  return Object.fromEntries(
+    Object.entries(entries).map(([key, text]) => {
+      const field = fields[key];
+      return [key, field?.type === 'number' ? tidyEntry(field, text) : text];
+    }),
+  );
+}
+
 /** What the page opens with: the link where it says something, else the first preset. */
 export function startOf(family: Family, query: string): Start {
   const { entries, unknown } = linkEntries(family, query);
   const linked = Object.keys(entries).length > 0;
-  return { typed: linked ? { entries, from: null } : presetTyped(family), unknown, linked };
+  return {
+    typed: linked ? { entries: tidied(family, entries), from: null } : presetTyped(family),
+    unknown,
+    linked,
+  };
 }

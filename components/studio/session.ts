@@ -64,6 +64,15 @@ const usable = (field: NumberField, text: string | undefined): boolean => {
   return value !== null && value >= field.min && value <= field.max;
 };
 
+/** Where an entry is at fault by itself, what it breaks between dimensions is no news. */
+function causes(family: Family, entries: Entries, issues: readonly FieldIssue[]): readonly FieldIssue[] {
+  const own = issues.filter(({ field }) => {
+    const spec = family.parameters.fields[field];
+    return spec?.type !== 'number' ? !spec : !usable(spec, entries[field]);
+  });
+  return own.length > 0 ? own : issues;
+}
+
 /** Puts the last valid number in place of a faulty one whose field is out of sight. */
 function withoutHiddenFaults(family: Family, entries: Entries, valid: Design['values']): Entries {
   const values = chosenValues(family, entries, valid);
@@ -80,7 +89,7 @@ export function createSession(family: Family, materials: readonly Material[], st
 
   function readingOf(entries: Entries): Reading | readonly FieldIssue[] {
     const read = readEntries(family, entries);
-    if (!read.ok) return read.issues;
+    if (!read.ok) return causes(family, entries, read.issues);
     const design = read.values;
     const material = materialOf(design.material);
     if (!material) return [unknownMaterial(design.material)];

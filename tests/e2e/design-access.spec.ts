@@ -22,12 +22,14 @@ for (const colorScheme of ['light', 'dark'] as const) {
         page,
       }) => {
         await page.goto('/design/cantilever-hook');
-        await expect(page.locator('[data-viewport=ready]')).toBeVisible();
-        await expect(page.getByRole('heading', { name: /Room before the limit/ })).toBeVisible();
+        await expect(page.getByRole('heading', { name: /Room before the limit/ })).toBeVisible({
+          timeout: 45_000,
+        });
         const calm = await new AxeBuilder({ page }).withTags(STANDARDS).analyze();
         expect(calm.violations).toEqual([]);
 
         await page.goto('/design/cantilever-hook?material=pla&armLength=12');
+        await expect(page.locator('[data-viewport]')).toBeVisible({ timeout: 45_000 });
         await page.getByRole('spinbutton', { name: 'Undercut' }).fill('99');
         await expect(page.getByRole('alert').filter({ hasText: 'Undercut' })).toBeVisible();
         await expect(page.getByRole('heading', { name: /To make it gentler/ })).toBeVisible();

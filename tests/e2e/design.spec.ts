@@ -19,25 +19,22 @@ test.afterEach(() => {
 const field = (page: Page, name: string) => page.getByRole('spinbutton', { name, exact: true });
 const verdict = (page: Page) => page.getByRole('region', { name: 'Verdict' }).getByRole('status');
 
-/** Types as a hand does, once the page is alive. */
-async function type(page: Page, name: string, text: string): Promise<void> {
-  await expect(page.getByRole('button', { name: 'Undo' })).toBeVisible();
-  await field(page, name).fill(text);
-}
+/** The picture is only put in by a page that is alive. */
+const alive = (page: Page) => expect(page.locator('[data-viewport]')).toBeVisible({ timeout: 45_000 });
 
 async function openHook(page: Page, query = ''): Promise<void> {
   await page.goto(`/design/cantilever-hook${query}`);
-  await expect(page.locator('[data-viewport=ready]')).toBeVisible();
+  await alive(page);
 }
 
 test('goes from choosing a part to its file, and back by its link', async ({ page, browser }) => {
   await page.goto('/design');
   await page.getByRole('link', { name: 'Cantilever hook' }).click();
   await expect(page.getByRole('heading', { level: 1, name: 'Cantilever hook' })).toBeVisible();
-  await expect(page.locator('[data-viewport=ready]')).toBeVisible();
+  await alive(page);
   const before = await verdict(page).textContent();
 
-  await type(page, 'Arm length', '24,5');
+  await field(page, 'Arm length').fill('24,5');
   await expect(verdict(page)).not.toHaveText(before!);
   await expect(page).toHaveURL(/armLength=24\.5/);
   const after = await verdict(page).textContent();
@@ -68,7 +65,8 @@ test('goes from choosing a part to its file, and back by its link', async ({ pag
 test('leads back to the page before with one press, however much was typed', async ({ page }) => {
   await page.goto('/design');
   await page.getByRole('link', { name: 'Cantilever hook' }).click();
-  for (const text of ['20', '21', '22']) await type(page, 'Arm length', text);
+  await alive(page);
+  for (const text of ['20', '21', '22']) await field(page, 'Arm length').fill(text);
   await expect(page).toHaveURL(/armLength=22/);
   await page.goBack();
   await expect(page).toHaveURL(/\/design$/);
@@ -79,7 +77,7 @@ test('leads back to the page before with one press, however much was typed', asy
 test('keeps a faulty entry, says what is wrong, and shows the last valid part', async ({ page }) => {
   await openHook(page);
   const before = await verdict(page).textContent();
-  await type(page, 'Undercut', '99');
+  await field(page, 'Undercut').fill('99');
   const message = /Undercut must be at most [\d.]+ mm/;
   await expect(page.getByRole('alert').filter({ hasText: message })).toBeVisible();
   await expect(field(page, 'Undercut')).toHaveAttribute('aria-invalid', 'true');
@@ -109,24 +107,24 @@ test('applies a dimension that just meets the limit with one press', async ({ pa
 
 test('restores what was worked on, and starts fresh when asked', async ({ page }) => {
   await openHook(page);
-  await type(page, 'Arm length', '31');
+  await field(page, 'Arm length').fill('31');
   await expect(page).toHaveURL(/armLength=31/);
   await openHook(page);
   await expect(page.getByText('Restored')).toBeVisible();
-  await expect(field(page, 'Arm length')).toHaveValue('31.0');
+  await expect(field(page, 'Arm length')).toHaveValue(/^31/);
   await page.getByRole('button', { name: 'Start fresh' }).click();
-  await expect(field(page, 'Arm length')).not.toHaveValue('31.0');
+  await expect(field(page, 'Arm length')).not.toHaveValue(/^31/);
 });
 
 test('lets two tabs of one part go their own ways', async ({ page, context }) => {
   await openHook(page);
-  await type(page, 'Arm length', '25');
+  await field(page, 'Arm length').fill('25');
   await expect(page).toHaveURL(/armLength=25/);
   const other = await context.newPage();
   await openHook(other, '?armLength=35');
-  await type(other, 'Undercut', '1.1');
+  await field(other, 'Undercut').fill('1.1');
   await expect(other).toHaveURL(/undercut=1\.1/);
-  await expect(field(page, 'Arm length')).toHaveValue('25.0');
+  await expect(field(page, 'Arm length')).toHaveValue(/^25/);
   await page.reload();
   await expect(field(page, 'Arm length')).toHaveValue('25.0');
 });
@@ -157,7 +155,7 @@ test('shows how the part lies on the bed and takes the layers from there', async
   expect(options.length).toBeGreaterThan(1);
   await lies.selectOption({ index: 1 });
   await page.getByRole('button', { name: /Check it with layers across/ }).click();
-  await expect(page.getByLabel('Printed layers')).toHaveValue('across');
+  await expect(page.getByRole('combobox', { name: 'Printed layers' })).toHaveValue('across');
   await expect(page.getByRole('link', { name: 'Download STL' })).toHaveAttribute('href', /stance=/);
 });
 

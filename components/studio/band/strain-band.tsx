@@ -102,7 +102,11 @@ function useOutOfSight() {
 function Strip({ figure }: { figure: Figure }) {
   const verdict = figure.verdict ?? 'not-known';
   return (
-    <div aria-hidden="true" className="fixed inset-x-0 top-0 z-40 border-ink border-b-2 bg-sheet shadow-lift">
+    <div
+      data-strip=""
+      aria-hidden="true"
+      className="fixed inset-x-0 top-0 z-40 border-ink border-b-2 bg-sheet shadow-lift"
+    >
       <div className="frame flex h-14 items-center gap-3">
         <span className="hidden text-muted text-sm sm:inline">{figure.label}</span>
         <BigFigure value={figure.value} unit={figure.unit} size="text-3xl" />

@@ -56,8 +56,8 @@ describe('work kept in the browser', () => {
 
 describe('opening the page', () => {
   it('takes the link where it says something about the part', () => {
-    const { typed, linked } = startOf(TINY, 'armLength=31&material=stiff');
-    expect(typed).toMatchObject({ from: null, entries: { armLength: '31', material: 'stiff' } });
+    const { typed, linked } = startOf(TINY, 'armLength=31,50&material=stiff');
+    expect(typed).toMatchObject({ from: null, entries: { armLength: '31.5', material: 'stiff' } });
     expect(linked).toBe(true);
   });
 

@@ -38,6 +38,14 @@ describe('typing in the design page', () => {
     expect(session.typed.getState().entries.armLength).toBe('9oo');
   });
 
+  it('names the entry at fault and not what it breaks between dimensions', () => {
+    const session = open();
+    session.type('thickness', '0.1');
+    expect(session.reading.getState().issues.map(({ field }) => field)).toEqual(['thickness']);
+    session.type('thickness', '1.5');
+    expect(session.reading.getState().issues.map(({ field }) => field)).toEqual(['tip']);
+  });
+
   it('is not held up by a faulty entry whose field is out of sight', () => {
     const session = open();
     session.type('shape', 'round');
