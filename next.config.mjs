@@ -3,7 +3,7 @@ const config = {
   reactStrictMode: true,
   poweredByHeader: false,
   images: { unoptimized: true },
-  serverExternalPackages: ['better-sqlite3', '@node-rs/argon2', 'manifold-3d', 'sharp', 'pino'],
+  serverExternalPackages: ['better-sqlite3', 'manifold-3d', 'pino'],
 };
 
 export default config;
