@@ -44,7 +44,7 @@ function widthOf(v: HookValues): Width {
 
 /** The arm as the plane model sees it: on a base no wider than itself, free to arch across its width. */
 function planeArm(v: HookValues, poisson: number): FlexibleArm {
-  const section = rootSection(armOf(v), v.rootFillet);
+  const section = rootSection(armOf(v), v.rootFillet, poisson);
   const springs = wallIsPlane(v)
     ? wallSprings({ thickness: v.wallThickness, span: v.wallSpan, width: v.rootWidth }, section)
     : blockSprings(v.rootWidth, section);

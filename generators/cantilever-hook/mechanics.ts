@@ -9,6 +9,7 @@ import {
   strainAt,
 } from '@/lib/mechanics/large-deflection';
 import { cornerConcentration, panelSprings } from '@/lib/mechanics/panel';
+import { heldStrain } from '@/lib/mechanics/poisson';
 import {
   blockSprings,
   narrowingSlope,
@@ -33,8 +34,8 @@ export const armOf = (v: HookValues): Arm => ({
 /** The fillet that thickens the arm; in a panel it lies in the plane and widens the foot instead. */
 const thickeningFillet = (v: HookValues): number => (inPanel(v) ? 0 : v.rootFillet);
 
-const sectionOf = (v: HookValues): RootSection => ({
-  ...rootSection(armOf(v), thickeningFillet(v)),
+const sectionOf = (v: HookValues, poisson: number): RootSection => ({
+  ...rootSection(armOf(v), thickeningFillet(v), poisson),
   fillet: v.rootFillet,
 });
 
@@ -46,19 +47,20 @@ const panelOf = (v: HookValues) => ({
   slot: v.root === 'panel-slot' ? slotWidth(v) : null,
 });
 
-function springsOf(v: HookValues): readonly RootSpring[] {
-  if (v.root === 'wall') return wallSprings(wallOf(v), sectionOf(v));
-  if (inPanel(v)) return panelSprings(panelOf(v), sectionOf(v));
-  return blockSprings(v.baseWidth, sectionOf(v));
+function springsOf(v: HookValues, poisson: number): readonly RootSpring[] {
+  const section = sectionOf(v, poisson);
+  if (v.root === 'wall') return wallSprings(wallOf(v), section);
+  if (inPanel(v)) return panelSprings(panelOf(v), section);
+  return blockSprings(v.baseWidth, section);
 }
 
 /** The arm on what it stands on, for a Poisson's ratio. */
 export const flexibleArm = (v: HookValues, poisson: number): FlexibleArm => ({
   arm: armOf(v),
   fillet: thickeningFillet(v),
-  springs: springsOf(v),
+  springs: springsOf(v, poisson),
   poisson,
-  stiffening: widthStiffening(armOf(v)),
+  stiffening: widthStiffening(armOf(v), poisson),
 });
 
 /** Strains of the arm bent by some deflection at its tip; all fractions, tension positive. */
@@ -78,8 +80,9 @@ export interface HookStrain {
 /** Peak over nominal strain where the fillet ends; infinite where there is none. */
 function concentration(v: HookValues, flexible: FlexibleArm): number {
   const narrowing = narrowingAtFillet(narrowingSlope(armOf(v)));
-  if (!inPanel(v)) return narrowing * filletConcentration(v.rootFillet / v.rootThickness);
-  return flexible.stiffening * cornerConcentration(panelOf(v), sectionOf(v), v.armLength);
+  const held = heldStrain(flexible.poisson, v.rootWidth / v.rootThickness);
+  if (!inPanel(v)) return narrowing * held * filletConcentration(v.rootFillet / v.rootThickness);
+  return flexible.stiffening * cornerConcentration(panelOf(v), sectionOf(v, flexible.poisson), v.armLength);
 }
 
 export function strainOf(v: HookValues, flexible: FlexibleArm, deflection: number): HookStrain {
@@ -88,7 +91,9 @@ export function strainOf(v: HookValues, flexible: FlexibleArm, deflection: numbe
   const atFillet = concentration(v, flexible) * nominal;
   const alongArm = highestStrain(flexible, bent, v.rootFillet);
   const wall =
-    v.root === 'wall' ? wallStrain(wallOf(v), sectionOf(v), v.armLength, bent.forcePerModulus) : null;
+    v.root === 'wall'
+      ? wallStrain(wallOf(v), sectionOf(v, flexible.poisson), v.armLength, bent.forcePerModulus)
+      : null;
   return { deflection, bent, nominal, fillet: atFillet, arm: Math.max(atFillet, alongArm), wall };
 }
 

@@ -25,7 +25,12 @@ export interface FoldedArm {
 export function solveFolded(p: Values, elastic: Elastic): FoldedArm {
   const line = centreline(p);
   const solved = solveArm(line.stations, line.tip, INWARD, elastic);
-  const section = { thickness: p.thickness, width: elastic.width, fillet: p.rootFillet };
+  const section = {
+    thickness: p.thickness,
+    width: elastic.width,
+    fillet: p.rootFillet,
+    poisson: elastic.poisson,
+  };
   const turn = blockSprings(p.baseWidth, section).reduce((sum, spring) => sum + spring.turn, 0);
   const rootTurn = (turn * solved.rootMoment) / elastic.modulus;
   return { line, solved, rootTurn, compliance: solved.compliance + rootTurn * solved.rootMoment };

@@ -1,3 +1,4 @@
+import { plateGive } from './poisson';
 import type { RootSection, RootSpring } from './root';
 import { sharpRootStrain } from './short-beam';
 
@@ -54,10 +55,11 @@ const cornerShare = (fillet: number, b: number): number => 1.04 - 0.25 * Math.mi
  * Fitted to finite elements (b/h 1.5 to 6, span/b 1.7 to 12, depth/b 0.35 to 6, slot/b 0.1 to 0.4): force within
  * 2.5 % at a panel's edge, 4.5 % in a slot.
  */
-export function panelSprings(panel: Panel, { thickness: h, width: b, fillet }: RootSection): RootSpring[] {
+export function panelSprings(panel: Panel, section: RootSection): RootSpring[] {
+  const { thickness: h, width: b, fillet, poisson } = section;
   const [x, d, s] = [b / h, panel.depth / b, panel.span / b];
   const give = panel.slot === null ? edgeGive(x, d, s) : slotGive(x, d, s, panel.slot / b);
-  const share = cornerShare(fillet, b);
+  const share = cornerShare(fillet, b) * plateGive(poisson);
   const turn = (share * give.turning) / (b * h ** 2);
   const behind = (give.coupling / give.turning) * h;
   return [{ turn, behind, slide: Math.max(0, (share * give.shift) / b - turn * behind ** 2) }];

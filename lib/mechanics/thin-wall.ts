@@ -1,4 +1,5 @@
 import { filletConcentration } from './fillet';
+import { plateGive } from './poisson';
 import type { RootSection } from './root';
 import type { Wall } from './wall-plate';
 
@@ -12,14 +13,17 @@ const FOOT_ENDS = 0.2;
  * side: 1/b in a wall as wide as the arm, less where the load spreads sideways. Cosine waves across a thin plate, a
  * wave of number k falling as (1 - k x/2) e^(-k x) from the middle; derived here.
  */
-function momentAtFoot(wall: Wall, b: number, foot: number): number {
+function momentAtFoot(wall: Wall, { thickness, width: b, fillet, poisson }: RootSection): number {
+  const foot = thickness / 2 + fillet;
   const width = Math.max(wall.width, b);
-  let sum = Math.max(0, 1 - (3 * foot) / wall.span);
+  const spread = 1 - b / width;
+  const give = plateGive(poisson);
+  let sum = Math.max(0, 1 - (3 * foot) / wall.span) * (1 + (give - 1) * spread);
   for (let n = 1; n <= MOST_WAVES; n += 1) {
     const far = (2 * Math.PI * n * foot) / width;
     if (far > 12) break;
     const q = (Math.PI * n * b) / width;
-    sum += 2 * PLATE_SHARE * (Math.sin(q) / q) * (1 - far / 2) * Math.exp(-far);
+    sum += 2 * PLATE_SHARE * give * (Math.sin(q) / q) * (1 - far / 2) * Math.exp(-far);
   }
   const ends = 1 + FOOT_ENDS * Math.max(0, 1 - (1.5 * (b / width)) ** 2);
   return (Math.max(0, sum) * ends) / width;
@@ -38,8 +42,8 @@ export function wallStrain(
   forcePerModulus: number,
 ): number {
   const { thickness: tw } = wall;
-  const { thickness: h, width, fillet } = section;
+  const { fillet } = section;
   const carried = (forcePerModulus * (length + tw / 2)) / 2;
-  const moment = carried * momentAtFoot(wall, width, h / 2 + fillet);
+  const moment = carried * momentAtFoot(wall, section);
   return (1.1 * filletConcentration(fillet / tw) * 6 * moment) / tw ** 2;
 }

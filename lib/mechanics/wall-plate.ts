@@ -1,3 +1,6 @@
+import { heldShare, plateGive } from './poisson';
+import type { RootSection } from './root';
+
 /** A wall plate held along two edges `span` apart in the bending direction of the arm standing on it. mm. */
 export interface Wall {
   readonly thickness: number;
@@ -42,8 +45,8 @@ function spreading(span: number, width: number, b: number, foot: number): number
 }
 
 /** A wall wide against its span cannot arch across its width and is stiffer; a narrow strip is a plain beam. */
-const archingShare = ({ thickness, span }: Wall, width: number): number =>
-  1 - (0.305 * width ** 2) / ((width + thickness) * (width + 0.447 * span));
+const archingShare = ({ thickness, span }: Wall, width: number, poisson: number): number =>
+  1 - (0.305 * heldShare(poisson) * width ** 2) / ((width + thickness) * (width + 0.447 * span));
 
 /**
  * Turning of a thin plate, held along two edges, under the moment of an arm b wide and h thick with fillet R in its
@@ -51,10 +54,14 @@ const archingShare = ({ thickness, span }: Wall, width: number): number =>
  * even part bends the wall as a beam of span S - 2.05 h - 3.23 R.
  * Constants fitted to finite elements: tw/h 0.5 to 3, S/h 8 to 40, W/b 1 to 16; force within 2 %.
  */
-export function plateTurn(wall: Wall, b: number, h: number, fillet: number): number {
+export function plateTurn(wall: Wall, section: RootSection): number {
+  const { thickness: h, width: b, fillet, poisson } = section;
   const { thickness: tw, span } = wall;
   const width = Math.max(wall.width, b);
   const even = Math.max(0, span - FOOT * h - FOOT_FILLET * fillet) / 16;
   const waves = spreading(span, width, b, h + (FOOT_FILLET / FOOT) * fillet);
-  return (12 * (even * archingShare(wall, width) + PLATE_SHARE * waves)) / (tw ** 3 * width);
+  return (
+    (12 * (even * archingShare(wall, width, poisson) + PLATE_SHARE * plateGive(poisson) * waves)) /
+    (tw ** 3 * width)
+  );
 }

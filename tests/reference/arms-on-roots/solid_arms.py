@@ -1,4 +1,4 @@
-"""Arms on blocks, walls and panels in CalculiX: the solid cases of cases.json.
+"""Arms on blocks, walls and panels in CalculiX: the solid cases of cases.json (NU below for those at another Poisson's ratio).
 
 A quarter of each arm is meshed with 20-node bricks (C3D20R) in a structured grid: x across the thickness (bending),
 y along the width, z along the arm. x = 0 is a plane of antisymmetry, y = 0 one of symmetry. The tip carries a

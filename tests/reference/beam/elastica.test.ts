@@ -44,7 +44,7 @@ test('the root of a wide body gives as the elastic support of O’Donnell, J. Ap
   ] as const) {
     const arm = even(2 * slenderness, 2, 20);
     const rigid: FlexibleArm = { arm, fillet: 0, springs: [], poisson: 0.35, stiffening: 1 };
-    const onBody = { ...rigid, springs: blockSprings(200, rootSection(arm, 0)) };
+    const onBody = { ...rigid, springs: blockSprings(200, rootSection(arm, 0, 0.35)) };
     const more = (compliance(onBody) - compliance(rigid)) / ((4 * slenderness ** 3) / arm.rootWidth);
     expect(Math.abs(1 + more - printed)).toBeLessThanOrEqual(0.025 * printed);
   }

@@ -77,7 +77,7 @@ describe('arms with a root fillet on a block or a strip of wall, plane stress', 
     const arm = armOf(of);
     const fillet = input(of, 'R');
     const plate = /t=([\d.]+) span (\d+)/.exec(String(of.inputs.wall));
-    const section = rootSection(arm, fillet);
+    const section = rootSection(arm, fillet, CASE_POISSON);
     const wall = plate && { thickness: Number(plate[1]), span: Number(plate[2]), width: arm.rootWidth };
     const springs = wall ? wallSprings(wall, section) : blockSprings(arm.rootWidth, section);
     const flexible: FlexibleArm = { arm, fillet, springs, poisson: CASE_POISSON, stiffening: 1 };
@@ -92,7 +92,7 @@ describe('arms with a root fillet on a block or a strip of wall, plane stress', 
 const WIDE = 60;
 
 function springsOf(of: FiniteElementCase, arm: Arm): readonly RootSpring[] {
-  const section = rootSection(arm, 0);
+  const section = rootSection(arm, 0, CASE_POISSON);
   if (of.inputs.wall === 'solid_block') return blockSprings(WIDE, section);
   const wall = { thickness: input(of, 'tw'), span: input(of, 'span'), width: input(of, 'W') };
   return wallSprings(wall, section);
@@ -103,7 +103,7 @@ const standing = casesOf('root_Q').filter(({ inputs }) => /^(perp|solid)/.test(S
 describe('arms standing on blocks and walls, solid model', () => {
   test.each(standing.map((of) => [of.id, of] as const))('%s', (_, of) => {
     const arm = armOf(of);
-    const stiffening = widthStiffening(arm);
+    const stiffening = widthStiffening(arm, CASE_POISSON);
     const flexible: FlexibleArm = {
       arm,
       fillet: 0,
@@ -146,9 +146,9 @@ describe('arms in the plane of a panel, solid model', () => {
     const flexible: FlexibleArm = {
       arm,
       fillet: 0,
-      springs: panelSprings(panel, rootSection(arm, 0)),
+      springs: panelSprings(panel, rootSection(arm, 0, CASE_POISSON)),
       poisson: CASE_POISSON,
-      stiffening: widthStiffening(arm),
+      stiffening: widthStiffening(arm, CASE_POISSON),
     };
     within(CASE_MODULUS / compliance(flexible), expected(of, 'force_per_mm'));
   });

@@ -61,9 +61,9 @@ describe('an arm bent at its tip', () => {
     const of = (a: Arm, fillet: number): FlexibleArm => ({
       arm: a,
       fillet,
-      springs: blockSprings(3 * a.rootWidth, rootSection(a, fillet)),
+      springs: blockSprings(3 * a.rootWidth, rootSection(a, fillet, 0.35)),
       poisson: 0.35,
-      stiffening: widthStiffening(a),
+      stiffening: widthStiffening(a, 0.35),
     });
     const [one, two] = [bendArm(of(arm(0.5), 1), 3), bendArm(of(twice(arm(0.5)), 2), 6)];
     expect(two.forcePerModulus / one.forcePerModulus).toBeCloseTo(4, 9);
@@ -85,7 +85,7 @@ describe('an arm bent at its tip', () => {
 
 describe('what an arm stands on', () => {
   const on = (springs: FlexibleArm['springs']): number => compliance({ ...slender(arm()), springs });
-  const section = rootSection(arm(), 0);
+  const section = rootSection(arm(), 0, 0.35);
 
   it('gives nothing where there is no spring', () => {
     const { rootWidth, rootThickness, length } = arm();
