@@ -185,6 +185,14 @@ const cautions: readonly Relation<HookValues>[] = [
     message: (v) => `Past ${mm(largestFillet(v))} a larger root fillet only shortens the arm`,
   },
   {
+    id: 'block-is-deep',
+    field: 'baseThickness',
+    severity: 'warn',
+    holds: (v) => v.root !== 'block' || v.baseThickness >= 1.5 * v.rootThickness,
+    message: (v) =>
+      `A base under 1.5 root thicknesses (${mm(1.5 * v.rootThickness)}) bends like a wall; choose the wall plate to have that checked`,
+  },
+  {
     id: 'captive-land',
     field: 'landLength',
     severity: 'warn',

@@ -1,4 +1,6 @@
+import type { Source } from '@/lib/materials/types';
 import { guideStrain, guideUndercut } from '@/lib/mechanics/beam';
+import { shoulderConcentration } from '@/lib/mechanics/fillet';
 import { formatQuantity } from '@/lib/units';
 import { type Figure, judgedFigure, plainFigure } from '../report';
 import { inPanel } from './dimensions';
@@ -81,6 +83,28 @@ function wallFigure({ strain, strainTrouble }: Subject): Figure[] {
   ];
 }
 
+const ROARK: Source = { text: "Roark's Formulas for Stress and Strain, Table 17.1", mark: 'computed' };
+
+/** Our concentration beside the published one of a bar with shoulders as high as it is thick on both sides. */
+function concentrationFigure({ values, strain, strainTrouble }: Subject): Figure[] {
+  if (inPanel(values)) return [];
+  const ratio = values.rootFillet / values.rootThickness;
+  const published = ratio >= 0.05 && ratio <= 1;
+  return [
+    plainFigure({
+      id: 'fillet-concentration',
+      label: 'Concentration at the fillet',
+      unit: 'ratio',
+      value: strainTrouble ? null : strain.fillet / strain.nominal,
+      handbook: published ? shoulderConcentration(1, 1, ratio) : null,
+      because: strainTrouble
+        ? `Not known: ${strainTrouble}.`
+        : 'Peak over nominal strain where the root fillet ends; the published figure is for a shoulder, ours for an arm on its base.',
+      source: ROARK,
+    }),
+  ];
+}
+
 export function strainFigures(subject: Subject): Figure[] {
   const { values, allowable, flexible } = subject;
   return [
@@ -105,6 +129,7 @@ export function strainFigures(subject: Subject): Figure[] {
     }),
     permissibleFigure(subject),
     ...wallFigure(subject),
+    ...concentrationFigure(subject),
     plainFigure({
       id: 'root-share',
       label: 'Give of the root',

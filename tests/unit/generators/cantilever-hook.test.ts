@@ -97,6 +97,12 @@ describe('cantilever hook: strain', () => {
     expect(figure(report, 'deflection-force').because).toMatch(/more than half its length/);
   });
 
+  it('shows the published concentration of a shoulder fillet beside its own (Roark, Table 17.1)', () => {
+    const shown = figure(checked({ rootFillet: 1 }), 'fillet-concentration');
+    expect(shown.handbook).toBeCloseTo(1.222, 2);
+    expect(Math.abs(shown.value! / shown.handbook! - 1)).toBeLessThan(0.08);
+  });
+
   it('is not known at a sharp root, where the force still is', () => {
     const report = checked({ rootFillet: 0 });
     expect(figure(report, 'peak-strain').value).toBeNull();
@@ -197,6 +203,11 @@ describe('cantilever hook: input', () => {
     expect(warned({})).toEqual([]);
     expect(warned({ tipThickness: 0.8 })).toEqual(['tip-half-the-root']);
     expect(warned({ armLength: 9 })).toEqual(['arm-slender']);
+    expect(warned({ baseThickness: 2.5 })).toEqual(['block-is-deep']);
+    expect(warned({ landLength: 0.4, returnAngle: 90 })).toEqual(['captive-land']);
+    expect(warned({ clearance: 0.6 })).toEqual(['catch-overlaps']);
+    expect(warned({ rootWidth: 4, tipWidth: 4 })).toEqual(['width-printable']);
+    expect(warned({ rootFillet: 2.4 })).toEqual(['fillet-past-the-known']);
     expect(warned({ rootThickness: 1, tipThickness: 0.6 })).toEqual(['root-printable']);
     expect(warned({ rootFillet: 0.4 })).toEqual(['fillet-worth-having']);
     expect(warned({ returnAngle: 70 })).toEqual(['return-face-decides']);
