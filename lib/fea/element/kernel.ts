@@ -225,20 +225,20 @@ function addForce(kernel: Kernel, point: number, rows: number, force: Float64Arr
 }
 
 /**
- * Element tangents into `stiffness` (144 per element) and internal forces into `force`, both overwritten.
- * `u` null: the linear stiffness at rest. `mixed`: four stresses per Gauss point to take in the geometric part in
+ * Element tangents into `stiffness` (144 per element; null leaves them out) and internal forces into `force`, both
+ * overwritten. `u` null: the linear stiffness at rest. `mixed`: four stresses per Gauss point to take in the geometric part in
  * place of the law's own (see mixed-stress.ts).
  */
 export function assemble(
   kernel: Kernel,
   u: Float64Array | null,
   mixed: Float64Array | null,
-  stiffness: Float64Array,
+  stiffness: Float64Array | null,
   force: Float64Array,
 ): void {
   const { mesh, points, law, scratch } = kernel;
   const rows = strainRows(points.plane);
-  stiffness.fill(0);
+  stiffness?.fill(0);
   force.fill(0);
   for (let point = 0; point < POINTS_PER_ELEMENT * mesh.elementCount; point++) {
     const element = Math.floor(point / POINTS_PER_ELEMENT);
@@ -246,11 +246,13 @@ export function assemble(
     deform(kernel, point);
     fillRows(kernel, point);
     law.respond(scratch.strain, scratch.response);
+    if (u) addForce(kernel, point, rows, force);
+    if (!stiffness) continue;
+    const at = STIFFNESS_SIZE * element;
     fillProducts(kernel, rows, points.volume[point]!);
-    addMaterial(kernel, rows, stiffness, STIFFNESS_SIZE * element);
+    addMaterial(kernel, rows, stiffness, at);
     if (!u) continue;
-    addForce(kernel, point, rows, force);
     const stress = mixed ?? scratch.response.stress;
-    addGeometric(kernel, point, stress, mixed ? 4 * point : 0, stiffness, STIFFNESS_SIZE * element);
+    addGeometric(kernel, point, stress, mixed ? 4 * point : 0, stiffness, at);
   }
 }
