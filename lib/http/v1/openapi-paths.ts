@@ -118,7 +118,7 @@ export const PATHS: Readonly<Record<string, Readonly<Record<string, Operation>>>
       summary: 'Will the part hold? Figures, verdicts and curves',
       body: 'CheckRequest',
       answer: answers('The report', 'CheckResult'),
-      problems: WITH_BODY,
+      problems: [...WITH_BODY, 'unavailable'],
     },
   },
   '/api/v1/export': {

@@ -66,6 +66,10 @@ export const checkRequest = z.strictObject({
     error: 'material must be the id of a material, or an object with its id',
   }),
   use: use.optional(),
+  method: z.enum(['closed', 'fe', 'both'], 'method must be one of closed, fe, both').optional().meta({
+    description:
+      'What the verdict stands on. closed (default): the corrected formulas. both: finite elements on the outline where the part bends as a plane shape, else the formulas. fe: finite elements, not known where there are none.',
+  }),
 });
 
 const bodyName = z

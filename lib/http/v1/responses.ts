@@ -60,7 +60,34 @@ const allowable = z.strictObject({
   because: z.string(),
 });
 
+const computed = z.strictObject({
+  method: z.enum(['linear', 'non-linear']),
+  fellBack: z
+    .string()
+    .nullable()
+    .meta({ description: 'Why the answer is linear although large displacement was asked for' }),
+  strain: z.number().meta({ description: 'Peak strain as a fraction, without sign' }),
+  kind: z.enum(['tension', 'compression']),
+  body: z.string(),
+  place: z
+    .tuple([z.number(), z.number(), z.number()])
+    .meta({ description: 'Of the peak on the body at rest, mm' }),
+  force: known.meta({ description: 'N, or N mm for a moment; null where the modulus is not known' }),
+  formula: known.meta({ description: 'Peak strain of the corrected formula' }),
+  difference: known.meta({ description: 'Computed over formula, less 1' }),
+  likely: z.string().nullable().meta({ description: 'Likely reason of a difference over 0.1' }),
+  unstable: z.boolean().meta({ description: 'The part snaps through on the way' }),
+  errorEstimate: z.number().meta({ description: 'Of the peak, from the mesh, as a fraction of it' }),
+  elements: z.int(),
+  unknowns: z.int().meta({ description: 'Degrees of freedom' }),
+});
+
 export const checkResponse = z.strictObject({
+  method: z.enum(['closed', 'fe', 'both']),
+  computed: z
+    .union([computed, z.strictObject({ none: z.string() })])
+    .nullable()
+    .meta({ description: 'Finite elements on the outline, or why there are none; null where not asked for' }),
   verdict,
   governing: z.string().meta({ description: 'Id of the figure shown on the strain band' }),
   headline: z.array(z.string()),
