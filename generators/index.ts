@@ -3,6 +3,7 @@ import type { About, Family, Guide } from './contract';
 import { about as foldedHook } from './folded-hook/about';
 import { about as livingHinge } from './living-hinge/about';
 import { about as pegStrap } from './peg-strap/about';
+import { about as plugStopper } from './plug-stopper/about';
 import { about as rodClip } from './rod-clip/about';
 import { about as screwCap } from './screw-cap/about';
 import { about as torsionLatch } from './torsion-latch/about';
@@ -50,6 +51,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: foldedHook,
     load: () => import('./folded-hook').then((m) => m.default),
     loadGuide: () => import('./folded-hook/guide').then((m) => m.default),
+  },
+  {
+    about: plugStopper,
+    load: () => import('./plug-stopper').then((m) => m.default),
+    loadGuide: () => import('./plug-stopper/guide').then((m) => m.default),
   },
 ];
 
