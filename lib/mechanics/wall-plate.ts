@@ -52,7 +52,7 @@ const archingShare = ({ thickness, span }: Wall, width: number, poisson: number)
  * Turning of a thin plate, held along two edges, under the moment of an arm b wide and h thick with fillet R in its
  * middle, in 1/mm3 (x M / E is the angle). The moment, even over b, is split into cosine waves across the wall; the
  * even part bends the wall as a beam of span S - 2.05 h - 3.23 R.
- * Constants fitted to finite elements: tw/h 0.5 to 3, S/h 8 to 40, W/b 1 to 16; force within 2 %.
+ * Constants fitted to finite elements: tw/h 0.5 to 3, S/h 8 to 40, W/b 1 to 16; force within 3.2 %.
  */
 export function plateTurn(wall: Wall, section: RootSection): number {
   const { thickness: h, width: b, fillet, poisson } = section;
