@@ -102,7 +102,8 @@ export function remedyOf(subject: Subject, key: string, before: Report = checkOf
 /** Smallest relative change first. */
 export const byEase = (a: Remedy, b: Remedy): number => ease(a) - ease(b);
 
-const ease = ({ from, to }: Remedy): number => Math.abs(to - from) / Math.max(Math.abs(from), 1e-9);
+/** Change as a share of the present value. */
+export const ease = ({ from, to }: Remedy): number => Math.abs(to - from) / Math.max(Math.abs(from), 1e-9);
 
 /** Remedies over all dimensions that take part, the smallest relative change first. */
 export function remedies(subject: Subject, before: Report = checkOf(subject)): Remedy[] {

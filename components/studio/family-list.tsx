@@ -15,7 +15,7 @@ function FamilyLine({ about }: { about: About }) {
           </Link>
         </h3>
         <p className="mt-1">{about.summary}</p>
-        <p className="mt-1 text-muted text-sm">Bends by {about.bendsBy}</p>
+        <p className="mt-1 text-muted text-sm">Gives by {about.bendsBy}</p>
       </div>
       <p className="text-[0.95rem]">
         <b className="block font-semibold text-ok text-sm">Right when</b>
@@ -39,7 +39,7 @@ export function FamilyList({ families }: { families: readonly About[] }) {
       {kinds.map((kind) => (
         <section key={kind} aria-labelledby={kind} className="grid gap-3 lg:grid-cols-[11rem_1fr]">
           <div className="flex items-center gap-3 lg:flex-col lg:items-start lg:pt-4">
-            <KindGlyph kind={kind} />
+            <KindGlyph kind={kind} size={64} />
             <h2 id={kind} className="font-bold text-2xl">
               {KIND_NAME[kind]}
             </h2>

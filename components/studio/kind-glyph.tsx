@@ -2,10 +2,10 @@ import type { Kind } from '@/generators/contract';
 
 /** What stands still in ink, what gives in marker. */
 const GLYPH: Readonly<Record<Kind, { still: string; gives: string }>> = {
-  straps: { still: 'M6 40h9M33 40h9M6 40v-6M42 40v-6', gives: 'M15 40C15 14 33 14 33 40' },
-  clips: { still: 'M6 42h36M31 8h11v10H31', gives: 'M12 42C12 28 16 18 27 13l1 6h-6' },
+  straps: { still: 'M24 14a10 10 0 1 1-.01 0z', gives: 'M31 40A17 17 0 1 1 40 29L44 38' },
+  clips: { still: 'M5 44h38M5 24h10M28 24h15', gives: 'M20 41V9l9 8h-8' },
   caps: { still: 'M16 42V26M32 42V26M16 31l16-3M16 37l16-3', gives: 'M10 24V9h28v15' },
-  hinges: { still: 'M4 34h15v7H4zM29 34h15v7H29z', gives: 'M19 36c3-7 7-7 10 0' },
+  hinges: { still: 'M4 40L18 22M44 40L30 22', gives: 'M18 22c3-7 9-7 12 0' },
   mounts: { still: 'M8 8h32M8 42h32', gives: 'M16 8c8 8-8 12 0 17s-8 9 0 17M32 8c8 8-8 12 0 17s-8 9 0 17' },
   coupons: { still: 'M5 14h38v20H5z', gives: 'M12 24h.1M20 24h2M29 24h3.5M38 24h.5' },
 };

@@ -70,7 +70,9 @@ function causes(family: Family, entries: Entries, issues: readonly FieldIssue[])
     const spec = family.parameters.fields[field];
     return spec?.type !== 'number' ? !spec : !usable(spec, entries[field]);
   });
-  return own.length > 0 ? own : issues;
+  return own.length > 0
+    ? own.filter(({ field }, at) => own.findIndex((one) => one.field === field) === at)
+    : issues;
 }
 
 /** Puts the last valid number in place of a faulty one whose field is out of sight. */

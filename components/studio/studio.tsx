@@ -56,6 +56,7 @@ function Bench({ session, query }: { session: Session; query: string }) {
   const [stance, setStance] = useState<string | null>(null);
   const [picture, setPicture] = useState<ViewportState>({ status: 'loading' });
   const { restored, close, fresh } = useReopened(session, query);
+  const volume = picture.bodies?.reduce((sum, body) => sum + body.volume, 0) ?? null;
   useKeeping(session);
   useUndoKeys(session);
   return (
@@ -75,7 +76,7 @@ function Bench({ session, query }: { session: Session; query: string }) {
       {restored && <Restored onFresh={fresh} onKeep={close} />}
       <UnknownWords words={startOf(family, query).unknown} />
       <Faults />
-      <StrainBand />
+      <StrainBand volume={volume} />
       <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-4 lg:grid-cols-[minmax(0,1fr)_27rem]">
         <div className="grid min-w-0 gap-4 lg:sticky lg:top-[4.5rem]">
           <ViewPanel stance={stance} onStance={setStance} state={picture} onState={setPicture} />

@@ -8,12 +8,15 @@ export function Note({
   trigger,
   children,
   noteId,
+  beside = false,
   className,
   ...button
 }: Omit<ComponentProps<'button'>, 'popoverTarget'> & {
   trigger: ReactNode;
   children: ReactNode;
   noteId?: string;
+  /** to the left of its button rather than under it, where there is room */
+  beside?: boolean;
 }) {
   const made = useId();
   const id = noteId ?? made;
@@ -32,7 +35,7 @@ export function Note({
       <div
         id={id}
         popover="auto"
-        className={classNames('note', 'p-4 text-left font-normal text-sm')}
+        className={classNames('note p-4 text-left font-normal text-sm', beside && 'note-beside')}
         style={{ positionAnchor: anchor } as object}
       >
         {children}

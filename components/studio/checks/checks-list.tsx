@@ -26,7 +26,7 @@ function Aside({ figure }: { figure: Figure }) {
   return (
     <p className="text-muted text-xs tabular-nums">
       {parts.map((part) => (
-        <span key={String(part)} className="block">
+        <span key={String(part)} className="mr-3 sm:mr-0 sm:block">
           {part}
         </span>
       ))}
@@ -37,28 +37,29 @@ function Aside({ figure }: { figure: Figure }) {
 function Check({ figure }: { figure: Figure }) {
   const words = [figure.verdict && VERDICT_WORDS[figure.verdict], limitText(figure), marginWords(figure)];
   return (
-    <li className="grid grid-cols-[1.5rem_1fr] gap-x-3 gap-y-1 border-hair border-t py-3.5 sm:grid-cols-[1.5rem_1fr_auto] sm:gap-x-5">
-      <span className="pt-0.5">{figure.verdict && <VerdictIcon verdict={figure.verdict} size={22} />}</span>
-      <div>
-        <h3 className="font-semibold">{figure.label}</h3>
-        <div className="mt-0.5 max-w-prose text-muted text-sm">
-          {figure.because} <SourceNote source={figure.source} of={figure.label} />
-        </div>
-      </div>
-      <div className="col-start-2 sm:col-start-3 sm:w-44 sm:text-right">
-        <p className="font-bold font-heading text-2xl tabular-nums leading-tight tracking-tight">
-          {text(figure.value, figure)}
-        </p>
+    <li className="grid grid-cols-[1.5rem_1fr_auto] content-start gap-x-3 border-hair border-t py-3.5 sm:grid-cols-[1.5rem_1fr_11rem] sm:gap-x-5">
+      <span className="row-span-2 pt-0.5">
+        {figure.verdict && <VerdictIcon verdict={figure.verdict} size={22} />}
+      </span>
+      <h3 className="pt-0.5 font-semibold leading-snug">{figure.label}</h3>
+      <p className="text-right font-bold font-heading text-2xl tabular-nums leading-tight tracking-tight">
+        {text(figure.value, figure)}
+      </p>
+      <div className="col-span-2 col-start-2 text-sm leading-snug sm:col-span-1 sm:col-start-3 sm:row-start-2 sm:text-right">
         {figure.verdict && (
-          <p className="text-sm leading-snug">
+          <p>
             {words.filter(Boolean).map((word, at) => (
-              <span key={word} className={at === 0 ? 'block font-semibold' : 'block text-muted'}>
+              <span key={word} className={at === 0 ? 'font-semibold sm:block' : 'text-muted sm:block'}>
+                {at > 0 && <span className="sm:hidden">, </span>}
                 {word}
               </span>
             ))}
           </p>
         )}
         <Aside figure={figure} />
+      </div>
+      <div className="col-span-2 col-start-2 mt-0.5 max-w-prose text-muted text-sm sm:col-span-1 sm:row-start-2">
+        {figure.because} <SourceNote source={figure.source} of={figure.label} />
       </div>
     </li>
   );

@@ -36,6 +36,7 @@ export function EffectCell({
   governing: Figure;
   unit: Unit;
 }) {
+  if (effect === null) return <span className="text-right text-muted text-xs">not alone</span>;
   if (!effect) return <span />;
   if (effect.change === null || effect.change === 0) {
     const text = effect.change === null ? 'not known' : elsewhere(effect, report);

@@ -75,6 +75,7 @@ export function FieldRow({
           <label htmlFor={fieldId(name)}>{label}</label>
           <Note
             noteId={helpId(name)}
+            beside={layout !== 'stack'}
             aria-label={`About ${label}`}
             className="grid size-6 shrink-0 place-items-center rounded-full text-edge text-sm hover:bg-petrol-soft hover:text-ink"
             trigger="?"

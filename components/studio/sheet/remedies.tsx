@@ -4,7 +4,7 @@ import { useCallback, useMemo } from 'react';
 import { Button } from '@/components/ui/button';
 import { Sheet } from '@/components/ui/sheet';
 import type { NumberField } from '@/generators/parameters';
-import { byEase, type Remedy, remedyOf } from '@/generators/remedies';
+import { byEase, ease, type Remedy, remedyOf } from '@/generators/remedies';
 import { figureOf, numbersOf } from '@/generators/sensitivity';
 import { entryText } from '@/generators/url-state';
 import { formatQuantity, UNIT_SYMBOL } from '@/lib/units';
@@ -13,8 +13,11 @@ import { useIdleMap } from '../use-idle-map';
 
 const MOST = 6;
 
+/** Room so far off that it is another design is not told. */
+const FAR = 1;
+
 /** Null until they are worked out for the first time. */
-function useRemedies(): readonly Remedy[] | null {
+function useRemedies(over: boolean): readonly Remedy[] | null {
   const subject = useSubject();
   const keys = useMemo(() => numbersOf(subject), [subject]);
   const make = useCallback((key: string) => remedyOf(subject, key), [subject]);
@@ -23,6 +26,7 @@ function useRemedies(): readonly Remedy[] | null {
     found &&
     [...found.values()]
       .filter((one) => one !== null)
+      .filter((one) => over || ease(one) <= FAR)
       .sort(byEase)
       .slice(0, MOST)
   );
@@ -59,10 +63,10 @@ function RemedyLine({ remedy }: { remedy: Remedy }) {
 /** Dimensions that would just meet the limit, each alone, to apply with one press. */
 export function Remedies() {
   const report = useReading((reading) => reading.report);
-  const list = useRemedies();
   const verdict = figureOf(report, report.governing)?.verdict;
-  if (!list || !verdict || verdict === 'not-known') return null;
   const over = verdict === 'over-limit';
+  const list = useRemedies(over);
+  if (!list || !verdict || verdict === 'not-known') return null;
   return (
     <Sheet labelledBy="remedies" className="px-4 py-3 sm:px-5">
       <div className="flex flex-wrap items-baseline justify-between gap-x-4">
