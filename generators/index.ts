@@ -4,6 +4,7 @@ import { about as foldedHook } from './folded-hook/about';
 import { about as livingHinge } from './living-hinge/about';
 import { about as pegStrap } from './peg-strap/about';
 import { about as plugStopper } from './plug-stopper/about';
+import { about as pressLid } from './press-lid/about';
 import { about as rodClip } from './rod-clip/about';
 import { about as screwCap } from './screw-cap/about';
 import { about as torsionLatch } from './torsion-latch/about';
@@ -56,6 +57,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: plugStopper,
     load: () => import('./plug-stopper').then((m) => m.default),
     loadGuide: () => import('./plug-stopper/guide').then((m) => m.default),
+  },
+  {
+    about: pressLid,
+    load: () => import('./press-lid').then((m) => m.default),
+    loadGuide: () => import('./press-lid/guide').then((m) => m.default),
   },
 ];
 
