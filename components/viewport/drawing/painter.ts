@@ -22,6 +22,9 @@ export interface PaintedBody {
 const LIGHT: Vec3 = [-0.42, 0.65, 0.63];
 /** Shades are rounded so that neighbours of like colour become one path. */
 const SHADES = 28;
+const COLOURS = 40;
+/** Creases stand this much nearer, in mm, so that neighbouring faces do not paint over half of the line. */
+const CREASE_LIFT = 0.5;
 
 const round = (value: number): number => Math.round(value * 10) / 10;
 
@@ -84,12 +87,12 @@ function facesOf(
 
 /** Painted faces are shaded half as much, so that the colour can be read against the scale. */
 function fillOf(own: Rgb, strain: number, scaleEnd: number | null, lit: number): string {
-  const colour = scaleEnd === null ? own : strainColour(Math.round((24 * strain) / scaleEnd) / 24);
+  const colour = scaleEnd === null ? own : strainColour(Math.round((COLOURS * strain) / scaleEnd) / COLOURS);
   const light = scaleEnd === null ? lit : (1 + lit) / 2;
   return cssColour(colour.map((channel) => channel * light) as unknown as Rgb);
 }
 
-/** Creases beside a face that is seen, just in front of it; all of them where faces are not drawn. */
+/** Creases beside a face that is seen; all of them where faces are not drawn. */
 function creasesOf(
   { body }: Moved,
   pixels: readonly Pixel[],
@@ -106,7 +109,7 @@ function creasesOf(
         kind: 'crease' as const,
         path,
         fill: 'none',
-        depth: Math.max((a.depth + b.depth) / 2, ...seen) + 1e-4,
+        depth: Math.max((a.depth + b.depth) / 2, ...seen) + CREASE_LIFT,
       },
     ];
   });
