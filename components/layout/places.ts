@@ -7,4 +7,5 @@ export interface Place {
 export const PLACES: readonly Place[] = [
   { href: '/design', name: 'Design' },
   { href: '/materials', name: 'Materials' },
+  { href: '/guide', name: 'Guide' },
 ];
