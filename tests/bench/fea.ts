@@ -1,9 +1,12 @@
+import { bendingOf } from '@/generators/bend';
+import type { Family } from '@/generators/contract';
+import { FAMILIES } from '@/generators/index';
 import { assemble, newKernel } from '@/lib/fea/element/kernel';
 import { stVenant } from '@/lib/fea/element/law';
 import { meshArea, meshProfile } from '@/lib/fea/mesh/mesh';
 import { RECOMMENDED_MESH } from '@/lib/fea/mesh/options';
 import { smallestAngle } from '@/lib/fea/mesh/quality';
-import { profileArea } from '@/lib/fea/profile/profile';
+import { type Profile, profileArea } from '@/lib/fea/profile/profile';
 import { type Cantilever, cantileverModel } from '@/lib/fea/shapes/cantilever';
 import { openRingModel } from '@/lib/fea/shapes/open-ring';
 import { webModel } from '@/lib/fea/shapes/web';
@@ -13,7 +16,10 @@ import { systemOf } from '@/lib/fea/solve/system';
 import { factorise } from '@/lib/fea/solver/factor';
 import { structureOf } from '@/lib/fea/solver/structure';
 import { substitute } from '@/lib/fea/solver/substitute';
+import { DEFAULT_USE } from '@/lib/materials/types';
+import { toughPlastic } from '../support/materials';
 import { RANDOM_SHAPES, randomModels } from '../support/random-shapes';
+import { randomValues } from '../support/random-values';
 import { bandedMatrix, bandedOrder, factorBanded, solveBanded } from './fea-banded';
 
 const PLASTIC = { modulus: 1500, poisson: 0.35, layers: null };
@@ -134,22 +140,41 @@ function memory(): void {
 
 const FUZZ = 10_000;
 
-function fuzz(): void {
-  for (const shape of Object.keys(RANDOM_SHAPES)) {
-    let [failed, thinnest, areaError] = [0, 180, 0];
-    for (const { profile } of randomModels(shape, FUZZ)) {
-      const meshed = meshProfile(profile, RECOMMENDED_MESH);
-      if (!meshed.ok) {
-        failed++;
-        continue;
-      }
-      thinnest = Math.min(thinnest, (smallestAngle(meshed.mesh) * 180) / Math.PI);
-      areaError = Math.max(areaError, Math.abs(meshArea(meshed.mesh) / profileArea(profile) - 1));
+/** Meshes every profile and prints the worst of them. */
+function fuzz(name: string, profiles: Iterable<Profile>): void {
+  let [made, failed, thinnest, areaError] = [0, 0, 180, 0];
+  for (const profile of profiles) {
+    made++;
+    const meshed = meshProfile(profile, RECOMMENDED_MESH);
+    if (!meshed.ok) {
+      failed++;
+      continue;
     }
-    console.log(
-      `  ${FUZZ} random ${shape} profiles: ${failed} without a mesh, smallest angle ${thinnest.toFixed(1)}°, ` +
-        `area within ${areaError.toExponential(1)}`,
-    );
+    thinnest = Math.min(thinnest, (smallestAngle(meshed.mesh) * 180) / Math.PI);
+    areaError = Math.max(areaError, Math.abs(meshArea(meshed.mesh) / profileArea(profile) - 1));
+  }
+  console.log(
+    `  ${made} random profiles of ${name}: ${failed} without a mesh, smallest angle ${thinnest.toFixed(1)}°, ` +
+      `area within ${areaError.toExponential(1)}`,
+  );
+}
+
+function* shapes(name: string): Generator<Profile> {
+  for (const { profile } of randomModels(name, FUZZ)) yield profile;
+}
+
+function* parts(family: Family): Generator<Profile> {
+  for (const values of randomValues(family, FUZZ)) {
+    const plane = bendingOf(family, values, toughPlastic, DEFAULT_USE);
+    if (!('none' in plane)) yield plane.model.profile;
+  }
+}
+
+async function fuzzAll(): Promise<void> {
+  for (const name of Object.keys(RANDOM_SHAPES)) fuzz(`the shape ${name}`, shapes(name));
+  for (const { load } of FAMILIES) {
+    const family = await load();
+    if (family.bending) fuzz(family.about.name.toLowerCase(), parts(family));
   }
 }
 
@@ -158,4 +183,4 @@ timeModels();
 compareSolvers();
 jitter();
 memory();
-fuzz();
+void fuzzAll();
