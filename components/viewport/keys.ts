@@ -22,6 +22,7 @@ const ACTS: Readonly<Record<string, Act>> = {
 };
 
 export function viewKey(event: KeyboardEvent, commands: ViewCommands | null): void {
+  if (event.key === 'Escape') (event.currentTarget as HTMLElement).blur();
   if (!commands || event.ctrlKey || event.metaKey || event.altKey) return;
   const act = ACTS[event.key];
   if (!act) return;

@@ -19,6 +19,7 @@ import type { PictureProps } from '../scene-props';
 
 const DEGREES = 180 / Math.PI;
 const CLOSEST = 400;
+const TOUCHES = { ONE: TOUCH.ROTATE, TWO: TOUCH.DOLLY_ROTATE };
 /** Shares of the picture beyond which the part is fitted anew while it is changed or moved. */
 const TOO_LARGE = 0.98;
 const TOO_SMALL = 0.42;
@@ -28,6 +29,20 @@ function directionOf(controls: Controls): Direction {
     turn: controls.getAzimuthalAngle() * DEGREES,
     rise: 90 - controls.getPolarAngle() * DEGREES,
   };
+}
+
+/**
+ * The page scrolls over the picture: up and down with one finger, and by the wheel unless the picture has the focus
+ * or Ctrl is held. Sideways one finger turns the part, two fingers turn and zoom.
+ */
+function leaveScrolling(canvas: HTMLElement, controls: Controls): () => void {
+  canvas.style.touchAction = 'pan-y';
+  const stage = canvas.closest<HTMLElement>('[data-viewport]')!;
+  const gate = (event: WheelEvent) => {
+    controls.enableZoom = event.ctrlKey || stage.contains(document.activeElement);
+  };
+  stage.addEventListener('wheel', gate, { capture: true, passive: true });
+  return () => stage.removeEventListener('wheel', gate, { capture: true });
 }
 
 type RigProps = Pick<PictureProps, 'box' | 'now' | 'insets' | 'fitKey' | 'onCommands' | 'onFrame'>;
@@ -109,11 +124,7 @@ export function Rig({ box, now, insets, fitKey, onCommands, onFrame }: RigProps)
     return () => onCommands(null);
   }, [camera, frameAll, stand, onCommands]);
 
-  useEffect(() => {
-    const surface = element.parentElement!;
-    surface.style.touchAction = 'pan-y';
-    element.style.touchAction = 'pan-y';
-  }, [element]);
+  useEffect(() => leaveScrolling(element, controls.current!), [element]);
 
   useFrame(() => {
     camera.updateMatrixWorld();
@@ -132,10 +143,11 @@ export function Rig({ box, now, insets, fitKey, onCommands, onFrame }: RigProps)
     <OrbitControls
       ref={controls}
       makeDefault
+      domElement={element}
       enableDamping={false}
       minZoom={0.2}
       maxZoom={CLOSEST}
-      touches={{ ONE: TOUCH.ROTATE, TWO: TOUCH.DOLLY_ROTATE }}
+      touches={TOUCHES}
     />
   );
 }

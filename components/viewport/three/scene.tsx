@@ -23,6 +23,7 @@ export default function Scene(props: SceneProps) {
       orthographic
       flat
       frameloop="demand"
+      resize={{ scroll: false }}
       dpr={[1, 2]}
       gl={{ antialias: true, alpha: true }}
       camera={{ up: [0, 0, 1], position: [0, -100, 50] }}
