@@ -12,7 +12,8 @@ export interface Remedy {
   readonly figure: Figure;
 }
 
-type State = 'meets' | 'fails' | 'refused';
+/** `worse`: another figure is pushed over its limit. `refused`: the family does not take the value. */
+type State = 'meets' | 'fails' | 'worse' | 'refused';
 
 interface Trial {
   readonly value: number;
@@ -38,7 +39,7 @@ function tryValue(subject: Subject, before: Report, key: string, value: number):
   const figure = figureOf(report, before.governing);
   const was = overLimit(before);
   const worse = overLimit(report).some((id) => id !== before.governing && !was.includes(id));
-  return { value, state: worse ? 'refused' : stateOf(figure), figure };
+  return { value, state: worse ? 'worse' : stateOf(figure), figure };
 }
 
 interface Edge {
@@ -80,13 +81,13 @@ function search(subject: Subject, before: Report, key: string, direction: 1 | -1
   const present = stateOf(figureOf(before, before.governing));
   const { last, next } = edge((offset) => tryValue(subject, before, key, at(offset)), reach, present);
   if (present === 'fails') return next?.state === 'meets' ? next : undefined;
-  return next?.state === 'fails' ? last : undefined;
+  return next?.state === 'fails' || next?.state === 'worse' ? last : undefined;
 }
 
 /**
  * The value of one dimension at which the governing figure just meets its limit, all else as it is: the nearest such
- * value when the figure is over, the last one before it fails when there is room. On the field's step, on the safe
- * side, inside range and relations, and without pushing another figure over its limit. Null where there is none.
+ * value when the figure is over; when there is room, the last one before it or another figure fails. On the field's
+ * step, on the safe side, inside range and relations, no other figure pushed over its limit. Null where there is none.
  */
 export function remedyOf(subject: Subject, key: string, before: Report = checkOf(subject)): Remedy | null {
   if (!fieldApplies(subject.family.parameters, key, subject.values)) return null;

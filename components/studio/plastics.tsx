@@ -35,8 +35,8 @@ function useStandings(): readonly (readonly [string, Standing])[] {
     },
     [subject, materials],
   );
-  const found = useIdleMap(printed, make);
-  return [...(found ?? [])]
+  const answers = useIdleMap(printed, make);
+  return [...(answers?.found ?? [])]
     .filter((one): one is [string, Standing] => one[1] !== null)
     .sort(([, a], [, b]) => (a.share ?? Infinity) - (b.share ?? Infinity));
 }

@@ -21,15 +21,18 @@ function whenIdle(work: (left: Left) => void): () => void {
   return () => clearTimeout(handle);
 }
 
+interface Answers<T> {
+  readonly found: ReadonlyMap<string, T>;
+  /** false while the answers are still those of the former subject */
+  readonly current: boolean;
+}
+
 /**
  * Works out one answer per key while nothing else is to be done. Answers appear together; until then the former
- * ones stand. `make` must be stable for the same subject.
+ * ones stand, null at first. `make` must be stable for the same subject.
  */
-export function useIdleMap<T>(
-  keys: readonly string[],
-  make: (key: string) => T,
-): ReadonlyMap<string, T> | null {
-  const [answers, setAnswers] = useState<ReadonlyMap<string, T> | null>(null);
+export function useIdleMap<T>(keys: readonly string[], make: (key: string) => T): Answers<T> | null {
+  const [answers, setAnswers] = useState<{ found: ReadonlyMap<string, T>; of: typeof make } | null>(null);
   useEffect(() => {
     const found = new Map<string, T>();
     const rest = [...keys];
@@ -38,11 +41,11 @@ export function useIdleMap<T>(
         const key = rest.shift();
         if (key !== undefined) found.set(key, make(key));
       } while (rest.length > 0 && left() > 0);
-      if (rest.length === 0) setAnswers(found);
+      if (rest.length === 0) setAnswers({ found, of: make });
       else cancel = whenIdle(next);
     };
     let cancel = whenIdle(next);
     return () => cancel();
   }, [keys, make]);
-  return answers;
+  return answers && { found: answers.found, current: answers.of === make };
 }

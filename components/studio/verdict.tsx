@@ -1,5 +1,6 @@
 import { classNames } from '@/components/ui/class-names';
 import { type Figure, VERDICT_WORDS, type Verdict } from '@/generators/report';
+import { significant } from '@/lib/units';
 
 const INK: Readonly<Record<Verdict, string>> = {
   'within-limit': 'text-ok',
@@ -77,6 +78,7 @@ export function marginWords({ value, limit, limitKind }: Figure): string | undef
   const margin = limitKind === 'max' ? (limit - value) / limit : (value - limit) / limit;
   const percent = Math.abs(margin) * 100;
   const amount = percent < 1 ? 'under 1 %' : `${Math.round(percent)} %`;
+  if (limitKind === 'min' && value >= 3 * limit) return `${significant(value / limit, 2)} times as much`;
   if (margin >= 0) return `${amount} to spare`;
   return limitKind === 'max' && value >= 2 * limit
     ? `${(value / limit).toFixed(1)} times the limit`

@@ -8,15 +8,15 @@ export function Note({
   trigger,
   children,
   noteId,
-  beside = false,
+  beside,
   className,
   ...button
 }: Omit<ComponentProps<'button'>, 'popoverTarget'> & {
   trigger: ReactNode;
   children: ReactNode;
   noteId?: string;
-  /** to the left of its button rather than under it, where there is room */
-  beside?: boolean;
+  /** anchor of a wider element the note stands to the left of, where there is room; else it stands under its button */
+  beside?: string | undefined;
 }) {
   const made = useId();
   const id = noteId ?? made;
@@ -35,8 +35,11 @@ export function Note({
       <div
         id={id}
         popover="auto"
-        className={classNames('note p-4 text-left font-normal text-sm', beside && 'note-beside')}
-        style={{ positionAnchor: anchor } as object}
+        className={classNames(
+          'note p-4 text-left font-normal text-sm',
+          beside !== undefined && 'note-beside',
+        )}
+        style={{ positionAnchor: beside ?? anchor } as object}
       >
         {children}
       </div>

@@ -38,11 +38,11 @@ function Check({ figure }: { figure: Figure }) {
   const words = [figure.verdict && VERDICT_WORDS[figure.verdict], limitText(figure), marginWords(figure)];
   return (
     <li className="grid grid-cols-[1.5rem_1fr_auto] content-start gap-x-3 border-hair border-t py-3.5 sm:grid-cols-[1.5rem_1fr_11rem] sm:gap-x-5">
-      <span className="row-span-2 pt-0.5">
+      <span className="col-start-1 row-span-2 row-start-1 pt-0.5">
         {figure.verdict && <VerdictIcon verdict={figure.verdict} size={22} />}
       </span>
-      <h3 className="pt-0.5 font-semibold leading-snug">{figure.label}</h3>
-      <p className="text-right font-bold font-heading text-2xl tabular-nums leading-tight tracking-tight">
+      <h3 className="col-start-2 row-start-1 pt-0.5 font-semibold leading-snug">{figure.label}</h3>
+      <p className="col-start-3 row-start-1 text-right font-bold font-heading text-2xl tabular-nums leading-tight tracking-tight">
         {text(figure.value, figure)}
       </p>
       <div className="col-span-2 col-start-2 text-sm leading-snug sm:col-span-1 sm:col-start-3 sm:row-start-2 sm:text-right">

@@ -49,7 +49,7 @@ function Row({
   if (field.type === 'toggle') return <ToggleRow name={name} field={field} />;
   const governing = figureOf(report, report.governing);
   const effect = governing && (
-    <EffectCell effect={effects?.get(name)} report={report} governing={governing} unit={field.unit} />
+    <EffectCell effect={effects?.found.get(name)} report={report} governing={governing} unit={field.unit} />
   );
   return <NumberRow name={name} field={field} valid={Number(valid)} effect={effect ?? <span />} />;
 }

@@ -11,7 +11,7 @@ export function changeText(change: number, value: number | null, unit: Unit): st
   const figure = Math.max(Math.abs(shown(value ?? change, unit)), 1e-3);
   const decimals = Math.min(4, Math.max(0, 2 - Math.floor(Math.log10(figure))));
   const least = 10 ** -decimals;
-  return size < least / 2 ? `under ${least.toFixed(decimals)}` : signed(size.toFixed(decimals), change < 0);
+  return size < least / 2 ? `<${least.toFixed(decimals)}` : signed(size.toFixed(decimals), change < 0);
 }
 
 const FORCES: readonly Unit[] = ['N', 'N/mm'];

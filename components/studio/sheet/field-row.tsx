@@ -7,6 +7,7 @@ import { useSession } from '../session-context';
 import { VerdictIcon } from '../verdict';
 
 export const fieldId = (key: string): string => `field-${key}`;
+const rowAnchor = (key: string): string => `--row-${key}`;
 const helpId = (key: string): string => `help-${key}`;
 const errorId = (key: string): string => `error-${key}`;
 
@@ -61,6 +62,7 @@ export function FieldRow({
         'border-transparent focus-within:border-marker focus-within:bg-tint',
         ROW[layout],
       )}
+      style={{ anchorName: rowAnchor(name) } as object}
       onFocus={() => focused.setState({ field: name })}
       onBlur={() => focused.setState({ field: null })}
       onKeyDown={(event) => askHelp(event, name)}
@@ -75,7 +77,7 @@ export function FieldRow({
           <label htmlFor={fieldId(name)}>{label}</label>
           <Note
             noteId={helpId(name)}
-            beside={layout !== 'stack'}
+            beside={layout === 'stack' ? undefined : rowAnchor(name)}
             aria-label={`About ${label}`}
             className="grid size-6 shrink-0 place-items-center rounded-full text-edge text-sm hover:bg-petrol-soft hover:text-ink"
             trigger="?"

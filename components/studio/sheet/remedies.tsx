@@ -2,6 +2,7 @@
 
 import { useCallback, useMemo } from 'react';
 import { Button } from '@/components/ui/button';
+import { classNames } from '@/components/ui/class-names';
 import { Sheet } from '@/components/ui/sheet';
 import type { NumberField } from '@/generators/parameters';
 import { byEase, ease, type Remedy, remedyOf } from '@/generators/remedies';
@@ -16,20 +17,24 @@ const MOST = 6;
 /** Room so far off that it is another design is not told. */
 const FAR = 1;
 
-/** Null until they are worked out for the first time. */
-function useRemedies(over: boolean): readonly Remedy[] | null {
+interface Found {
+  readonly list: readonly Remedy[];
+  readonly current: boolean;
+}
+
+/** Null until there are some of this kind; `current` is false while those of the part as it stands are worked out. */
+function useRemedies(over: boolean): Found | null {
   const subject = useSubject();
   const keys = useMemo(() => numbersOf(subject), [subject]);
-  const make = useCallback((key: string) => remedyOf(subject, key), [subject]);
-  const found = useIdleMap(keys, make);
-  return (
-    found &&
-    [...found.values()]
-      .filter((one) => one !== null)
-      .filter((one) => over || ease(one) <= FAR)
-      .sort(byEase)
-      .slice(0, MOST)
-  );
+  const make = useCallback((key: string) => ({ over, remedy: remedyOf(subject, key) }), [subject, over]);
+  const answers = useIdleMap(keys, make);
+  const all = [...(answers?.found.values() ?? [])];
+  if (!answers || all.some((one) => one.over !== over)) return null;
+  const list = all
+    .flatMap(({ remedy }) => remedy ?? [])
+    .filter((remedy) => over || ease(remedy) <= FAR)
+    .sort(byEase);
+  return { list: list.slice(0, MOST), current: answers.current };
 }
 
 function RemedyLine({ remedy }: { remedy: Remedy }) {
@@ -60,34 +65,47 @@ function RemedyLine({ remedy }: { remedy: Remedy }) {
   );
 }
 
+function RemedyList({ list, over }: { list: readonly Remedy[]; over: boolean }) {
+  if (list.length === 0) {
+    return (
+      <p className="text-muted text-sm">
+        {over
+          ? 'No single dimension within its range brings it under the limit. Try another plastic, or change two together.'
+          : 'No single dimension near its present value reaches the limit.'}
+      </p>
+    );
+  }
+  return (
+    <ul className="grid gap-x-10 xl:grid-cols-2">
+      {list.map((remedy) => (
+        <RemedyLine key={remedy.field} remedy={remedy} />
+      ))}
+    </ul>
+  );
+}
+
 /** Dimensions that would just meet the limit, each alone, to apply with one press. */
 export function Remedies() {
   const report = useReading((reading) => reading.report);
   const verdict = figureOf(report, report.governing)?.verdict;
   const over = verdict === 'over-limit';
-  const list = useRemedies(over);
-  if (!list || !verdict || verdict === 'not-known') return null;
+  const found = useRemedies(over);
+  if (!verdict || verdict === 'not-known') return null;
   return (
     <Sheet labelledBy="remedies" className="px-4 py-3 sm:px-5">
       <div className="flex flex-wrap items-baseline justify-between gap-x-4">
         <h2 id="remedies" className="font-bold text-petrol">
           {over ? 'To make it gentler' : 'Room before the limit'}
         </h2>
-        <span className="text-muted text-xs">each alone would just meet the limit</span>
+        <span className="text-muted text-xs">
+          {over ? 'each alone would just meet the limit' : 'each alone, as far as the limits allow'}
+        </span>
       </div>
-      {list.length > 0 ? (
-        <ul className="mt-1 grid gap-x-10 xl:grid-cols-2">
-          {list.map((remedy) => (
-            <RemedyLine key={remedy.field} remedy={remedy} />
-          ))}
-        </ul>
-      ) : (
-        <p className="mt-1 text-muted text-sm">
-          {over
-            ? 'No single dimension within its range brings it under the limit. Try another plastic, or change two together.'
-            : 'No single dimension within its range reaches the limit.'}
-        </p>
-      )}
+      <div
+        className={classNames('mt-1 min-h-20 transition-opacity', !found?.current && 'opacity-50 delay-150')}
+      >
+        {found && <RemedyList list={found.list} over={over} />}
+      </div>
     </Sheet>
   );
 }

@@ -20,6 +20,7 @@ describe('the margin of a figure', () => {
     [figure(45, 18), '2.5 times the limit'],
     [figure(30, 20, 'min'), '50 % to spare'],
     [figure(15, 20, 'min'), '25 % too little'],
+    [figure(4730, 149, 'min'), '32 times as much'],
     [figure(null, 18), undefined],
     [figure(12, null), undefined],
   ])('case %#: is told in words', (one, words) => {
@@ -35,7 +36,7 @@ describe('the effect of a dimension', () => {
   });
 
   it('is never nought where something moves', () => {
-    expect(changeText(0.0000001, 0.012, 'strain')).toBe('under 0.01');
+    expect(changeText(0.0000001, 0.012, 'strain')).toBe('<0.01');
   });
 });
 

@@ -61,6 +61,12 @@ describe('the room of a part within its limit', () => {
     expect(remedyOf(within, 'undercut')).toMatchObject({ to: 3.5 });
   });
 
+  it('ends before another figure goes over its limit', () => {
+    // no arm in the range is too short for so small an undercut; the case ends at 40 mm
+    const calm = subject({ armLength: 30, undercut: 0.2, thickness: 2 });
+    expect(remedyOf(calm, 'armLength')).toMatchObject({ from: 30, to: 40 });
+  });
+
   it('is not told where the field ends before the limit does', () => {
     expect(remedyOf(subject({ armLength: 40, undercut: 0.2 }), 'undercut')).toBeNull();
   });
