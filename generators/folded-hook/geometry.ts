@@ -1,4 +1,5 @@
 import type { Kernel, Loop, NamedSolid, Vec2 } from '@/lib/geometry/kernel';
+import { loopArea } from '@/lib/geometry/loops';
 import { arcPoints } from '@/lib/geometry/outline';
 import { compose, rotation, translation } from '@/lib/geometry/placement';
 import { catchLength, leadRun, meanBend, returnRun, type Values } from './schema';
@@ -123,17 +124,11 @@ export function build(p: Values, kernel: Kernel): NamedSolid[] {
   return hasReceiver(p) ? [hook, strip(p, kernel)] : [hook];
 }
 
-const areaOf = (loop: Loop): number =>
-  loop.reduce((sum, [x, y], i) => {
-    const [nx, ny] = loop[(i + 1) % loop.length]!;
-    return sum + (x * ny - nx * y) / 2;
-  }, 0);
-
 /** Volume of the faceted bodies, mm3. */
 export function volumes(p: Values, segmentsPerTurn: number): Readonly<Record<string, number>> {
   const sunk = SUNK * (p.thickness + 2 * p.rootFillet);
   const base = p.baseLength * p.baseWidth * p.baseThickness;
-  const hook = (areaOf(outline(p, segmentsPerTurn)) - sunk) * p.armWidth + base;
+  const hook = (loopArea(outline(p, segmentsPerTurn)) - sunk) * p.armWidth + base;
   if (!hasReceiver(p)) return { hook };
   return { hook, receiver: STRIP_DEPTH * (p.armWidth + 4) * stripThickness(p) };
 }

@@ -1,4 +1,5 @@
 import type { Kernel, Loop, NamedSolid, Vec2 } from '@/lib/geometry/kernel';
+import { loopArea } from '@/lib/geometry/loops';
 import { compose, rotation, translation } from '@/lib/geometry/placement';
 import { reliefFillet } from '@/lib/mechanics/web';
 import type { Values } from './schema';
@@ -72,16 +73,9 @@ export function build(p: Values, kernel: Kernel): NamedSolid[] {
   return [{ name: 'hinge', solid: kernel.subtract(flat, bores) }];
 }
 
-function area(loop: Loop): number {
-  return loop.reduce((sum, [x, y], i) => {
-    const [nx, ny] = loop[(i + 1) % loop.length]!;
-    return sum + (x * ny - nx * y) / 2;
-  }, 0);
-}
-
 /** Volume of the faceted body, mm3. */
 export function volumes(p: Values, segmentsPerTurn: number): Readonly<Record<string, number>> {
   const r = boreRadius(p.holeDiameter, segmentsPerTurn);
   const hole = (segmentsPerTurn / 2) * r * r * Math.sin((2 * Math.PI) / segmentsPerTurn) * p.leafThickness;
-  return { hinge: area(section(p, segmentsPerTurn)) * p.leafWidth - 2 * p.holeCount * hole };
+  return { hinge: loopArea(section(p, segmentsPerTurn)) * p.leafWidth - 2 * p.holeCount * hole };
 }

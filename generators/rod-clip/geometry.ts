@@ -1,4 +1,5 @@
 import type { Kernel, Loop, NamedSolid, Vec2 } from '@/lib/geometry/kernel';
+import { loopArea } from '@/lib/geometry/loops';
 import { arcPoints, boreRadius, inscribedArea, mirrored, withoutRepeats } from '@/lib/geometry/outline';
 import { compose, rotation, translation } from '@/lib/geometry/placement';
 import { radians } from '@/lib/units';
@@ -95,12 +96,6 @@ export function build(p: Values, kernel: Kernel): NamedSolid[] {
   return [{ name: 'clip', solid: kernel.subtract(upright, cutters(p, kernel)) }];
 }
 
-const areaOf = (loop: Loop): number =>
-  loop.reduce((sum, [x, y], i) => {
-    const [nx, ny] = loop[(i + 1) % loop.length]!;
-    return sum + (x * ny - nx * y) / 2;
-  }, 0);
-
 /** Volume of the faceted body, mm3. */
 export function volumes(p: Values, segmentsPerTurn: number): Readonly<Record<string, number>> {
   const hole =
@@ -109,5 +104,5 @@ export function volumes(p: Values, segmentsPerTurn: number): Readonly<Record<str
       : p.fastening === 'strap'
         ? p.slotWidth * p.slotLength
         : 0;
-  return { clip: areaOf(section(p, segmentsPerTurn)) * p.clipWidth - 2 * hole * p.footThickness };
+  return { clip: loopArea(section(p, segmentsPerTurn)) * p.clipWidth - 2 * hole * p.footThickness };
 }

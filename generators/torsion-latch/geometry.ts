@@ -1,4 +1,5 @@
 import type { Kernel, Loop, NamedSolid, Solid, Vec2 } from '@/lib/geometry/kernel';
+import { loopArea } from '@/lib/geometry/loops';
 import { inscribedArea, roundedPolygon } from '@/lib/geometry/outline';
 import { compose, rotation, translation } from '@/lib/geometry/placement';
 import { radians } from '@/lib/units';
@@ -91,19 +92,13 @@ export function build(p: Values, kernel: Kernel): NamedSolid[] {
   return [{ name: 'latch', solid: kernel.union([rocker, frame, ...bars(p, kernel)]) }];
 }
 
-const areaOf = (loop: Loop): number =>
-  loop.reduce((sum, [x, y], i) => {
-    const [nx, ny] = loop[(i + 1) % loop.length]!;
-    return sum + (x * ny - nx * y) / 2;
-  }, 0);
-
 /** Volume of the faceted body, mm3. */
 export function volumes(p: Values, segmentsPerTurn: number): Readonly<Record<string, number>> {
   const sunk = 2 * SUNK * (p.barWidth + 2 * p.barFillet);
   const bar =
     p.barShape === 'round'
       ? inscribedArea(p.barDiameter / 2, segmentsPerTurn) * p.barLength
-      : (areaOf(barPlan(p, segmentsPerTurn === 96 ? 16 : 8)) - sunk) * p.barThickness;
-  const rocker = areaOf(rockerSide(p)) * p.rockerWidth;
-  return { latch: rocker + areaOf(framePlan(p)) * p.panelThickness + 2 * bar };
+      : (loopArea(barPlan(p, segmentsPerTurn === 96 ? 16 : 8)) - sunk) * p.barThickness;
+  const rocker = loopArea(rockerSide(p)) * p.rockerWidth;
+  return { latch: rocker + loopArea(framePlan(p)) * p.panelThickness + 2 * bar };
 }
