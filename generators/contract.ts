@@ -51,7 +51,10 @@ export interface Callout {
   readonly unit: Unit;
 }
 
-/** A way to lay the part on the bed. The host drops each body to z = 0 and spaces bodies apart. */
+/**
+ * A way to lay the part on the bed. The host drops each body to z = 0 and spaces bodies apart; bodies printed inside
+ * one another, as a hinge on its pin, keep their places and are dropped as one.
+ */
 export interface Stance {
   readonly id: string;
   readonly label: string;
@@ -60,6 +63,8 @@ export interface Stance {
   readonly layers: LayerDirection;
   /** rotation for a body; bodies not named keep the orientation they are built in */
   readonly orient: Readonly<Record<string, Placement>>;
+  /** rotation of the whole part, for bodies that are printed as they are assembled; `orient` is not read then */
+  readonly together?: Placement;
 }
 
 /** Points of one body moved to a moment of the motion, and the strain there. */

@@ -12,7 +12,8 @@ interface Oriented {
   readonly bounds: Bounds;
 }
 
-const orientOf = (stance: Stance, name: string): Placement => stance.orient[name] ?? IDENTITY;
+const orientOf = (stance: Stance, name: string): Placement =>
+  stance.together ?? stance.orient[name] ?? IDENTITY;
 
 /** Puts oriented bodies side by side along x with a gap, the row centred on the origin, each on z = 0. */
 function row(bodies: readonly Oriented[]): Placement[] {
@@ -26,6 +27,21 @@ function row(bodies: readonly Oriented[]): Placement[] {
   });
 }
 
+const least = (bodies: readonly Oriented[], at: number) =>
+  Math.min(...bodies.map(({ bounds }) => bounds[at]!));
+const most = (bodies: readonly Oriented[], at: number) =>
+  Math.max(...bodies.map(({ bounds }) => bounds[at]!));
+
+/** Moves oriented bodies as one: centred on the origin, the lowest of them on z = 0. */
+function asOne(bodies: readonly Oriented[]): Placement[] {
+  const middle = (at: number) => (least(bodies, at) + most(bodies, at + 3)) / 2;
+  const move = translation([-middle(0), -middle(1), -least(bodies, 2)]);
+  return bodies.map(({ orient }) => compose(move, orient));
+}
+
+const laid = (bodies: readonly Oriented[], { together }: Stance): Placement[] =>
+  together ? asOne(bodies) : row(bodies);
+
 /** Where each body lies on the bed in a stance, bodies in the order given. */
 export function bedPlacements(
   bodies: readonly BuiltBody[],
@@ -35,7 +51,7 @@ export function bedPlacements(
     const orient = orientOf(stance, name);
     return { orient, bounds: boundsOf(movePositions(orient, mesh.positions)) };
   });
-  const placements = row(oriented);
+  const placements = laid(oriented, stance);
   return Object.fromEntries(bodies.map((body, at) => [body.name, placements[at]!]));
 }
 
@@ -49,6 +65,6 @@ export function laySolidsOnBed(kernel: Kernel, solids: readonly NamedSolid[], st
     const orient = orientOf(stance, name);
     return { orient, bounds: kernel.bounds(kernel.place(solid, orient)) };
   });
-  const placements = row(oriented);
+  const placements = laid(oriented, stance);
   return solids.map(({ name, solid }, at) => ({ name, solid: kernel.place(solid, placements[at]!) }));
 }

@@ -37,6 +37,15 @@ describe('a part on the bed', () => {
     }
   });
 
+  it('keeps bodies printed in one another in their places, dropped and centred as one', () => {
+    const whole: Stance = { ...stance, together: rotation('x', Math.PI / 2) };
+    const bodies = host.build((kernel) => laySolidsOnBed(kernel, make(kernel), whole), QUALITY.preview);
+    expect(bodies[0]!.bounds).toEqual(near([-10, 22.75, 20, 10, 31.75, 24]));
+    expect(bodies[1]!.bounds).toEqual(near([-8, -31.75, 0, 2, -29.75, 30]));
+    const gap = (of: typeof bodies) => of[1]!.bounds[0] - of[0]!.bounds[0];
+    expect(gap(bodies)).toBeCloseTo(gap(host.build(make, QUALITY.preview)), 4);
+  });
+
   it('is centred when a body lies alone', () => {
     const [arm] = host.build(make, QUALITY.preview);
     const moved = boundsOf(movePositions(bedPlacement(arm!, stance), arm!.mesh.positions));
