@@ -1,6 +1,7 @@
 import { rotation } from '@/lib/geometry/placement';
+import { jointOf } from '@/lib/mechanics/screw-sizes';
 import type { Callout, Stance } from '../contract';
-import { jointOf, type Values } from './schema';
+import type { Values } from './schema';
 
 type Line = Pick<Callout, 'field' | 'from' | 'to' | 'offset' | 'value'>;
 

@@ -1,5 +1,5 @@
 import type { Guide } from '../contract';
-import * as source from './sources';
+import * as source from '../screw-sources';
 
 const guide: Guide = {
   purpose: [

@@ -1,9 +1,9 @@
 import type { Family } from '../contract';
+import { screwMotion } from '../screw-motion';
 import { about } from './about';
 import { callouts, stances } from './callouts';
 import { check } from './checks';
 import { build, volumes } from './geometry';
-import { motion } from './motion';
 import { presets } from './presets';
 import { parameters, type Values } from './schema';
 
@@ -14,7 +14,7 @@ const family: Family<Values> = {
   check,
   build,
   volumes,
-  motion,
+  motion: (values, material) => screwMotion(values, material, { neck: 'neck', cap: 'cap' }),
   callouts,
   stances,
 };

@@ -1,6 +1,6 @@
-import { capRidgeWidth } from '@/lib/mechanics/thread';
-import { type ThreadJoint, threadJoint } from '@/lib/mechanics/thread-joint';
+import { jointOf } from '@/lib/mechanics/screw-sizes';
 import { choice, count, defineParameters, length, number, type ValuesOf } from '../parameters';
+import { leastMm, mostMm, plugRelations, threadRelations } from '../screw-relations';
 
 const fields = {
   profile: choice({
@@ -193,65 +193,8 @@ const fields = {
 
 export type Values = ValuesOf<typeof fields>;
 
-const joints = new WeakMap<Values, ThreadJoint>();
-
-/** The joint of these values; relations, check and shape ask for it again and again, so it is kept with them. */
-export function jointOf(p: Values): ThreadJoint {
-  const known = joints.get(p);
-  if (known) return known;
-  const joint = threadJoint(p);
-  joints.set(p, joint);
-  return joint;
-}
-
-/** Inner diameter of the ring plug, mm; 0 where so little would be left open that it is made solid. */
-export function plugInner(p: Values): number {
-  const inner = p.bore + p.plugInterference - 2 * p.plugWall;
-  return inner < 1 ? 0 : inner;
-}
-
-/** 45 degree chamfers of a plug seal, mm: at the mouth of the bore, at the tip of the plug. */
-export function plugChamfers(p: Values): { readonly bore: number; readonly tip: number } {
-  const plugWall = (p.bore + p.plugInterference - plugInner(p)) / 2;
-  return {
-    bore: Math.min(jointOf(p).neckWall / 3, p.plugInterference / 2 + 0.2),
-    tip: Math.min(0.4, plugWall / 2),
-  };
-}
-
-/** Length over which a plug touches the bore, mm. */
-export function plugContact(p: Values): number {
-  const { bore, tip } = plugChamfers(p);
-  return Math.max(0, p.plugLength - bore - tip);
-}
-
-/** Radial overlap left between the threads, mm. */
-export const overlap = (p: Values): number => jointOf(p).thread.engagement - p.clearance;
-
-/** Longest plug that ends inside the skirt, mm. */
-const plugRoom = (p: Values): number => p.neckHeight - jointOf(p).capMouth - 0.2;
-
 const MIN_NECK_WALL = 1.2;
-const MIN_OVERLAP = 0.15;
-const MIN_CREST = 0.05;
-const MIN_GROOVE = 0.1;
 const MIN_TURNS = 0.5;
-
-/** Axial width of the cap ridge's crest, mm. */
-function crestWidth(p: Values): number {
-  const { thread, cap } = jointOf(p);
-  if (p.profile === 'knuckle') return thread.pitch / 4 - p.clearance;
-  return capRidgeWidth(thread, p.clearance, cap.minorDiameter / 2);
-}
-
-/** Axial width of a ridge of the neck at its root, mm. */
-function rootWidth(p: Values): number {
-  const { neckForm } = jointOf(p);
-  return neckForm.at(-1)![1] - neckForm[0]![1];
-}
-
-const mm = (value: number): string => `${(Math.ceil(value * 100 - 1e-6) / 100).toFixed(2)} mm`;
-const mmDown = (value: number): string => `${(Math.floor(value * 100 + 1e-6) / 100).toFixed(2)} mm`;
 
 export const parameters = defineParameters({
   fields,
@@ -262,37 +205,24 @@ export const parameters = defineParameters({
     plugWall: (p) => p.seal === 'plug',
   },
   relations: [
+    ...threadRelations<Values>((p) => p, {
+      pitch: 'pitch',
+      clearance: 'clearance',
+      halves: 'neck and cap',
+      cap: 'cap',
+    }),
+    ...plugRelations<Values>((p) => p, {
+      length: 'plugLength',
+      interference: 'plugInterference',
+      cap: 'cap',
+    }),
     {
       id: 'bore-in-core',
       field: 'bore',
       severity: 'refuse',
       holds: (p) => jointOf(p).neckWall >= MIN_NECK_WALL - 1e-9,
       message: (p) =>
-        `Bore must be at most ${mmDown(jointOf(p).thread.rootDiameter - 2 * MIN_NECK_WALL)}, which leaves ${MIN_NECK_WALL} mm of wall under the thread`,
-    },
-    {
-      id: 'ridge-in-pitch',
-      field: 'pitch',
-      severity: 'refuse',
-      holds: (p) => p.pitch >= rootWidth(p) + MIN_GROOVE - 1e-9,
-      message: (p) =>
-        `Pitch must be at least ${mm(rootWidth(p) + MIN_GROOVE)}, ${MIN_GROOVE} mm more than the root of the ridge, or its turns run together`,
-    },
-    {
-      id: 'threads-overlap',
-      field: 'clearance',
-      severity: 'refuse',
-      holds: (p) => overlap(p) >= MIN_OVERLAP - 1e-9,
-      message: (p) =>
-        `Clearance must be at most ${mmDown(jointOf(p).thread.engagement - MIN_OVERLAP)} for a pitch of ${p.pitch} mm, or neck and cap hardly touch`,
-    },
-    {
-      id: 'crest-left',
-      field: 'clearance',
-      severity: 'refuse',
-      holds: (p) => crestWidth(p) >= MIN_CREST - 1e-9,
-      message: (p) =>
-        `Clearance of ${p.clearance} mm leaves a crest of ${crestWidth(p).toFixed(2)} mm on the cap's thread; it needs at least ${MIN_CREST} mm`,
+        `Bore must be at most ${mostMm(jointOf(p).thread.rootDiameter - 2 * MIN_NECK_WALL)}, which leaves ${MIN_NECK_WALL} mm of wall under the thread`,
     },
     {
       id: 'thread-on-neck',
@@ -300,7 +230,7 @@ export const parameters = defineParameters({
       severity: 'refuse',
       holds: (p) => p.neckHeight >= jointOf(p).neckHeightNeeded - 1e-9,
       message: (p) =>
-        `Neck height must be at least ${mm(jointOf(p).neckHeightNeeded)} for ${p.turns} turns of lead ${p.pitch * p.starts} mm`,
+        `Neck height must be at least ${leastMm(jointOf(p).neckHeightNeeded)} for ${p.turns} turns of lead ${p.pitch * p.starts} mm`,
     },
     {
       id: 'cap-reaches-rim',
@@ -308,7 +238,7 @@ export const parameters = defineParameters({
       severity: 'refuse',
       holds: (p) => jointOf(p).capMouth >= 0.3 - 1e-9,
       message: (p) =>
-        `Cap height must be at most ${mmDown(jointOf(p).capTop - 0.3)}, or the mouth meets the flange before the top meets the rim`,
+        `Cap height must be at most ${mostMm(jointOf(p).capTop - 0.3)}, or the mouth meets the flange before the top meets the rim`,
     },
     {
       id: 'cap-has-thread',
@@ -317,23 +247,8 @@ export const parameters = defineParameters({
       holds: (p) => jointOf(p).engagedTurns >= MIN_TURNS - 1e-9,
       message: (p) => {
         const { capHeightNeeded, thread } = jointOf(p);
-        return `Cap height must be at least ${mm(capHeightNeeded - (p.turns - MIN_TURNS) * thread.lead)}, or its skirt carries less than half a turn of thread`;
+        return `Cap height must be at least ${leastMm(capHeightNeeded - (p.turns - MIN_TURNS) * thread.lead)}, or its skirt carries less than half a turn of thread`;
       },
-    },
-    {
-      id: 'plug-in-cap',
-      field: 'plugLength',
-      severity: 'refuse',
-      holds: (p) => p.seal !== 'plug' || p.plugLength <= plugRoom(p) + 1e-9,
-      message: (p) =>
-        `Plug length must be at most ${mmDown(plugRoom(p))}, so that it ends inside the skirt of the cap`,
-    },
-    {
-      id: 'plug-interference-small',
-      field: 'plugInterference',
-      severity: 'refuse',
-      holds: (p) => p.seal !== 'plug' || p.plugInterference <= 0.1 * p.bore,
-      message: (p) => `Plug interference must be at most ${mmDown(0.1 * p.bore)}, a tenth of the bore`,
     },
     {
       id: 'full-skirt',
@@ -341,14 +256,7 @@ export const parameters = defineParameters({
       severity: 'warn',
       holds: (p) => jointOf(p).capFrom <= 1e-9,
       message: (p) =>
-        `Cap height under ${mm(jointOf(p).capHeightNeeded)} cuts the cap's thread short of the neck's ${p.turns} turns`,
-    },
-    {
-      id: 'printable-pitch',
-      field: 'pitch',
-      severity: 'warn',
-      holds: (p) => p.pitch >= 1.5,
-      message: () => 'Pitch under 1.5 mm prints poorly with a 0.4 mm nozzle; 2 mm and more is safe',
+        `Cap height under ${leastMm(jointOf(p).capHeightNeeded)} cuts the cap's thread short of the neck's ${p.turns} turns`,
     },
   ],
 });

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import screwCap from '@/generators/screw-cap';
-import { jointOf, parameters, type Values } from '@/generators/screw-cap/schema';
+import { parameters, type Values } from '@/generators/screw-cap/schema';
+import { jointOf } from '@/lib/mechanics/screw-sizes';
 
 const INCH = 25.4;
 // SPI neck finish 28-400: thread diameter T, root diameter E, height H, thread start S, least bore I.

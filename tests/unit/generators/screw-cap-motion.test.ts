@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import screwCap from '@/generators/screw-cap';
-import { jointOf, parameters, type Values } from '@/generators/screw-cap/schema';
+import { parameters, type Values } from '@/generators/screw-cap/schema';
+import { jointOf } from '@/lib/mechanics/screw-sizes';
 import { toughPlastic } from '@/tests/support/materials';
 
 const values = (changed: Partial<Values> = {}): Values => ({ ...parameters.defaults, ...changed });

@@ -1,11 +1,12 @@
 import { describe, expect, it } from 'vitest';
 import { parseParameters } from '@/generators/parameters';
 import screwCap from '@/generators/screw-cap';
-import { jointOf, parameters, type Values } from '@/generators/screw-cap/schema';
+import { parameters, type Values } from '@/generators/screw-cap/schema';
 import { createKernelHost } from '@/lib/geometry/host';
 import { type Placement, QUALITY, type QualityName } from '@/lib/geometry/kernel';
 import { compose, rotation, translation } from '@/lib/geometry/placement';
 import { gripRise } from '@/lib/geometry/thread-bodies';
+import { jointOf } from '@/lib/mechanics/screw-sizes';
 import { checkFamilySolids } from '@/tests/support/solids';
 
 const values = (changed: Partial<Values> = {}): Values => {

@@ -3,9 +3,10 @@ import { parseParameters } from '@/generators/parameters';
 import type { Report } from '@/generators/report';
 import screwCap from '@/generators/screw-cap';
 import guide from '@/generators/screw-cap/guide';
-import { jointOf, parameters, plugContact, type Values } from '@/generators/screw-cap/schema';
+import { parameters, type Values } from '@/generators/screw-cap/schema';
 import { materialById } from '@/lib/materials/data';
 import { DEFAULT_USE } from '@/lib/materials/types';
+import { jointOf, plugContact } from '@/lib/mechanics/screw-sizes';
 import { linearPlastic, toughPlastic } from '@/tests/support/materials';
 
 const values = (changed: Partial<Values> = {}): Values => ({ ...parameters.defaults, ...changed });

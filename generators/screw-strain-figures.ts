@@ -1,9 +1,9 @@
 import { formatQuantity } from '@/lib/units';
-import { type Figure, judgedFigure, plainFigure } from '../report';
-import { type Context, MODULUS_MISSING } from './context';
-import * as source from './sources';
+import { type Figure, judgedFigure, plainFigure } from './report';
+import { MODULUS_MISSING, type ScrewContext } from './screw-context';
+import * as source from './screw-sources';
 
-function peakFigure({ mechanics, allowable }: Context): Figure {
+function peakFigure({ mechanics, allowable, words }: ScrewContext): Figure {
   const { plug, spread } = mechanics;
   const common = {
     id: 'peak-strain',
@@ -13,8 +13,7 @@ function peakFigure({ mechanics, allowable }: Context): Figure {
   } as const;
   const hoop = spread?.hoopStrain ?? null;
   if (plug && (hoop === null || plug.peak >= hoop)) {
-    const because =
-      'The plug in its bore: the interference shared by both rings, raised where the neck ends at its rim. Handbook: one part takes it all.';
+    const because = `The plug in its bore: the interference shared by both rings, raised where the ${words.neck} ends at its rim. Handbook: one part takes it all.`;
     return judgedFigure({
       ...common,
       value: plug.peak,
@@ -24,15 +23,15 @@ function peakFigure({ mechanics, allowable }: Context): Figure {
     });
   }
   if (hoop === null) return judgedFigure({ ...common, because: MODULUS_MISSING, source: source.SPREAD });
-  const because = 'Hoop strain of the cap wall: the flanks wedge it apart when a firm hand closes it.';
+  const because = `Hoop strain of the ${words.cap}'s wall: the flanks wedge it apart when a firm hand closes it.`;
   return judgedFigure({ ...common, value: hoop, because, source: source.SPREAD });
 }
 
-function sealFigure({ p, mechanics }: Context): Figure[] {
+function sealFigure({ p, mechanics, words }: ScrewContext): Figure[] {
   const { plug } = mechanics;
   if (!plug) return [];
   const { neck, plugInside } = plug.rings;
-  const because = `${p.plugInterference} mm over ${p.bore} mm: the neck stretches by ${formatQuantity(neck, 'strain')}, the plug gives by ${formatQuantity(Math.abs(plugInside), 'strain')} inside. A plug left in relaxes: it seals less after weeks.`;
+  const because = `${p.plugInterference} mm over ${p.bore} mm: the ${words.neck} stretches by ${formatQuantity(neck, 'strain')}, the plug gives by ${formatQuantity(Math.abs(plugInside), 'strain')} inside. A plug left in relaxes: it seals less after weeks.`;
   return [
     plainFigure({
       id: 'seal-strain',
@@ -46,22 +45,21 @@ function sealFigure({ p, mechanics }: Context): Figure[] {
   ];
 }
 
-function spreadFigure({ p, mechanics }: Context): Figure {
+function spreadFigure({ p, mechanics, words }: ScrewContext): Figure {
   const { spread, joint } = mechanics;
   const common = {
     id: 'cap-spread',
-    label: 'Growth of the cap, closed by a firm hand',
+    label: `Growth of the ${words.cap}, closed by a firm hand`,
     unit: 'mm',
     limit: (joint.thread.engagement - p.clearance) / 2,
     source: source.HALF_OVERLAP,
   } as const;
   if (!spread) return judgedFigure({ ...common, because: MODULUS_MISSING });
-  const because =
-    'On the radius. A cap that grows by its whole overlap jumps its thread without breaking; soft plastics do. Thicker wall, longer skirt.';
+  const because = `On the radius. A ${words.cap} that grows by its whole overlap jumps its thread without breaking; soft plastics do. Thicker wall, longer skirt.`;
   return judgedFigure({ ...common, value: spread.growth, because });
 }
 
-export function strainFigures(context: Context): Figure[] {
+export function screwStrainFigures(context: ScrewContext): Figure[] {
   const { allowable } = context;
   return [
     peakFigure(context),

@@ -1,3 +1,4 @@
+import { SEAT_PRESSURE, screwContact, seatLoad } from '@/lib/mechanics/screw-closure';
 import {
   lockingRatio,
   nutFactorTorque,
@@ -5,14 +6,13 @@ import {
   torquePerLoad,
 } from '@/lib/mechanics/thread-torque';
 import { formatQuantity } from '@/lib/units';
-import { type Figure, judgedFigure, plainFigure } from '../report';
-import { type Context, MODULUS_MISSING, strengthMissing } from './context';
-import { SEAT_PRESSURE, screwContact, seatLoad } from './mechanics';
-import * as source from './sources';
+import { type Figure, judgedFigure, plainFigure } from './report';
+import { MODULUS_MISSING, type ScrewContext, type Seat, strengthMissing } from './screw-context';
+import * as source from './screw-sources';
 
 const newton = (value: number): string => formatQuantity(value, 'N');
 
-function strengthFigures(context: Context): Figure[] {
+function strengthFigures(context: ScrewContext): Figure[] {
   const { stripping, neck, closing } = context.mechanics;
   const limit = closing?.load.value ?? null;
   const strip = {
@@ -25,7 +25,7 @@ function strengthFigures(context: Context): Figure[] {
   } as const;
   const part = {
     id: 'neck-load',
-    label: 'Load that parts the neck',
+    label: `Load that parts the ${context.words.neck}`,
     unit: 'N',
     limit,
     limitKind: 'min',
@@ -51,7 +51,7 @@ function strengthFigures(context: Context): Figure[] {
   ];
 }
 
-function loadFigure(context: Context): Figure {
+function loadFigure(context: ScrewContext): Figure {
   const { closing, stripping, neck } = context.mechanics;
   const common = {
     id: 'closing-load',
@@ -61,7 +61,10 @@ function loadFigure(context: Context): Figure {
     source: source.SCREW,
   } as const;
   if (!closing) return judgedFigure({ ...common, because: MODULUS_MISSING });
-  const weak = stripping && neck && neck.value < stripping.value ? 'the neck parts' : 'the thread strips';
+  const weak =
+    stripping && neck && neck.value < stripping.value
+      ? `the ${context.words.neck} parts`
+      : 'the thread strips';
   return judgedFigure({
     ...common,
     ...closing.load,
@@ -69,7 +72,7 @@ function loadFigure(context: Context): Figure {
   });
 }
 
-function handFigure({ p, mechanics }: Context): Figure {
+function handFigure({ p, mechanics }: ScrewContext): Figure {
   const { closing } = mechanics;
   const common = { id: 'hand-torque', label: 'Usual hand torque to close', unit: 'Nmm' } as const;
   if (!closing) {
@@ -83,8 +86,11 @@ function handFigure({ p, mechanics }: Context): Figure {
   return plainFigure({ ...common, value: (low + high) / 2, low, high, because, source: from });
 }
 
-function seatTorque({ p, material, mechanics }: Context): Partial<Figure> & { because: string } {
-  const load = seatLoad(mechanics.joint);
+function seatTorque(
+  { p, material, mechanics }: ScrewContext,
+  seat: Seat,
+): Partial<Figure> & { because: string } {
+  const load = seatLoad(seat);
   const torque = (friction: number) =>
     load * torquePerLoad(screwContact(mechanics.joint, friction), 'closing');
   const { low, value, high } = material.friction;
@@ -93,31 +99,30 @@ function seatTorque({ p, material, mechanics }: Context): Partial<Figure> & { be
     low: torque(low),
     high: torque(high),
     handbook: nutFactorTorque(PRINTED_NUT_FACTOR, load, p.majorDiameter),
-    because: `Beds the land with ${newton(load)}, ${SEAT_PRESSURE} MPa. Two hard printed faces seal only dust and drips: lay in a disc of TPU or rubber for liquids.`,
+    because: `Beds the ${seat.of} with ${newton(load)}, ${SEAT_PRESSURE} MPa. ${seat.advice}`,
   };
 }
 
-function closingFigure(context: Context): Figure {
-  const { p, mechanics } = context;
+function closingFigure(context: ScrewContext): Figure {
+  const { p, seat, mechanics, words } = context;
   const common = {
     id: 'closing-torque',
     label: 'Torque to close onto the seal',
     unit: 'Nmm',
     limit: mechanics.closing?.hand.high ?? null,
   } as const;
+  if (seat) return judgedFigure({ ...common, ...seatTorque(context, seat), source: source.SEAT });
   if (p.seal === 'none') {
-    const because = 'Without a seal there is nothing to bed: turn until the cap stops on the rim.';
+    const because = `Without a seal there is nothing to bed: turn until the ${words.cap} stops on the rim.`;
     return plainFigure({ ...common, limit: null, because, source: source.SCREW });
   }
-  if (p.seal === 'land') return judgedFigure({ ...common, ...seatTorque(context), source: source.SEAT });
   if (!mechanics.closing) return judgedFigure({ ...common, because: MODULUS_MISSING, source: source.PRESS });
   const { drag } = mechanics.closing;
-  const because =
-    'The plug rubs round in the bore. It must stay under what a firm hand gives, or the cap never comes home.';
+  const because = `The plug rubs round in the bore. It must stay under what a firm hand gives, or the ${words.cap} never comes home.`;
   return judgedFigure({ ...common, value: drag, because, source: source.PRESS });
 }
 
-function openingFigure({ material, mechanics }: Context): Figure {
+function openingFigure({ material, mechanics, words }: ScrewContext): Figure {
   const common = {
     id: 'opening-torque',
     label: 'Torque to open again',
@@ -130,12 +135,11 @@ function openingFigure({ material, mechanics }: Context): Figure {
   const contact = screwContact(joint, material.friction.value);
   const load = Math.max(0, shut - closing.drag) / torquePerLoad(contact, 'closing');
   const value = closing.drag + Math.max(0, load * torquePerLoad(contact, 'opening'));
-  const because =
-    'Just after closing with the middle of the hand range; a cap left closed creeps and then takes 40 to 60 % of what closed it.';
+  const because = `Just after closing with the middle of the hand range; a ${words.cap} left closed creeps and then takes 40 to 60 % of what closed it.`;
   return plainFigure({ ...common, value, handbook: shut / 2, low: 0.4 * shut, high: value, because });
 }
 
-function lockingFigure({ material, mechanics }: Context): Figure {
+function lockingFigure({ material, mechanics, words }: ScrewContext): Figure {
   const ratio = (friction: number) => lockingRatio(screwContact(mechanics.joint, friction));
   const { low, value, high } = material.friction;
   return judgedFigure({
@@ -148,13 +152,12 @@ function lockingFigure({ material, mechanics }: Context): Figure {
     high: ratio(high),
     limit: 1,
     limitKind: 'min',
-    because:
-      'Friction on the flanks over the slope of the lead, at the lowest friction of the band; under 1 the load turns the cap back. More starts mean less.',
+    because: `Friction on the flanks over the slope of the lead, at the lowest friction of the band; under 1 the load turns the ${words.cap} back. More starts mean less.`,
     source: source.SCREW,
   });
 }
 
-export const loadFigures = (context: Context): Figure[] => [
+export const screwLoadFigures = (context: ScrewContext): Figure[] => [
   loadFigure(context),
   ...strengthFigures(context),
   handFigure(context),

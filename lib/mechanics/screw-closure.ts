@@ -1,15 +1,9 @@
 import type { AllowableStrain } from '@/lib/materials/allowable';
 import { secantModulus } from '@/lib/materials/secant';
 import type { Material } from '@/lib/materials/types';
-import {
-  endFactor,
-  type PlugFit,
-  type PlugStrain,
-  plugDrag,
-  plugStrain,
-  rigidPlugStrain,
-} from '@/lib/mechanics/seal';
-import type { ThreadJoint } from '@/lib/mechanics/thread-joint';
+import { jointOf, plugContact, plugInner, type ScrewSizes } from './screw-sizes';
+import { endFactor, type PlugFit, type PlugStrain, plugDrag, plugStrain, rigidPlugStrain } from './seal';
+import type { ThreadJoint } from './thread-joint';
 import {
   axialStrength,
   capSpread,
@@ -17,7 +11,7 @@ import {
   strippingLoad,
   threadShare,
   threadShearStrength,
-} from '@/lib/mechanics/thread-strength';
+} from './thread-strength';
 import {
   handTorque,
   nutFactorTorque,
@@ -25,8 +19,7 @@ import {
   type ScrewContact,
   type TorqueRange,
   torquePerLoad,
-} from '@/lib/mechanics/thread-torque';
-import { jointOf, plugContact, plugInner, type Values } from './schema';
+} from './thread-torque';
 
 export interface Banded {
   readonly value: number;
@@ -50,7 +43,7 @@ export function screwContact(joint: ThreadJoint, friction: number): ScrewContact
   };
 }
 
-const plugFit = (p: Values, joint: ThreadJoint, material: Material): PlugFit => ({
+const plugFit = (p: ScrewSizes, joint: ThreadJoint, material: Material): PlugFit => ({
   bore: p.bore,
   neckOuter: joint.thread.rootDiameter,
   plugInner: plugInner(p),
@@ -70,7 +63,7 @@ export interface Plug {
 }
 
 /** Strains of a plug in its bore; null for other seals. */
-export function plugOf(p: Values, joint: ThreadJoint, material: Material): Plug | null {
+export function plugOf(p: ScrewSizes, joint: ThreadJoint, material: Material): Plug | null {
   if (p.seal !== 'plug') return null;
   const fit = plugFit(p, joint, material);
   const rings = plugStrain(fit);
@@ -102,7 +95,7 @@ export function stripping(joint: ThreadJoint, clearance: number, material: Mater
 }
 
 /** Load in N at which the neck parts between two layers; handbook: over the tensile stress area less the bore. */
-export function neckStrength(p: Values, joint: ThreadJoint, material: Material): Banded | null {
+export function neckStrength(p: ScrewSizes, joint: ThreadJoint, material: Material): Banded | null {
   const strength = axialStrength(material);
   if (!strength) return null;
   const { rootDiameter, pitchDiameter } = joint.thread;
@@ -126,7 +119,7 @@ export interface Closing {
 
 /** Torque in N mm a plug takes: friction round the bore, and the push along the lead it follows. Null: not known. */
 export function plugTorque(
-  p: Values,
+  p: ScrewSizes,
   joint: ThreadJoint,
   plug: Plug | null,
   friction: number,
@@ -140,7 +133,7 @@ export function plugTorque(
 
 /** What a hand does to the closed thread; null where the torque or the drag of the plug is not known. */
 export function closing(
-  p: Values,
+  p: ScrewSizes,
   joint: ThreadJoint,
   plug: Plug | null,
   material: Material,
@@ -157,12 +150,12 @@ export function closing(
   return { hand, drag, load: { value: loadAt(value), handbook, low: loadAt(high), high: loadAt(low) } };
 }
 
-/** Axial load in N that beds the land on the rim. */
-export const seatLoad = ({ land }: ThreadJoint): number =>
-  SEAT_PRESSURE * Math.PI * (land.outer ** 2 - land.inner ** 2);
+/** Axial load in N that beds a seal on a ring between two radii (mm). */
+export const seatLoad = (ring: { readonly inner: number; readonly outer: number }): number =>
+  SEAT_PRESSURE * Math.PI * (ring.outer ** 2 - ring.inner ** 2);
 
 /** Hoop strain and growth of the cap under the load of a firm hand; null when the modulus is not known. */
-export function spread(p: Values, joint: ThreadJoint, load: number, material: Material) {
+export function spread(p: ScrewSizes, joint: ThreadJoint, load: number, material: Material) {
   const initial = secantModulus(material, 0);
   if (!initial) return null;
   const given = {
@@ -176,7 +169,7 @@ export function spread(p: Values, joint: ThreadJoint, load: number, material: Ma
   return capSpread({ ...given, modulus: softened.value });
 }
 
-export interface CapMechanics {
+export interface ScrewMechanics {
   readonly joint: ThreadJoint;
   readonly plug: Plug | null;
   readonly stripping: Banded | null;
@@ -186,7 +179,11 @@ export interface CapMechanics {
 }
 
 /** Everything the report rests on. Strengths are not known where the temperature factor of the allowable is not. */
-export function capMechanics(p: Values, material: Material, allowable: AllowableStrain): CapMechanics {
+export function screwMechanics(
+  p: ScrewSizes,
+  material: Material,
+  allowable: AllowableStrain,
+): ScrewMechanics {
   const joint = jointOf(p);
   const plug = plugOf(p, joint, material);
   const warm = allowable.factors.some(({ id, value }) => id === 'temperature' && value === null);

@@ -1,9 +1,9 @@
 import type { Material } from '@/lib/materials/types';
+import { type Plug, plugOf } from '@/lib/mechanics/screw-closure';
+import { jointOf, plugInner, type ScrewSizes } from '@/lib/mechanics/screw-sizes';
 import { ringHoopStrain } from '@/lib/mechanics/seal';
 import { type ThreadJoint, turnsToFree } from '@/lib/mechanics/thread-joint';
-import type { Motion, Posed } from '../contract';
-import { type Plug, plugOf } from './mechanics';
-import { jointOf, plugInner, type Values } from './schema';
+import type { Motion, Posed } from './contract';
 
 /** Share of the slider on which the cap comes down to the thread before it turns. */
 const APPROACH = 0.3;
@@ -16,7 +16,7 @@ interface Place {
 }
 
 /** Straight down to the first turn, then along the helix: right-handed, so clockwise as it goes down. */
-function placeAt(p: Values, joint: ThreadJoint, t: number): Place {
+function placeAt(p: ScrewSizes, joint: ThreadJoint, t: number): Place {
   const turns = turnsToFree(joint);
   const along = joint.thread.lead * turns;
   const apart = Math.max(0, p.neckHeight - joint.capMouth + AIR - along);
@@ -32,7 +32,7 @@ const dieAway = (radius: number, wall: number): number => Math.sqrt(radius * wal
 
 /** Hoop strain in the neck when the plug has entered by `entered` mm. */
 function neckStrain(
-  p: Values,
+  p: ScrewSizes,
   joint: ThreadJoint,
   plug: Plug,
   material: Material,
@@ -49,7 +49,7 @@ function neckStrain(
 }
 
 /** Hoop strain in the plug, in the cap's own coordinates; the cap outside the plug has none. */
-function plugRingStrain(p: Values, plug: Plug, material: Material, entered: number): HoopStrain {
+function plugRingStrain(p: ScrewSizes, plug: Plug, material: Material, entered: number): HoopStrain {
   const contactRadius = p.bore / 2;
   const outside = (p.bore + p.plugInterference) / 2;
   const freeRadius = plugInner(p) / 2;
@@ -86,15 +86,22 @@ function move(rest: Float32Array, place: Place, strain: HoopStrain | null, out: 
   }
 }
 
+/** Names of the bodies: the neck stands still, the cap turns, and what is laid in the cap turns with it. */
+export interface ScrewBodies {
+  readonly neck: string;
+  readonly cap: string;
+}
+
 /** Screws the cap on, rigidly; only a plug and the neck round it strain, as the plug enters. */
-export function motion(p: Values, material: Material): Motion {
+export function screwMotion(p: ScrewSizes, material: Material, bodies: ScrewBodies): Motion {
   const joint = jointOf(p);
   const plug = plugOf(p, joint, material);
 
   function strainOf(body: string, lift: number): HoopStrain | null {
     const entered = plug ? p.plugLength - lift : 0;
     if (!plug || entered <= 0) return null;
-    return body === 'neck'
+    if (body !== bodies.neck && body !== bodies.cap) return null;
+    return body === bodies.neck
       ? neckStrain(p, joint, plug, material, entered)
       : plugRingStrain(p, plug, material, entered);
   }
@@ -102,7 +109,7 @@ export function motion(p: Values, material: Material): Motion {
   function pose(body: string, rest: Float32Array, t: number, out: Posed): void {
     const place = placeAt(p, joint, t);
     const still: Place = { lift: 0, turned: 0 };
-    move(rest, body === 'cap' ? place : still, strainOf(body, place.lift), out);
+    move(rest, body === bodies.neck ? still : place, strainOf(body, place.lift), out);
   }
 
   return { label: 'Screw on', from: 'apart', to: 'screwed home', peakStrain: plug?.hoop ?? 0, pose };

@@ -1,14 +1,14 @@
+import { plugTorque, screwContact } from '@/lib/mechanics/screw-closure';
+import { plugContact } from '@/lib/mechanics/screw-sizes';
 import { torquePerLoad } from '@/lib/mechanics/thread-torque';
-import type { Curve } from '../report';
-import type { Context } from './context';
-import { plugTorque, screwContact } from './mechanics';
-import { plugContact } from './schema';
+import type { Curve } from './report';
+import type { ScrewContext } from './screw-context';
 
 const STEPS = 24;
 const shares = Array.from({ length: STEPS + 1 }, (_, at) => at / STEPS);
 
 /** Pull in the thread over the torque of the hand, with the friction band. */
-function loadCurve({ p, material, mechanics }: Context): Curve[] {
+function loadCurve({ p, material, mechanics }: ScrewContext): Curve[] {
   const { closing, joint, plug } = mechanics;
   if (!closing) return [];
   const load = (torque: number, friction: number) =>
@@ -29,7 +29,7 @@ function loadCurve({ p, material, mechanics }: Context): Curve[] {
 }
 
 /** Torque while the plug goes home, over the last turns. */
-function plugCurve({ p, material, mechanics }: Context): Curve[] {
+function plugCurve({ p, material, mechanics }: ScrewContext): Curve[] {
   const { joint, plug } = mechanics;
   if (plug?.pressure == null) return [];
   const home = plugContact(p) / joint.thread.lead;
@@ -47,4 +47,4 @@ function plugCurve({ p, material, mechanics }: Context): Curve[] {
   ];
 }
 
-export const curves = (context: Context): Curve[] => [...plugCurve(context), ...loadCurve(context)];
+export const screwCurves = (context: ScrewContext): Curve[] => [...plugCurve(context), ...loadCurve(context)];
