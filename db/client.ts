@@ -5,9 +5,14 @@ import Database from 'better-sqlite3';
 import { drizzle } from 'drizzle-orm/better-sqlite3';
 import type { BaseSQLiteDatabase } from 'drizzle-orm/sqlite-core';
 import { env } from '@/lib/env';
+import * as club from './schema/club';
+import * as designs from './schema/designs';
+import * as library from './schema/library';
+import * as mail from './schema/mail';
 import * as materials from './schema/materials';
+import * as members from './schema/members';
 
-const schema = { ...materials };
+const schema = { ...materials, ...members, ...club, ...mail, ...designs, ...library };
 
 /** What a query takes: the database, or a transaction on it. */
 export type Db = BaseSQLiteDatabase<'sync', Database.RunResult, typeof schema>;

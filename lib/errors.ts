@@ -38,3 +38,27 @@ export class Unavailable extends Error {
     this.name = 'Unavailable';
   }
 }
+
+/** Only for members who have signed in. Maps to HTTP 401. */
+export class SignInNeeded extends Error {
+  constructor() {
+    super('Sign in to do this');
+    this.name = 'SignInNeeded';
+  }
+}
+
+/** The member's roles do not allow it. Maps to HTTP 403. */
+export class NotAllowed extends Error {
+  constructor() {
+    super('Your account may not do this');
+    this.name = 'NotAllowed';
+  }
+}
+
+/** It was changed elsewhere in the meantime. Maps to HTTP 409. */
+export class Conflict extends Error {
+  constructor(message: string) {
+    super(message);
+    this.name = 'Conflict';
+  }
+}

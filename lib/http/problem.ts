@@ -3,8 +3,11 @@ import type { FieldIssue } from '@/lib/errors';
 /** Every way a request can fail, with its HTTP status. */
 export const PROBLEMS = {
   'malformed-json': { status: 400, title: 'The body is not JSON' },
+  'sign-in-needed': { status: 401, title: 'Sign in first' },
+  'not-allowed': { status: 403, title: 'Your account may not do this' },
   'not-found': { status: 404, title: 'Not found' },
   'method-not-allowed': { status: 405, title: 'This address does not take that method' },
+  conflict: { status: 409, title: 'Changed elsewhere in the meantime' },
   'too-large': { status: 413, title: 'Too large' },
   'uri-too-long': { status: 414, title: 'The address is too long' },
   'unsupported-media-type': { status: 415, title: 'The body must be application/json' },

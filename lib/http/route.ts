@@ -1,5 +1,13 @@
 import type { z } from 'zod';
-import { InvalidInput, NotFound, TooLarge, Unavailable } from '@/lib/errors';
+import {
+  Conflict,
+  InvalidInput,
+  NotAllowed,
+  NotFound,
+  SignInNeeded,
+  TooLarge,
+  Unavailable,
+} from '@/lib/errors';
 import { type FieldUnits, issuesOf } from './issues';
 import { BODY_LIMIT, limiter, type RateName, URL_LIMIT } from './limits';
 import { log } from './log';
@@ -84,6 +92,12 @@ function failure(error: unknown, at: { instance: string; requestId: string }): R
     const detail = errors.map((issue) => issue.message).join('; ');
     return problemResponse({ kind: 'invalid-input', detail, errors }, at);
   }
+  if (error instanceof SignInNeeded)
+    return problemResponse({ kind: 'sign-in-needed', detail: `${error.message}.` }, at);
+  if (error instanceof NotAllowed)
+    return problemResponse({ kind: 'not-allowed', detail: `${error.message}.` }, at);
+  if (error instanceof Conflict)
+    return problemResponse({ kind: 'conflict', detail: `${error.message}.` }, at);
   if (error instanceof TooLarge)
     return problemResponse({ kind: 'too-large', detail: `${error.message}.` }, at);
   if (error instanceof Unavailable) {
