@@ -1,6 +1,7 @@
 import { about as cantileverHook } from './cantilever-hook/about';
 import type { About, Family, Guide } from './contract';
 import { about as foldedHook } from './folded-hook/about';
+import { about as knuckleHinge } from './knuckle-hinge/about';
 import { about as livingHinge } from './living-hinge/about';
 import { about as pegStrap } from './peg-strap/about';
 import { about as plugStopper } from './plug-stopper/about';
@@ -62,6 +63,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: pressLid,
     load: () => import('./press-lid').then((m) => m.default),
     loadGuide: () => import('./press-lid/guide').then((m) => m.default),
+  },
+  {
+    about: knuckleHinge,
+    load: () => import('./knuckle-hinge').then((m) => m.default),
+    loadGuide: () => import('./knuckle-hinge/guide').then((m) => m.default),
   },
 ];
 
