@@ -50,6 +50,8 @@ export const designStates = sqliteTable(
     revision: integer('revision').notNull(),
     name: text('name').notNull(),
     ...designContent(),
+    /** first save of this state: saves soon after it take its place */
+    begunAt: moment('begun_at').notNull(),
     savedAt: moment('saved_at').notNull(),
   },
   (table) => [uniqueIndex('design_states_revision').on(table.designId, table.revision)],

@@ -10,7 +10,7 @@ import {
   uniqueIndex,
 } from 'drizzle-orm/sqlite-core';
 import { moment, ownId } from './columns';
-import { designContent, designs } from './designs';
+import { designContent, designs, VERDICTS } from './designs';
 import { users } from './members';
 
 /** Creative Commons licences, by their SPDX identifiers. */
@@ -147,5 +147,47 @@ export const favourites = sqliteTable(
   (table) => [
     primaryKey({ columns: [table.userId, table.presetId] }),
     index('favourites_preset').on(table.presetId),
+  ],
+);
+
+/**
+ * What the library lists: one row for each published preset, written by triggers on `presets`, `preset_reports` and
+ * `favourites` and never by hand. `row` rises with each publication. The full-text index `library_search` is over it.
+ */
+export const libraryEntries = sqliteTable(
+  'library_entries',
+  {
+    row: integer('row').primaryKey({ autoIncrement: true }),
+    presetId: text('preset_id')
+      .notNull()
+      .unique()
+      .references(() => presets.id, { onDelete: 'cascade' }),
+    versionId: text('version_id').notNull(),
+    slug: text('slug').notNull(),
+    author: text('author').notNull(),
+    title: text('title').notNull(),
+    purpose: text('purpose').notNull(),
+    notes: text('notes').notNull(),
+    /** parted by blanks */
+    tags: text('tags').notNull(),
+    family: text('family').notNull(),
+    kind: text('kind').notNull(),
+    material: text('material').notNull(),
+    verdict: text('verdict', { enum: VERDICTS }).notNull(),
+    strainShare: real('strain_share'),
+    /** longest edge of the bounding box on the bed, mm */
+    longest: real('longest').notNull(),
+    enclosure: text('enclosure', { enum: ['needed', 'helpful', 'not-needed'] }),
+    /** what can be filtered by, as words of the full-text index */
+    facets: text('facets').notNull(),
+    worked: integer('worked').notNull(),
+    failed: integer('failed').notNull(),
+    favourites: integer('favourites').notNull(),
+    publishedAt: moment('published_at').notNull(),
+  },
+  (table) => [
+    index('library_entries_worked').on(table.worked, table.row),
+    index('library_entries_favourites').on(table.favourites, table.row),
+    index('library_entries_title').on(table.title, table.row),
   ],
 );
