@@ -8,6 +8,7 @@ import { about as plugStopper } from './plug-stopper/about';
 import { about as pressLid } from './press-lid/about';
 import { about as rodClip } from './rod-clip/about';
 import { about as screwCap } from './screw-cap/about';
+import { about as screwPot } from './screw-pot/about';
 import { about as torsionLatch } from './torsion-latch/about';
 
 /** What the list knows of a family before it is loaded. */
@@ -43,6 +44,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: screwCap,
     load: () => import('./screw-cap').then((m) => m.default),
     loadGuide: () => import('./screw-cap/guide').then((m) => m.default),
+  },
+  {
+    about: screwPot,
+    load: () => import('./screw-pot').then((m) => m.default),
+    loadGuide: () => import('./screw-pot/guide').then((m) => m.default),
   },
   {
     about: torsionLatch,

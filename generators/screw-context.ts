@@ -16,6 +16,8 @@ export interface Seat {
   /** what lies there, after "Beds the ..." */
   readonly of: string;
   readonly advice: string;
+  /** pressure that beds it, MPa; 0 for what gives way by itself */
+  readonly pressure: number;
 }
 
 /** What the figures of one screwed closure are made from. */

@@ -1,4 +1,4 @@
-import { SEAT_PRESSURE, screwContact, seatLoad } from '@/lib/mechanics/screw-closure';
+import { screwContact, seatLoad } from '@/lib/mechanics/screw-closure';
 import {
   lockingRatio,
   nutFactorTorque,
@@ -99,7 +99,7 @@ function seatTorque(
     low: torque(low),
     high: torque(high),
     handbook: nutFactorTorque(PRINTED_NUT_FACTOR, load, p.majorDiameter),
-    because: `Beds the ${seat.of} with ${newton(load)}, ${SEAT_PRESSURE} MPa. ${seat.advice}`,
+    because: `Beds the ${seat.of} with ${newton(load)}, ${seat.pressure} MPa. ${seat.advice}`,
   };
 }
 
@@ -111,6 +111,9 @@ function closingFigure(context: ScrewContext): Figure {
     unit: 'Nmm',
     limit: mechanics.closing?.hand.high ?? null,
   } as const;
+  if (seat?.pressure === 0) {
+    return plainFigure({ ...common, limit: null, because: seat.advice, source: source.SEAT });
+  }
   if (seat) return judgedFigure({ ...common, ...seatTorque(context, seat), source: source.SEAT });
   if (p.seal === 'none') {
     const because = `Without a seal there is nothing to bed: turn until the ${words.cap} stops on the rim.`;

@@ -26,7 +26,7 @@ export const REMOVAL: Source = {
   mark: 'memory',
 };
 export const SEAT: Source = {
-  text: 'ASME Boiler and Pressure Vessel Code VIII-1, seating stress of a hard rubber gasket, 1.4 MPa',
+  text: 'ASME Boiler and Pressure Vessel Code VIII-1, seating stress of rubber gaskets: 1.4 MPa from 75 Shore A on, none below',
   mark: 'memory',
 };
 export const PRESS: Source = {

@@ -1,4 +1,5 @@
 import type { Material, Use } from '@/lib/materials/types';
+import { SEAT_PRESSURE } from '@/lib/mechanics/screw-closure';
 import { jointOf } from '@/lib/mechanics/screw-sizes';
 import { type Report, report } from '../report';
 import type { Seat } from '../screw-context';
@@ -10,6 +11,7 @@ const seatOf = (p: Values): Seat | null =>
   p.seal === 'land'
     ? {
         ...jointOf(p).land,
+        pressure: SEAT_PRESSURE,
         of: 'land',
         advice:
           'Two hard printed faces seal only dust and drips: lay in a disc of TPU or rubber for liquids.',

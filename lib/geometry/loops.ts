@@ -17,6 +17,28 @@ export const profileArea = (profile: Profile): number =>
 /** The loop counter-clockwise, whichever way it was given. */
 export const counterClockwise = (loop: Loop): Loop => (loopArea(loop) < 0 ? [...loop].reverse() : loop);
 
+/**
+ * The part of a loop inside a convex counter-clockwise one, cut edge by edge (Sutherland and Hodgman). Pieces that come
+ * apart stay joined by edges of no width, so the area is right for any loop.
+ */
+export function convexCut(loop: Loop, convex: Loop): Loop {
+  return convex.reduce<Loop>((kept, [ax, ay], at) => {
+    const [bx, by] = convex[(at + 1) % convex.length]!;
+    const inside = ([x, y]: Vec2) => (bx - ax) * (y - ay) - (by - ay) * (x - ax);
+    return kept.flatMap((point, i): Vec2[] => {
+      const next = kept[(i + 1) % kept.length]!;
+      const [here, there] = [inside(point), inside(next)];
+      const share = here / (here - there);
+      const crossing: Vec2 = [
+        point[0] + share * (next[0] - point[0]),
+        point[1] + share * (next[1] - point[1]),
+      ];
+      const crosses = here >= 0 !== there >= 0;
+      return [...(here >= 0 ? [point] : []), ...(crosses ? [crossing] : [])];
+    });
+  }, loop);
+}
+
 /** How often the loop runs counter-clockwise round the point. */
 export function windingAt(loop: Loop, [x, y]: Vec2): number {
   let winding = 0;

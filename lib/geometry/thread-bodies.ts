@@ -12,11 +12,20 @@ function turnedWall(kernel: Kernel, section: Loop): Solid {
   return kernel.place(kernel.revolve({ loops: [section] }), rotation('z', Math.PI / segmentsPerTurn));
 }
 
-/** A body of revolution with an outward thread on it; `section` is counter-clockwise in (radius, height). */
-export const threadedBody = (kernel: Kernel, section: Loop, ridge: Ridge): Solid =>
+/**
+ * A body of revolution with an outward thread on it, joined to `further` solids; `section` is counter-clockwise in
+ * (radius, height).
+ */
+export const threadedBody = (
+  kernel: Kernel,
+  section: Loop,
+  ridge: Ridge,
+  further: readonly Solid[] = [],
+): Solid =>
   kernel.union([
     turnedWall(kernel, section),
     kernel.fromMesh(ridgeMesh(ridge, kernel.quality.segmentsPerTurn)),
+    ...further,
   ]);
 
 /** Volume of a revolved section with as many facets, mm3. */

@@ -28,7 +28,7 @@ export interface Banded {
   readonly high: number;
 }
 
-/** Pressure that beds a hard seal on its seat, MPa. */
+/** Pressure in MPa that beds a hard seal on its seat; foam and rubber under 75 Shore A need none to speak of. */
 export const SEAT_PRESSURE = 1.4;
 
 /** The thread of neck and cap, rubbing on the rim at the middle of what touches it. */
@@ -150,9 +150,12 @@ export function closing(
   return { hand, drag, load: { value: loadAt(value), handbook, low: loadAt(high), high: loadAt(low) } };
 }
 
-/** Axial load in N that beds a seal on a ring between two radii (mm). */
-export const seatLoad = (ring: { readonly inner: number; readonly outer: number }): number =>
-  SEAT_PRESSURE * Math.PI * (ring.outer ** 2 - ring.inner ** 2);
+/** Axial load in N that presses a ring between two radii (mm) with a pressure (MPa). */
+export const seatLoad = (ring: {
+  readonly inner: number;
+  readonly outer: number;
+  readonly pressure: number;
+}): number => ring.pressure * Math.PI * (ring.outer ** 2 - ring.inner ** 2);
 
 /** Hoop strain and growth of the cap under the load of a firm hand; null when the modulus is not known. */
 export function spread(p: ScrewSizes, joint: ThreadJoint, load: number, material: Material) {
