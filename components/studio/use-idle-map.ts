@@ -4,6 +4,8 @@ import { useEffect, useState } from 'react';
 
 /** Milliseconds of work at a time; short enough that a key pressed meanwhile is answered in the same frame. */
 const SLICE = 8;
+/** Milliseconds after a change before the work begins, so that the picture of the change comes first. */
+const WAIT = 120;
 
 type Left = () => number;
 
@@ -44,7 +46,10 @@ export function useIdleMap<T>(keys: readonly string[], make: (key: string) => T)
       if (rest.length === 0) setAnswers({ found, of: make });
       else cancel = whenIdle(next);
     };
-    let cancel = whenIdle(next);
+    const wait = setTimeout(() => {
+      cancel = whenIdle(next);
+    }, WAIT);
+    let cancel = () => clearTimeout(wait);
     return () => cancel();
   }, [keys, make]);
   return answers && { found: answers.found, current: answers.of === make };
