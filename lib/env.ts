@@ -16,11 +16,17 @@ const envSchema = z.object({
     .default('development'),
   HOSTNAME: z.string().max(253, 'HOSTNAME must have at most 253 characters').default('127.0.0.1'),
   PORT: whole('PORT', 0, 65_535, 3000),
+  PUBLIC_URL: z
+    .url({ protocol: /^https?$/, error: 'PUBLIC_URL must be an address such as https://bendwell.example' })
+    .max(200, 'PUBLIC_URL must have at most 200 characters')
+    .transform((url) => new URL(url).origin)
+    .optional(),
   DATABASE_PATH: z
     .string()
     .min(1, 'DATABASE_PATH must name a file')
     .max(1000, 'DATABASE_PATH must have at most 1000 characters')
     .default('./data/bendwell.sqlite'),
+  SEED: z.enum(['demo', 'plain'], 'SEED must be demo or plain').optional(),
   LOG_LEVEL: z
     .enum(
       ['debug', 'info', 'warn', 'error', 'silent'],
@@ -42,6 +48,15 @@ export function readEnv(variables: Readonly<Record<string, string | undefined>>)
   const faults = result.error.issues.map((issue) => `- ${issue.message}`);
   throw new Error(`The environment cannot be used:\n${faults.join('\n')}`);
 }
+
+/** Where the site is reached from outside, without a slash at the end. */
+export const publicUrl = (): string => env().PUBLIC_URL ?? `http://127.0.0.1:${env().PORT}`;
+
+/** Whether the site is reached over https; cookies and transport security follow from it. */
+export const overHttps = (): boolean => publicUrl().startsWith('https:');
+
+/** The demo club has published passwords: a site on https gets it only when asked to. */
+export const wantsDemo = (): boolean => (env().SEED ?? (overHttps() ? 'plain' : 'demo')) === 'demo';
 
 let checked: Env | undefined;
 

@@ -62,3 +62,13 @@ export class Conflict extends Error {
     this.name = 'Conflict';
   }
 }
+
+/** Tried too often. Maps to HTTP 429. */
+export class TooMany extends Error {
+  constructor(readonly seconds: number) {
+    super(
+      `Too many attempts. Try again in ${seconds < 90 ? `${seconds} s` : `${Math.ceil(seconds / 60)} minutes`}`,
+    );
+    this.name = 'TooMany';
+  }
+}

@@ -33,7 +33,7 @@ export function rateLimit(name: string, perMinute: number): RateLimit {
 }
 
 /** The address nearest to us: the server's own entry, or the one our proxy added last. */
-export function clientOf(request: Request): string {
+export function clientOf(request: { readonly headers: Pick<Headers, 'get'> }): string {
   const forwarded = request.headers.get('x-forwarded-for') ?? '';
   return (forwarded.split(',').at(-1) ?? '').trim().slice(0, 64) || 'unknown';
 }

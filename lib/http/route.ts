@@ -6,6 +6,7 @@ import {
   NotFound,
   SignInNeeded,
   TooLarge,
+  TooMany,
   Unavailable,
 } from '@/lib/errors';
 import { type FieldUnits, issuesOf } from './issues';
@@ -100,6 +101,10 @@ function failure(error: unknown, at: { instance: string; requestId: string }): R
     return problemResponse({ kind: 'conflict', detail: `${error.message}.` }, at);
   if (error instanceof TooLarge)
     return problemResponse({ kind: 'too-large', detail: `${error.message}.` }, at);
+  if (error instanceof TooMany) {
+    const headers = { 'Retry-After': String(error.seconds) };
+    return problemResponse({ kind: 'too-many-requests', detail: `${error.message}.` }, at, headers);
+  }
   if (error instanceof Unavailable) {
     return problemResponse({ kind: 'unavailable', detail: `${error.message}.` }, at, { 'Retry-After': '5' });
   }

@@ -65,7 +65,7 @@ export const ROOMS: readonly Room[] = [
     path: 'lib/http',
     may: [...CORE, 'lib/env.ts', 'lib/auth', 'lib/access', 'lib/materials', 'generators', 'db'],
   },
-  { path: 'lib/forms', may: [...CORE, 'lib/auth', 'lib/access'] },
+  { path: 'lib/forms', may: [...CORE, 'lib/auth', 'lib/access', 'lib/http'] },
   {
     path: 'components/viewport',
     may: [...CORE, 'generators', 'lib/geometry', 'lib/materials', 'lib/fea', 'components/ui'],
@@ -85,7 +85,7 @@ export const ROOMS: readonly Room[] = [
       'lib/fea',
       'lib/mechanics',
     ],
-    types: ['lib/access'],
+    types: ['lib/access', 'lib/forms'],
   },
   {
     path: 'app',
@@ -110,7 +110,10 @@ export const ROOMS: readonly Room[] = [
       'lib/mechanics',
     ],
   },
-  { path: 'lib/scripts', may: ['db', 'lib/env.ts', 'lib/mail', 'lib/jobs', 'generators', 'lib/materials'] },
+  {
+    path: 'lib/scripts',
+    may: ['db', 'lib/env.ts', 'lib/auth', 'lib/mail', 'lib/jobs', 'generators', 'lib/materials'],
+  },
 ];
 
 /** Packages that only the named rooms may import. */
