@@ -8,11 +8,12 @@ import { env } from '@/lib/env';
 import * as club from './schema/club';
 import * as designs from './schema/designs';
 import * as library from './schema/library';
+import * as limits from './schema/limits';
 import * as mail from './schema/mail';
 import * as materials from './schema/materials';
 import * as members from './schema/members';
 
-const schema = { ...materials, ...members, ...club, ...mail, ...designs, ...library };
+const schema = { ...materials, ...members, ...club, ...mail, ...designs, ...library, ...limits };
 
 /** What a query takes: the database, or a transaction on it. */
 export type Db = BaseSQLiteDatabase<'sync', Database.RunResult, typeof schema>;

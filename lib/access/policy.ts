@@ -1,18 +1,8 @@
 import 'server-only';
+import type { Member, Role, Viewer } from '@/lib/auth/viewer';
 import { NotAllowed, SignInNeeded } from '@/lib/errors';
 
-export type Role = 'member' | 'host' | 'librarian' | 'admin';
-
-/** Whoever asks: null is a visitor. A suspended member has no session and so is a visitor too. */
-export type Viewer = {
-  readonly id: string;
-  readonly name: string;
-  readonly email: string;
-  readonly emailVerified: boolean;
-  readonly roles: readonly Role[];
-} | null;
-
-export type Member = NonNullable<Viewer>;
+export type { Member, Role, Viewer };
 
 /** Who may do what; where a rule says `own`, the query asks for the owner as well. */
 const POLICY = {
