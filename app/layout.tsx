@@ -1,6 +1,9 @@
 import type { Metadata, Viewport } from 'next';
 import type { ReactNode } from 'react';
+import { HeaderAccount } from '@/components/account/header-account';
 import { PageFrame } from '@/components/layout/page-frame';
+import { clubName } from '@/lib/access/club';
+import { currentViewer } from '@/lib/auth/session';
 import { heading, mono, text } from './fonts';
 import './globals.css';
 
@@ -16,7 +19,8 @@ export const viewport: Viewport = {
   ],
 };
 
-export default function RootLayout({ children }: { children: ReactNode }) {
+export default async function RootLayout({ children }: { children: ReactNode }) {
+  const viewer = await currentViewer();
   return (
     <html
       lang="en"
@@ -27,7 +31,7 @@ export default function RootLayout({ children }: { children: ReactNode }) {
         <script src="/theme.js" />
       </head>
       <body>
-        <PageFrame>{children}</PageFrame>
+        <PageFrame account={<HeaderAccount viewer={viewer} club={clubName()} />}>{children}</PageFrame>
       </body>
     </html>
   );
