@@ -14,6 +14,7 @@ let idle: (() => void)[] = [];
 
 /** Does all that waits for the browser to be idle. */
 async function beIdle(): Promise<void> {
+  await vi.waitUntil(() => idle.length > 0);
   await act(async () => {
     for (let work = idle.shift(); work; work = idle.shift()) work();
   });
