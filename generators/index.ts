@@ -2,6 +2,7 @@ import { about as cantileverHook } from './cantilever-hook/about';
 import type { About, Family, Guide } from './contract';
 import { about as foldedHook } from './folded-hook/about';
 import { about as knuckleHinge } from './knuckle-hinge/about';
+import { about as latticeHinge } from './lattice-hinge/about';
 import { about as livingHinge } from './living-hinge/about';
 import { about as pegStrap } from './peg-strap/about';
 import { about as plugStopper } from './plug-stopper/about';
@@ -74,6 +75,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: knuckleHinge,
     load: () => import('./knuckle-hinge').then((m) => m.default),
     loadGuide: () => import('./knuckle-hinge/guide').then((m) => m.default),
+  },
+  {
+    about: latticeHinge,
+    load: () => import('./lattice-hinge').then((m) => m.default),
+    loadGuide: () => import('./lattice-hinge/guide').then((m) => m.default),
   },
 ];
 
