@@ -9,6 +9,7 @@ export default defineConfig({
     alias: {
       'server-only': here('./tests/support/server-only.ts'),
       '@/lib/jobs/start-build-thread': here('./tests/support/start-build-thread.ts'),
+      '@/lib/jobs/start-picture-thread': here('./tests/support/start-picture-thread.ts'),
       '@/lib/jobs/start-solve-thread': here('./tests/support/start-solve-thread.ts'),
     },
   },

@@ -27,6 +27,11 @@ const envSchema = z.object({
     .max(1000, 'DATABASE_PATH must have at most 1000 characters')
     .default('./data/bendwell.sqlite'),
   SEED: z.enum(['demo', 'plain'], 'SEED must be demo or plain').optional(),
+  FILES_PATH: z
+    .string()
+    .min(1, 'FILES_PATH must name a folder')
+    .max(1000, 'FILES_PATH must have at most 1000 characters')
+    .default('./data/files'),
   LOG_LEVEL: z
     .enum(
       ['debug', 'info', 'warn', 'error', 'silent'],

@@ -1,24 +1,13 @@
 import 'server-only';
-import { InvalidInput, NotFound, TooLarge } from '@/lib/errors';
-import { KernelError } from '@/lib/geometry/kernel';
 import { startBuildThread } from '@/lib/jobs/start-build-thread';
-import type { ExportedPart, ExportRequest, FromExporter, PackedError } from './export.types';
+import type { ExportedPart, ExportRequest, FromExporter } from './export.types';
 import { type PoolLimits, ThreadPool, type ThreadPort } from './thread-pool';
+import { unpack } from './unpack';
 
 export type { ExportedPart, ExportRequest } from './export.types';
 export type { PoolLimits, ThreadPort } from './thread-pool';
 
 const LIMITS: PoolLimits = { threads: 1, waiting: 24, time: 20_000 };
-
-/** The error as it was thrown in the thread, so that callers can tell a bad input from a fault. */
-function unpack(packed: PackedError): Error {
-  const { name, message, issues, what, operation, status } = packed;
-  if (name === 'InvalidInput') return new InvalidInput(issues as InvalidInput['issues']);
-  if (name === 'NotFound') return new NotFound(String(what));
-  if (name === 'TooLarge') return new TooLarge(message);
-  if (name === 'KernelError') return new KernelError(String(operation), String(status));
-  return new Error(message);
-}
 
 export class BuildPool {
   private readonly pool: ThreadPool<ExportRequest, ExportedPart, FromExporter>;

@@ -17,6 +17,7 @@ export function emptyDatabase(): Connection {
 export function seededDatabase(): Connection {
   const folder = mkdtempSync(path.join(tmpdir(), 'bendwell-'));
   vi.stubEnv('DATABASE_PATH', path.join(folder, 'test.sqlite'));
+  vi.stubEnv('FILES_PATH', path.join(folder, 'files'));
   vi.stubEnv('LOG_LEVEL', 'silent');
   const db = database();
   migrateDatabase(db);
