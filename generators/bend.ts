@@ -1,6 +1,7 @@
 import type { ElasticNumbers } from '@/lib/fea/model';
 import { LINEAR, NON_LINEAR, type SolveOptions } from '@/lib/fea/solve/options';
 import type { SolveRequest } from '@/lib/fea/solve/request';
+import type { Solved } from '@/lib/fea/solve/solution';
 import type { LayerAllowable } from '@/lib/fea/strain/layers';
 import { allowableStrain } from '@/lib/materials/allowable';
 import type { Material, Use } from '@/lib/materials/types';
@@ -32,7 +33,9 @@ function allowableOf({ layerNormal }: BendingPlane, material: Material, use: Use
 
 /** The family's plane model, or why there is none. Dimensions that do not fit together are a reason too. */
 export function bendingOf<P>(family: Family<P>, values: P, material: Material, use: Use): Bending {
-  if (!family.bending) return { none: `${family.about.name}: the part does not bend as a plane shape.` };
+  if (!family.bending) {
+    return { none: `The part does not bend as a plane shape: it gives by ${family.about.bendsBy}.` };
+  }
   try {
     return family.bending(values, material, use);
   } catch (error) {
@@ -54,4 +57,23 @@ export function solveRequest(
     options: displacement === 'small' ? LINEAR : NON_LINEAR,
     allowable: allowableOf(plane, material, use),
   };
+}
+
+/**
+ * The same request for a plastic of 1 MPa. Shape and strain are those of any modulus and forces are in proportion, so
+ * that plastics alike in all else share one solution.
+ */
+export function perModulus(request: SolveRequest): SolveRequest {
+  const { modulus, layers, ...rest } = request.numbers;
+  const across = layers && {
+    ...layers,
+    across: layers.across / modulus,
+    shearBetween: layers.shearBetween && layers.shearBetween / modulus,
+  };
+  return { ...request, numbers: { ...rest, modulus: 1, layers: across } };
+}
+
+/** A solution for 1 MPa as it is for a plastic of `modulus` (MPa). */
+export function atModulus(solution: Solved, modulus: number): Solved {
+  return { ...solution, steps: solution.steps.map((step) => ({ ...step, force: step.force * modulus })) };
 }

@@ -4,7 +4,7 @@ import type { Vec3 } from '@/lib/geometry/kernel';
 import { movePoint } from '@/lib/geometry/placement';
 import { degrees, formatQuantity } from '@/lib/units';
 import type { BendingPlane } from './contract';
-import { type Figure, judge, type Report, report } from './report';
+import { type Curve, type Figure, judge, type Report, report } from './report';
 
 /** What the finite elements found, beside the figures they stand for. */
 export interface Computed {
@@ -50,6 +50,7 @@ function likelyReason(solution: Solved, plane: BendingPlane): string {
   if (solution.fellBack)
     return 'the large movement could not be followed, so the computed figure is for small ones';
   if (solution.unstable) return 'the part snaps through on the way';
+  if (plane.apart) return plane.apart;
   if (plane.model.factors.length > 0) return plane.model.factors.map((factor) => factor.because).join('; ');
   return 'the formula simplifies the outline that is computed here';
 }
@@ -59,12 +60,12 @@ function forceOf(solution: Solved, plane: BendingPlane): number | null {
 }
 
 /** The peak that the family's figure counts. */
-function peakOf({ tension, compression }: Solved, { counts }: BendingPlane): Peak {
+export function countedPeak({ tension, compression }: Solved, { counts }: BendingPlane): Peak {
   return counts === 'either' && -compression.strain > tension.strain ? compression : tension;
 }
 
 function computedOf(given: Report, plane: BendingPlane, solution: Solved): Computed {
-  const { strain: signed, place } = peakOf(solution, plane);
+  const { strain: signed, place } = countedPeak(solution, plane);
   const strain = Math.abs(signed);
   const formula = figureOf(given, plane.strainFigure)?.value ?? null;
   const isBeside = plane.beside !== null && plane.beside.strain > strain;
@@ -128,12 +129,43 @@ function scaled(figure: Figure, ratio: number): Figure {
   };
 }
 
+/** A curve of force or strain drawn to end at the computed figure; its course stays the formula's. */
+function drawnTo(curve: Curve, ratio: number | null): Curve {
+  if (ratio === null) return curve;
+  const { points, band } = curve;
+  return {
+    ...curve,
+    points: points.map(([x, y]) => [x, y * ratio]),
+    ...(band && { band: band.map(([low, high]) => [low * ratio, high * ratio] as const) }),
+  };
+}
+
+/** How far the figure is from the formula's; null where nothing of it was computed. */
+function ratioOf(figures: readonly Figure[], given: Report, id: string | undefined): number | null {
+  const formula = figureOf(given, id ?? '')?.value;
+  const value = figures.find((one) => one.id === id)?.value;
+  return formula && value ? value / formula : null;
+}
+
+function curvesOf(given: Report, figures: readonly Figure[], plane: BendingPlane): readonly Curve[] {
+  const ratios = {
+    N: ratioOf(figures, given, plane.forceFigures[0]),
+    strain: ratioOf(figures, given, plane.strainFigure),
+  };
+  return given.curves.map((curve) => {
+    const { unit } = curve.y;
+    return unit === 'N' || unit === 'strain' ? drawnTo(curve, ratios[unit]) : curve;
+  });
+}
+
 /**
  * The report with the computed figures in place of the formula's: the verdict then stands on them. Handbook figures
- * stay as they are; what the formula gave is kept in `computed`.
+ * stay as they are; what the formula gave is kept in `computed`. Where the large movement could not be followed the
+ * figures stay the formula's, and `computed` says why.
  */
 export function withComputed(given: Report, plane: BendingPlane, solution: Solved): ComputedReport {
   const computed = computedOf(given, plane, solution);
+  if (solution.fellBack !== null) return { ...given, computed };
   const [main] = plane.forceFigures;
   const formula = main === undefined ? null : (figureOf(given, main)?.value ?? null);
   const ratio = formula && computed.force !== null ? computed.force / formula : null;
@@ -142,5 +174,5 @@ export function withComputed(given: Report, plane: BendingPlane, solution: Solve
     if (ratio !== null && plane.forceFigures.includes(figure.id)) return scaled(figure, ratio);
     return figure;
   });
-  return { ...report({ ...given, figures }), computed };
+  return { ...report({ ...given, figures, curves: curvesOf(given, figures, plane) }), computed };
 }

@@ -86,6 +86,8 @@ export interface Motion {
   readonly to: string;
   /** largest absolute strain at t = 1, for the colour scale; 0 where nothing strains */
   readonly peakStrain: number;
+  /** signed strain of the place to be marked at a moment; left out: the largest absolute one of the pose */
+  readonly markedStrain?: (t: number) => number;
   pose(body: string, rest: Float32Array, t: number, out: Posed): void;
 }
 
@@ -113,6 +115,8 @@ export interface BendingPlane {
   readonly modulus: number | null;
   /** direction across the layers in the plane, rad from x, in the stance the use names; null where they lie in it */
   readonly layerNormal: number | null;
+  /** what the formula leaves out of this outline, shown as the likely reason where the two are far apart */
+  readonly apart?: string;
 }
 
 /** Why a family, or these values of it, has no plane model: shown with the figures. */

@@ -3,6 +3,7 @@ import { type Moment, type Moved, momentAt, readMoment } from '@/lib/fea/preview
 import { type Anchors, locate } from '@/lib/fea/preview/locate';
 import type { Solved } from '@/lib/fea/solve/solution';
 import type { Placement } from '@/lib/geometry/kernel';
+import { countedPeak } from './computed';
 import type { BendingPlane, Motion, Posed } from './contract';
 
 type Axis = 0 | 1;
@@ -72,9 +73,11 @@ export function solvedMotion(family: Motion, plane: BendingPlane, solution: Solv
     known.set(rest, found);
     return found;
   };
+  const peak = countedPeak(solution, plane);
   return {
     ...family,
     peakStrain: Math.max(solution.tension.strain, -solution.compression.strain),
+    markedStrain: (t) => (t === 0 ? 0 : momentAt(solution, t).strain[peak.node]!),
     pose(body, rest, t, out) {
       if (body !== plane.body) family.pose(body, rest, t, out);
       else poseBody(plane, solution, momentAt(solution, t), seen(rest), rest, out);

@@ -110,6 +110,9 @@ function withoutPlane(v: HookValues): string | null {
   return null;
 }
 
+/** Of an arm that hardly is a beam; else the factors of the model tell. */
+const STUBBY = 'an arm this stubby shears and turns in its base more than the formula follows';
+
 export function bending(v: HookValues, material: Material, use: Use): Bending {
   const none = withoutPlane(v);
   if (none) return { none };
@@ -125,5 +128,6 @@ export function bending(v: HookValues, material: Material, use: Use): Bending {
     forceFigures: ['deflection-force', 'mating-force', 'mating-force-tilted', 'separation-force'],
     modulus: secantModulus(material, strain.nominal)?.value ?? null,
     layerNormal: layerNormal(use),
+    ...(v.armLength < 4 * v.rootThickness && { apart: STUBBY }),
   };
 }

@@ -127,6 +127,12 @@ export function planeModel(p: Values, poisson: number): BendingModel {
 /** Layers across the legs of a hook printed standing; on its side they lie in the plane of bending. */
 const layerNormal = (use: Use): number | null => (use.layers === 'across' ? QUARTER : null);
 
+/** What the chain of bars leaves out. */
+const APART = {
+  u: 'the legs turn so far that the push no longer acts at the arm the formula takes',
+  l: 'legs this stubby are mostly bend, fillet and catch, where the formula bends slender bars',
+} as const;
+
 export function bending(p: Values, material: Material, use: Use): Bending {
   return {
     model: planeModel(p, material.poisson.value),
@@ -139,5 +145,6 @@ export function bending(p: Values, material: Material, use: Use): Bending {
     forceFigures: ['deflection-force', 'mating-force', 'separation-force'],
     modulus: secantModulus(material, foldedStrain(p).peak)?.value ?? null,
     layerNormal: layerNormal(use),
+    apart: APART[p.shape],
   };
 }

@@ -49,5 +49,6 @@ export function bending(p: Values, material: Material, use: Use): Bending {
     forceFigures: [],
     modulus: secantModulus(material, nominal)?.value ?? null,
     layerNormal: layerNormal(use),
+    apart: 'a web this short bends into its fillets and leaves, where the formula bends an even strip',
   };
 }

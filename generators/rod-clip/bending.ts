@@ -113,6 +113,9 @@ const placementAt = (p: Values, x: number): Placement => [
 /** On its side the layers lie in the plane of bending; standing on its foot they lie across the back. */
 const layerNormal = (use: Use): number | null => (use.layers === 'across' ? QUARTER : null);
 
+const TAPER =
+  'the wall thins only from the fillet of the stem on, where the formula has it thin from the edge of the stem';
+
 export function bending(p: Values, material: Material, use: Use): Bending {
   const [first, ...others] = centres(p).map((x) => placementAt(p, x)) as [Placement, ...Placement[]];
   return {
@@ -125,5 +128,6 @@ export function bending(p: Values, material: Material, use: Use): Bending {
     forceFigures: ['deflection-force', 'mating-force', 'separation-force'],
     modulus: secantModulus(material, clipMechanics(p).strain)?.value ?? null,
     layerNormal: layerNormal(use),
+    ...(p.tipThickness < p.wallThickness && { apart: TAPER }),
   };
 }

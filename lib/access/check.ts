@@ -98,6 +98,12 @@ async function computedReport(
   return { report: standing, computed };
 }
 
+/** Why no figure stands on the finite elements; null where some do. */
+function whyNotComputed({ computed }: Checked): string | null {
+  if (!computed) return null;
+  return 'none' in computed ? computed.none : computed.fellBack;
+}
+
 async function checkBy(
   method: CheckMethod,
   family: Family,
@@ -108,7 +114,7 @@ async function checkBy(
   const report = family.check(values, material, use);
   if (method === 'closed') return { report, computed: null };
   const checked = await computedReport(family, values, material, use, report);
-  const none = checked.computed && 'none' in checked.computed ? checked.computed.none : null;
+  const none = whyNotComputed(checked);
   return method === 'fe' && none !== null ? { ...checked, report: withoutValue(report, none) } : checked;
 }
 
