@@ -8,6 +8,8 @@ import { dropWork, keptWork, startOf } from './autosave';
 import { StrainBand } from './band/strain-band';
 import { ChecksList } from './checks/checks-list';
 import { Curves } from './checks/curves';
+import { HowComputed } from './computed/how-computed';
+import { StandingProvider } from './computed/standing-context';
 import { CopyLink } from './head/copy-link';
 import { Files } from './head/files';
 import { HistoryButtons } from './head/history-buttons';
@@ -85,6 +87,7 @@ function Bench({ session, query }: { session: Session; query: string }) {
         <DimensionSheet />
       </div>
       <ChecksList />
+      <HowComputed />
       <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-4 xl:grid-cols-[repeat(2,minmax(0,1fr))]">
         <Curves />
         <Plastics />
@@ -109,7 +112,9 @@ export function Studio({ family: id, materials, query }: StudioProps) {
   const [session] = useState(() => begin(family, materials, query));
   return (
     <SessionProvider value={session}>
-      <Bench session={session} query={query} />
+      <StandingProvider>
+        <Bench session={session} query={query} />
+      </StandingProvider>
     </SessionProvider>
   );
 }

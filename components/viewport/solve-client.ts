@@ -84,7 +84,12 @@ class LatestSolve implements SolveClient {
     if (this.running || !this.waiting) return;
     this.running = this.waiting;
     this.waiting = null;
-    this.port().postMessage({ kind: 'solve', job: this.running.id, request: this.running.request });
+    const { id, request } = this.running;
+    try {
+      this.port().postMessage({ kind: 'solve', job: id, request });
+    } catch (error) {
+      this.giveUp(error instanceof Error ? error.message : String(error));
+    }
   }
 
   private receive({ job, solution, took }: FromSolver): void {
@@ -97,11 +102,15 @@ class LatestSolve implements SolveClient {
   /** The worker could not start or died: its job is answered with the reason, a later one starts a fresh worker. */
   private lose(worker: SolverPort, message: string): void {
     if (worker !== this.worker) return;
-    const reason = `the solver could not be started (${message || 'no reason given'})`;
-    this.running?.resolve({ solution: { ok: false, reason }, took: 0 });
-    this.running = null;
     worker.terminate();
     this.worker = null;
+    this.giveUp(message || 'no reason given');
+  }
+
+  private giveUp(because: string): void {
+    const reason = `the solver could not be started (${because})`;
+    this.running?.resolve({ solution: { ok: false, reason }, took: 0 });
+    this.running = null;
     this.next();
   }
 }

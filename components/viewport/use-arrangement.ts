@@ -64,10 +64,19 @@ function staysNear(moved: readonly Moved[], rest: readonly Moved[], size: number
   });
 }
 
+/** Share of the figure the motion tells from which a place in the picture counts as that of the figure. */
+const NEAR_PEAK = 0.9;
+
 /** The vertices only come near the peak the motion tells; close to it, its own figure is shown. */
-function statedPeak(peak: Peak | null, build: Build, t: number): Peak | null {
-  const stated = build.motion?.peakStrain ?? 0;
-  if (!peak || t < 1 || Math.abs(peak.strain) < 0.9 * stated) return peak;
+function statedPeak(moved: readonly Moved[], { motion }: Build, t: number): Peak | null {
+  const marked = motion?.markedStrain?.(t);
+  if (marked !== undefined) {
+    const peak = peakOf(moved, marked < 0 ? -1 : 1);
+    return peak && Math.abs(peak.strain) >= NEAR_PEAK * Math.abs(marked) ? { ...peak, strain: marked } : peak;
+  }
+  const peak = peakOf(moved);
+  const stated = motion?.peakStrain ?? 0;
+  if (!peak || t < 1 || Math.abs(peak.strain) < NEAR_PEAK * stated) return peak;
   return { ...peak, strain: Math.sign(peak.strain) * stated };
 }
 
@@ -108,7 +117,7 @@ export function useArrangement(build: Build | null, wish: Wish): Arrangement | n
       bed: placements && { placements, layerStep: layerStepFor(now.max[2] - now.min[2]) },
       box: ends ?? joinBoxes([now, bedUnder(now)]),
       now,
-      peak: statedPeak(peakOf(moved), build, flex),
+      peak: statedPeak(moved, build, flex),
     };
   }, [build, moved, rest, bends, ghosted, placements, ends, flex]);
 }

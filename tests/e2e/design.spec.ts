@@ -19,6 +19,10 @@ test.afterEach(() => {
 const field = (page: Page, name: string) => page.getByRole('spinbutton', { name, exact: true });
 const verdict = (page: Page) => page.getByRole('region', { name: 'Verdict' }).getByRole('status');
 
+/** Waits until the finite elements have answered for the part as it stands, or have said why not. */
+const solved = (page: Page) =>
+  expect(page.getByRole('region', { name: 'Verdict' })).toHaveAttribute('data-basis', /^(computed|formula)$/);
+
 /** The picture is only put in by a page that is alive. */
 const alive = (page: Page) => expect(page.locator('[data-viewport]')).toBeVisible({ timeout: 45_000 });
 
@@ -32,11 +36,13 @@ test('goes from choosing a part to its file, and back by its link', async ({ pag
   await page.getByRole('link', { name: 'Cantilever hook' }).click();
   await expect(page.getByRole('heading', { level: 1, name: 'Cantilever hook' })).toBeVisible();
   await alive(page);
+  await solved(page);
   const before = await verdict(page).textContent();
 
   await field(page, 'Arm length').fill('24,5');
   await expect(verdict(page)).not.toHaveText(before!);
   await expect(page).toHaveURL(/armLength=24\.5/);
+  await solved(page);
   const after = await verdict(page).textContent();
 
   await page.keyboard.press('Control+z');
@@ -76,6 +82,7 @@ test('leads back to the page before with one press, however much was typed', asy
 
 test('keeps a faulty entry, says what is wrong, and shows the last valid part', async ({ page }) => {
   await openHook(page);
+  await solved(page);
   const before = await verdict(page).textContent();
   await field(page, 'Undercut').fill('99');
   const message = /Undercut must be at most [\d.]+ mm/;
@@ -99,7 +106,9 @@ test('opens a link with a faulty value as far as it goes', async ({ page }) => {
 test('applies a dimension that just meets the limit with one press', async ({ page }) => {
   await openHook(page, '?material=pla&armLength=12');
   await expect(verdict(page)).toHaveText(/over limit/);
+  await solved(page);
   await page.getByRole('button', { name: /^Use Arm length/ }).click();
+  await solved(page);
   await expect(verdict(page)).not.toHaveText(/over limit/);
   await page.getByRole('button', { name: 'Undo' }).click();
   await expect(field(page, 'Arm length')).toHaveValue('12.0');

@@ -14,9 +14,14 @@ async function open(page: Page, path = HOOK): Promise<Locator> {
   await page.goto(path);
   const stage = page.locator('[data-viewport="ready"][data-frames]');
   await expect(stage).toBeVisible({ timeout: 40_000 });
+  await solved(page);
   await settled(stage);
   return stage;
 }
+
+/** The finite elements have answered, so the picture has its last shape. */
+const solved = (page: Page) =>
+  expect(page.getByRole('region', { name: 'Verdict' })).toHaveAttribute('data-basis', /^(computed|formula)$/);
 
 const frames = async (stage: Locator): Promise<number> => Number(await stage.getAttribute('data-frames'));
 
@@ -128,6 +133,7 @@ test('gives back what it holds on the graphics card over many rebuilds', async (
     await page.keyboard.press(k % 2 === 0 ? 'ArrowUp' : 'ArrowDown');
     await expect(stage).not.toHaveAttribute('data-picture-ms', picture!);
   }
+  await solved(page);
   await settled(stage);
   await page.getByRole('button', { name: 'Corner', exact: true }).click();
   await settled(stage);

@@ -3,6 +3,7 @@ import type { Figure } from '@/generators/report';
 import { formatQuantity } from '@/lib/units';
 import { placeOn, type Scale, scaleOver, shown, tickText } from '../scale';
 import { VERDICT_FILL } from '../verdict';
+import { FigureSign } from './figures';
 
 /** Room past the largest mark, so that the forbidden part is seen. */
 const PAST_LIMIT = 1.34;
@@ -21,9 +22,13 @@ interface Places {
   readonly limit: number | null;
 }
 
+const placeOf = (one: number | null, { unit }: Figure, scale: Scale): number | null =>
+  known(one) ? placeOn(scale, shown(one, unit)) : null;
+
 function placesOf(figure: Figure, scale: Scale): Places {
-  const place = (one: number | null) => (known(one) ? placeOn(scale, shown(one, figure.unit)) : null);
-  return { value: place(figure.value), handbook: place(figure.handbook), limit: place(figure.limit) };
+  const { value, handbook, limit } = figure;
+  const place = (one: number | null) => placeOf(one, figure, scale);
+  return { value: place(value), handbook: place(handbook), limit: place(limit) };
 }
 
 /** The part of the scale the figure may not enter: past a highest limit, short of a least one. */
@@ -103,23 +108,21 @@ function LimitMarker({ place, figure }: { place: number; figure: Figure }) {
   );
 }
 
-function HandbookMarker({ place }: { place: number }) {
+/** Where another figure than the one that bears the verdict lies on the scale. */
+function Marker({ place, name }: { place: number | null; name: 'handbook' | 'corrected' }) {
+  if (place === null) return null;
   return (
-    <svg
-      viewBox="0 0 12 9"
-      width="12"
-      height="9"
-      className="absolute top-4 -translate-x-1/2 text-ink"
-      style={{ left: `${place}%` }}
-      aria-hidden="true"
-    >
-      <path d="M1 1h10L6 8z" fill="var(--sheet)" stroke="currentColor" strokeWidth="1.3" />
-    </svg>
+    <span className="absolute top-3.5 -translate-x-1/2 text-ink" style={{ left: `${place}%` }}>
+      <FigureSign name={name} />
+    </span>
   );
 }
 
-/** One scale from zero past the limit: what is present filled, what is forbidden hatched. A picture; words stand beside it. */
-export function BandScale({ figure }: { figure: Figure }) {
+/**
+ * One scale from zero past the limit: what is present filled, what is forbidden hatched. A picture; words stand beside
+ * it. `corrected` is the formula's figure where the one shown was computed.
+ */
+export function BandScale({ figure, corrected }: { figure: Figure; corrected: number | null }) {
   const scale = bandScale(figure);
   const places = placesOf(figure, scale);
   return (
@@ -132,7 +135,8 @@ export function BandScale({ figure }: { figure: Figure }) {
         <Ruler scale={scale} unit={figure.unit} />
       </div>
       <div className="pointer-events-none absolute inset-y-0 right-5 left-0">
-        {places.handbook !== null && <HandbookMarker place={places.handbook} />}
+        <Marker name="handbook" place={places.handbook} />
+        <Marker name="corrected" place={placeOf(corrected, figure, scale)} />
         {places.limit !== null && <LimitMarker place={places.limit} figure={figure} />}
       </div>
     </div>

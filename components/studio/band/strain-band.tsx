@@ -4,6 +4,9 @@ import { useEffect, useRef, useState } from 'react';
 import { type Figure, type Report, VERDICT_WORDS } from '@/generators/report';
 import { figureOf } from '@/generators/sensitivity';
 import { formatQuantity } from '@/lib/units';
+import { BasisLine } from '../computed/basis-line';
+import { formulaBeside, type Standing } from '../computed/standing';
+import { useSolving } from '../computed/standing-context';
 import { useReading } from '../session-context';
 import { UseStrip } from '../sheet/use-strip';
 import { SourceNote } from '../source-note';
@@ -11,6 +14,7 @@ import { marginWords, VerdictIcon, VerdictMark } from '../verdict';
 import { BandScale, BandStripScale } from './band-scale';
 import { BigFigure } from './big-figure';
 import { Factors } from './factors';
+import { Figures } from './figures';
 
 function whyUnknown(report: Report, figure: Figure): string | undefined {
   if (figure.verdict !== 'not-known') return undefined;
@@ -18,28 +22,6 @@ function whyUnknown(report: Report, figure: Figure): string | undefined {
   return figure.unit === 'strain' && report.allowable.value === null
     ? report.allowable.because
     : figure.because;
-}
-
-/** Handbook and corrected figure side by side. */
-function TwoFigures({ figure }: { figure: Figure }) {
-  if (figure.handbook === null || figure.value === null) return null;
-  const text = (value: number) => formatQuantity(value, figure.unit);
-  return (
-    <dl className="flex flex-wrap gap-x-6 gap-y-0.5 text-sm">
-      <div className="flex items-baseline gap-1.5">
-        <dt className="text-muted">
-          <span aria-hidden="true">▽ </span>handbook
-        </dt>
-        <dd className="font-mono">{text(figure.handbook)}</dd>
-      </div>
-      <div className="flex items-baseline gap-1.5">
-        <dt className="text-muted">
-          <span aria-hidden="true">▮ </span>corrected
-        </dt>
-        <dd className="font-mono font-semibold">{text(figure.value)}</dd>
-      </div>
-    </dl>
-  );
 }
 
 function Governing({ figure, report }: { figure: Figure; report: Report }) {
@@ -149,9 +131,15 @@ function Stuff({ volume }: { volume: number }) {
   );
 }
 
+/** For whoever watches the page from outside: what the verdict stands on, and whether that is final. */
+function basisName({ basis }: Standing): string {
+  return basis.kind === 'computed' && basis.pending ? 'computed-small' : basis.kind;
+}
+
 /** `volume` of all bodies in mm3, once the solid is made. */
 export function StrainBand({ volume = null }: { volume?: number | null }) {
-  const report = useReading((reading) => reading.report);
+  const { standing, took, firstAnswer } = useSolving();
+  const { report } = standing;
   const [element, out] = useOutOfSight();
   const figure = figureOf(report, report.governing);
   if (!figure) return null;
@@ -161,13 +149,18 @@ export function StrainBand({ volume = null }: { volume?: number | null }) {
       <section
         ref={element}
         aria-label="Verdict"
+        data-basis={basisName(standing)}
+        data-solve-small-ms={took.small?.toFixed(1)}
+        data-solve-ms={took.large?.toFixed(1)}
+        data-first-answer-ms={firstAnswer?.toFixed(0)}
         className="rounded-sheet border border-hair bg-sheet shadow-lift"
       >
         <div className="grid gap-x-10 gap-y-5 px-5 pt-5 pb-4 sm:px-7 lg:grid-cols-[auto_1fr_auto]">
           <Governing figure={figure} report={report} />
           <div className="grid content-start gap-3">
-            <TwoFigures figure={figure} />
-            <BandScale figure={figure} />
+            <Figures figure={figure} standing={standing} />
+            <BandScale figure={figure} corrected={formulaBeside(standing, figure.id)} />
+            <BasisLine figure={figure.id} />
             <Basis figure={figure} report={report} />
           </div>
           {(headlines.length > 0 || volume !== null) && (

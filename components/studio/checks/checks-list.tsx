@@ -4,6 +4,8 @@ import { Sheet, SheetTitle } from '@/components/ui/sheet';
 import { warnings } from '@/generators/parameters';
 import { type Figure, VERDICT_WORDS } from '@/generators/report';
 import { formatQuantity } from '@/lib/units';
+import { formulaBeside } from '../computed/standing';
+import { useStanding } from '../computed/standing-context';
 import { useReading, useSession } from '../session-context';
 import { ToField } from '../sheet/to-field';
 import { SourceNote } from '../source-note';
@@ -16,11 +18,13 @@ function limitText(figure: Figure): string | null {
   return `${figure.limitKind === 'max' ? 'at most' : 'at least'} ${text(figure.limit, figure)}`;
 }
 
-function Aside({ figure }: { figure: Figure }) {
+/** `formula`: of the corrected formula, where the figure was computed. */
+function Aside({ figure, formula }: { figure: Figure; formula: number | null }) {
   const { low, high, handbook, value } = figure;
   const parts = [
     low !== null && high !== null && low !== high && `${text(low, figure)} to ${text(high, figure)}`,
     handbook !== null && handbook !== value && `handbook ${text(handbook, figure)}`,
+    formula !== null && `formula ${text(formula, figure)}`,
   ].filter(Boolean);
   if (parts.length === 0) return null;
   return (
@@ -34,7 +38,7 @@ function Aside({ figure }: { figure: Figure }) {
   );
 }
 
-function Check({ figure }: { figure: Figure }) {
+function Check({ figure, formula }: { figure: Figure; formula: number | null }) {
   const words = [figure.verdict && VERDICT_WORDS[figure.verdict], limitText(figure), marginWords(figure)];
   return (
     <li className="grid grid-cols-[1.5rem_1fr_auto] content-start gap-x-3 border-hair border-t py-3.5 sm:grid-cols-[1.5rem_1fr_11rem] sm:gap-x-5">
@@ -56,7 +60,7 @@ function Check({ figure }: { figure: Figure }) {
             ))}
           </p>
         )}
-        <Aside figure={figure} />
+        <Aside figure={figure} formula={formula} />
       </div>
       <div className="col-span-2 col-start-2 mt-0.5 max-w-prose text-muted text-sm sm:col-span-1 sm:row-start-2">
         {figure.because} <SourceNote source={figure.source} of={figure.label} />
@@ -86,7 +90,8 @@ function Warnings() {
 
 /** Every figure of the check: what it is, its limit, the verdict, why, and where it comes from. */
 export function ChecksList() {
-  const report = useReading((reading) => reading.report);
+  const standing = useStanding();
+  const { report } = standing;
   return (
     <Sheet labelledBy="checks" className="px-5 pt-4 pb-2 sm:px-7">
       <SheetTitle id="checks" aside={<VerdictMark verdict={report.verdict} more="all together" />}>
@@ -95,7 +100,7 @@ export function ChecksList() {
       <Warnings />
       <ul className="mt-3 grid gap-x-12 xl:grid-cols-2">
         {report.figures.map((figure) => (
-          <Check key={figure.id} figure={figure} />
+          <Check key={figure.id} figure={figure} formula={formulaBeside(standing, figure.id)} />
         ))}
       </ul>
     </Sheet>

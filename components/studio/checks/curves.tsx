@@ -3,13 +3,13 @@
 import { useState } from 'react';
 import { Segmented } from '@/components/ui/segmented';
 import { Sheet, SheetTitle } from '@/components/ui/sheet';
-import { useReading } from '../session-context';
+import { useStandingReport } from '../computed/standing-context';
 import { CurvePlot } from './curve-plot';
 import { CurveTable } from './curve-table';
 
 /** How it feels: force or torque over travel. */
 export function Curves() {
-  const curves = useReading((reading) => reading.report.curves).filter(({ points }) => points.length > 1);
+  const curves = useStandingReport().curves.filter(({ points }) => points.length > 1);
   const [chosen, setChosen] = useState<string | null>(null);
   const curve = curves.find(({ id }) => id === chosen) ?? curves[0];
   if (!curve) return null;

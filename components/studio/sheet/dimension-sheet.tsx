@@ -6,8 +6,9 @@ import { Sheet } from '@/components/ui/sheet';
 import { type Field, fieldApplies } from '@/generators/parameters';
 import { effectOf, figureOf, numbersOf } from '@/generators/sensitivity';
 import { UNIT_SYMBOL } from '@/lib/units';
+import { useCalibrated, useStandingReport } from '../computed/standing-context';
 import { chosenValues } from '../session';
-import { useReading, useSession, useSubject } from '../session-context';
+import { useReading, useSession } from '../session-context';
 import { useIdleMap } from '../use-idle-map';
 import { ChoiceRow, ToggleRow } from './choice-row';
 import { EffectCell } from './effect-cell';
@@ -15,7 +16,7 @@ import { Group } from './group';
 import { NumberRow } from './number-row';
 
 function useEffects() {
-  const subject = useSubject();
+  const subject = useCalibrated();
   const keys = useMemo(() => numbersOf(subject), [subject]);
   const make = useCallback((key: string) => effectOf(subject, key), [subject]);
   return useIdleMap(keys, make);
@@ -43,7 +44,7 @@ function Row({
   field: Field;
   effects: ReturnType<typeof useEffects>;
 }) {
-  const report = useReading((reading) => reading.report);
+  const report = useStandingReport();
   const valid = useReading((reading) => reading.design.values[name]);
   if (field.type === 'choice') return <ChoiceRow name={name} field={field} />;
   if (field.type === 'toggle') return <ToggleRow name={name} field={field} />;
@@ -59,7 +60,7 @@ export function DimensionSheet() {
   const { family } = useSession();
   const groups = useGroups();
   const effects = useEffects();
-  const report = useReading((reading) => reading.report);
+  const report = useStandingReport();
   const governing = figureOf(report, report.governing);
   const symbol = governing && UNIT_SYMBOL[governing.unit];
   const legend =

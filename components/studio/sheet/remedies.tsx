@@ -9,10 +9,14 @@ import { byEase, ease, type Remedy, remedyOf } from '@/generators/remedies';
 import { figureOf, numbersOf } from '@/generators/sensitivity';
 import { entryText } from '@/generators/url-state';
 import { formatQuantity, UNIT_SYMBOL } from '@/lib/units';
-import { useReading, useSession, useSubject } from '../session-context';
+import { useCalibrated, useStandingReport } from '../computed/standing-context';
+import { useSession } from '../session-context';
 import { useIdleMap } from '../use-idle-map';
 
 const MOST = 6;
+
+/** Kept of a computed limit: the ratio of computed to formula moves by 1 to 4 % over such changes. */
+const SPARE = 0.04;
 
 /** Room so far off that it is another design is not told. */
 const FAR = 1;
@@ -24,7 +28,7 @@ interface Found {
 
 /** Null until there are some of this kind; `current` is false while those of the part as it stands are worked out. */
 function useRemedies(over: boolean): Found | null {
-  const subject = useSubject();
+  const subject = useCalibrated(SPARE);
   const keys = useMemo(() => numbersOf(subject), [subject]);
   const make = useCallback((key: string) => ({ over, remedy: remedyOf(subject, key) }), [subject, over]);
   const answers = useIdleMap(keys, make);
@@ -86,7 +90,7 @@ function RemedyList({ list, over }: { list: readonly Remedy[]; over: boolean }) 
 
 /** Dimensions that would just meet the limit, each alone, to apply with one press. */
 export function Remedies() {
-  const report = useReading((reading) => reading.report);
+  const report = useStandingReport();
   const verdict = figureOf(report, report.governing)?.verdict;
   const over = verdict === 'over-limit';
   const found = useRemedies(over);

@@ -5,8 +5,12 @@ import { useMemo, useState } from 'react';
 import { useStore } from 'zustand';
 import { Sheet } from '@/components/ui/sheet';
 import type { ViewportState } from '@/components/viewport/types';
+import type { Motion } from '@/generators/contract';
 import type { Report } from '@/generators/report';
 import { figureOf } from '@/generators/sensitivity';
+import { solvedMotion } from '@/generators/solved-motion';
+import { shapeOf } from '../computed/standing';
+import { useStanding, useStandingReport } from '../computed/standing-context';
 import { useReading, useSession, useSubject } from '../session-context';
 import { InWords } from './in-words';
 import { ViewBar } from './view-bar';
@@ -23,10 +27,20 @@ function strainLimit(report: Report): number | null {
   return governing?.unit === 'strain' ? governing.limit : report.allowable.value;
 }
 
+/** The solved motion of the part where there is one, else the formula's. */
+function useShownMotion(formula: Motion): Motion {
+  const { plane, solution } = shapeOf(useStanding()) ?? {};
+  return useMemo(
+    () => (plane && solution ? solvedMotion(formula, plane, solution) : formula),
+    [formula, plane, solution],
+  );
+}
+
 /** What the picture needs of the part; the same objects as long as the part is the same. */
 function useScene() {
   const { family, values, material } = useSubject();
-  const motion = useMemo(() => family.motion(values, material), [family, values, material]);
+  const formula = useMemo(() => family.motion(values, material), [family, values, material]);
+  const motion = useShownMotion(formula);
   const callouts = useMemo(() => family.callouts(values), [family, values]);
   const stances = useMemo(() => family.stances(values), [family, values]);
   return { motion, callouts, stances };
@@ -47,7 +61,8 @@ export function ViewPanel({
   onState: (state: ViewportState) => void;
 }) {
   const session = useSession();
-  const { design, material, report } = useReading((reading) => reading);
+  const { design, material } = useReading((reading) => reading);
+  const report = useStandingReport();
   const highlight = useStore(session.focused, ({ field }) => field);
   const [view, setView] = useState(FIRST_VIEW);
   const { motion, callouts, stances } = useScene();

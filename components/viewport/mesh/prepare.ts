@@ -60,10 +60,14 @@ export interface Peak {
 
 const AS_MUCH = 0.98;
 
-/** The largest absolute strain over all bodies, and where it is; null where nothing strains. */
-export function peakOf(moments: readonly Pick<Posed, 'strain'>[]): Peak | null {
+/**
+ * The largest absolute strain over all bodies, or the largest of one sign, and where it is; null where nothing strains
+ * so.
+ */
+export function peakOf(moments: readonly Pick<Posed, 'strain'>[], sign: 1 | -1 | 0 = 0): Peak | null {
+  const counts = (one: number) => (sign === 0 ? Math.abs(one) : Math.max(0, sign * one));
   const largest = ({ strain }: Pick<Posed, 'strain'>) =>
-    strain.reduce((peak, one) => (Math.abs(one) > Math.abs(peak) ? one : peak), 0);
+    strain.reduce((peak, one) => (counts(one) > counts(peak) ? one : peak), 0);
   const peaks = moments.map(largest);
   const body = peaks.reduce((best, one, k) => (Math.abs(one) > Math.abs(peaks[best]!) ? k : best), 0);
   const peak = peaks[body] ?? 0;

@@ -2,6 +2,7 @@
 import { act } from 'react';
 import { createRoot, type Root } from 'react-dom/client';
 import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest';
+import { StandingProvider } from '@/components/studio/computed/standing-context';
 import { Faults } from '@/components/studio/head/notices';
 import { createSession, presetTyped, type Session } from '@/components/studio/session';
 import { SessionProvider } from '@/components/studio/session-context';
@@ -57,7 +58,9 @@ beforeEach(async () => {
     root.render(
       <SessionProvider value={session}>
         <Faults />
-        <DimensionSheet />
+        <StandingProvider>
+          <DimensionSheet />
+        </StandingProvider>
       </SessionProvider>,
     ),
   );

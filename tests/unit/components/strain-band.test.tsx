@@ -1,6 +1,7 @@
 import { renderToStaticMarkup } from 'react-dom/server';
 import { describe, expect, it } from 'vitest';
 import { StrainBand } from '@/components/studio/band/strain-band';
+import { StandingProvider } from '@/components/studio/computed/standing-context';
 import { createSession, presetTyped } from '@/components/studio/session';
 import { SessionProvider } from '@/components/studio/session-context';
 import type { Family } from '@/generators/contract';
@@ -17,7 +18,9 @@ function bandOf(change: (was: Report) => Partial<Report>, material = ROUND_PLAST
   const session = createSession({ ...TINY, check }, [material], presetTyped(TINY));
   return renderToStaticMarkup(
     <SessionProvider value={session}>
-      <StrainBand />
+      <StandingProvider>
+        <StrainBand />
+      </StandingProvider>
     </SessionProvider>,
   );
 }
