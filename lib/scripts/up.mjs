@@ -11,15 +11,29 @@ install();
 prepareDatabase();
 build();
 
+/** Without a mail server the demo gets one of its own, which keeps every mail on this machine. */
+async function demoMail() {
+  const real =
+    process.env.SMTP_URL || process.env.SEED === 'plain' || process.env.PUBLIC_URL?.startsWith('https');
+  if (real) return null;
+  const { startMailBox } = await import('./mail-box.mjs');
+  return startMailBox();
+}
+
+const box = await demoMail();
+const env = box ? { SMTP_URL: box.smtpUrl, MAIL_BOX_URL: box.pageUrl } : {};
+
 console.log(`\n▸ Starting the server on ${host}, port ${port}`);
-const server = startServer({ host, port });
+const server = startServer({ host, port, env: { PORT: port, ...env } });
 for (const signal of ['SIGINT', 'SIGTERM']) process.on(signal, () => server.kill(signal));
 server.on('exit', (code) => process.exit(code ?? 0));
 
 const open = host === '0.0.0.0' || host === '::' ? 'localhost' : host;
 try {
   await untilAnswers(`http://${open}:${port}/api/health`);
-  console.log(`\n✓ Bendwell answers at http://${open}:${port}\n`);
+  console.log(`\n✓ Bendwell answers at http://${open}:${port}`);
+  if (box) console.log(`  Mail stays on this machine and can be read at ${box.pageUrl}`);
+  console.log('');
 } catch (error) {
   console.error(`✗ ${error.message}`);
   server.kill('SIGTERM');
