@@ -1,5 +1,4 @@
 import { type Arm, guideStrain } from '@/lib/mechanics/beam';
-import { filletConcentration, narrowingAtFillet } from '@/lib/mechanics/fillet';
 import {
   type BentArm,
   bendArm,
@@ -9,16 +8,15 @@ import {
   strainAt,
 } from '@/lib/mechanics/large-deflection';
 import { cornerConcentration, panelSprings } from '@/lib/mechanics/panel';
-import { heldStrain } from '@/lib/mechanics/poisson';
 import {
   blockSprings,
-  narrowingSlope,
   type RootSection,
   type RootSpring,
   rootSection,
   wallSprings,
   widthStiffening,
 } from '@/lib/mechanics/root';
+import { standingConcentration } from '@/lib/mechanics/standing-arm';
 import { wallStrain } from '@/lib/mechanics/thin-wall';
 import { inPanel, slotWidth } from './dimensions';
 import type { HookValues } from './schema';
@@ -79,9 +77,7 @@ export interface HookStrain {
 
 /** Peak over nominal strain where the fillet ends; infinite where there is none. */
 function concentration(v: HookValues, flexible: FlexibleArm): number {
-  const narrowing = narrowingAtFillet(narrowingSlope(armOf(v)));
-  const held = heldStrain(flexible.poisson, v.rootWidth / v.rootThickness);
-  if (!inPanel(v)) return narrowing * held * filletConcentration(v.rootFillet / v.rootThickness);
+  if (!inPanel(v)) return standingConcentration(armOf(v), v.rootFillet, flexible.poisson);
   return flexible.stiffening * cornerConcentration(panelOf(v), sectionOf(v, flexible.poisson), v.armLength);
 }
 

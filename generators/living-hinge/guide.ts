@@ -1,6 +1,6 @@
+import { DRAWN_RANGE } from '@/lib/mechanics/web-fold';
 import type { Guide } from '../contract';
-import { DRAWN_RANGE } from './mechanics';
-import * as source from './sources';
+import * as source from '../web-sources';
 
 const percent = (value: number): string => `${value * 100} %`;
 
