@@ -1,6 +1,6 @@
 import type { FieldIssue } from '@/lib/errors';
 import { DEFAULT_USE, type Use } from '@/lib/materials/types';
-import { parseDecimal } from '@/lib/units';
+import { parseQuantity } from '@/lib/units/quantity';
 import type { Family, Preset } from './contract';
 import {
   choice,
@@ -97,7 +97,7 @@ export function designEntries(family: Family, design: Design): Entries {
 }
 
 function typedValue(field: Field | undefined, text: string): ParameterValue {
-  if (field?.type === 'number') return parseDecimal(text) ?? text;
+  if (field?.type === 'number') return parseQuantity(text, field.unit) ?? text;
   if (field?.type === 'toggle' && (text === 'true' || text === 'false')) return text === 'true';
   return text;
 }
@@ -111,7 +111,7 @@ function readUse(entries: Entries): { use: Use; issues: FieldIssue[] } {
       issues.push({ field: key, message: `${field.label} must be one of ${words.join(', ')}` });
     }
   }
-  const degrees = parseDecimal(entries.temperature ?? '');
+  const degrees = parseQuantity(entries.temperature ?? '', temperature.unit);
   if (degrees === null || degrees < temperature.min || degrees > temperature.max) {
     const message = `Temperature must be a number from ${temperature.min} to ${temperature.max} °C`;
     const bound =

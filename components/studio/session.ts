@@ -13,7 +13,7 @@ import {
 } from '@/generators/url-state';
 import type { FieldIssue } from '@/lib/errors';
 import type { Material } from '@/lib/materials/types';
-import { parseDecimal } from '@/lib/units';
+import { parseQuantity } from '@/lib/units/quantity';
 
 /** What stands in the fields, and the preset it started from; null for a design that came by a link. */
 export interface Typed {
@@ -60,7 +60,7 @@ export function chosenValues(family: Family, entries: Entries, valid: Design['va
 }
 
 const usable = (field: NumberField, text: string | undefined): boolean => {
-  const value = parseDecimal(text ?? '');
+  const value = parseQuantity(text ?? '', field.unit);
   return value !== null && value >= field.min && value <= field.max;
 };
 

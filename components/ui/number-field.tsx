@@ -49,7 +49,7 @@ export function NumberField({
         aria-valuenow={now}
         aria-valuemin={min}
         aria-valuemax={max}
-        aria-valuetext={unit ? `${text} ${unit}` : text}
+        aria-valuetext={unit && /^[\d\s.,+−-]*$/.test(text) ? `${text} ${unit}` : text}
         value={text}
         onChange={(event) => onText(event.target.value)}
         onKeyDown={(event) => {

@@ -80,6 +80,15 @@ describe('the dimension sheet', () => {
     expect(input('armLength').value).toBe('22.5');
   });
 
+  it('takes a length with its unit, or in another one, and writes it in millimetres on leaving', async () => {
+    await set(input('armLength'), '2,25 cm');
+    expect(input('armLength').getAttribute('aria-invalid')).toBeNull();
+    expect(input('armLength').getAttribute('aria-valuetext')).toBe('2,25 cm');
+    expect(session.reading.getState().design.values.armLength).toBe(22.5);
+    await leave(input('armLength'));
+    expect(input('armLength').value).toBe('22.5');
+  });
+
   it('steps by the arrows, tenfold with Shift, and stops at the range', async () => {
     await press(input('armLength'), 'ArrowUp');
     expect(input('armLength').value).toBe('20.5');

@@ -30,6 +30,7 @@ describe('stepping a number field', () => {
     ['900', 1, '60.0'],
     ['long', 1, '18.5'],
     ['', -1, '17.5'],
+    ['2 cm', 1, '20.5'],
   ])('from %s by %d steps shows %s', (text, steps, expected) => {
     expect(stepEntry(armLength, text, 18, steps)).toBe(expected);
   });
@@ -47,11 +48,13 @@ describe('leaving a number field', () => {
     ['12.25', '12.25'],
     ['+7', '7.0'],
     ['900', '900.0'],
+    ['12,5 mm', '12.5'],
+    ['1.3cm', '13.0'],
   ])('writes %s as %s', (text, expected) => {
     expect(tidyEntry(armLength, text)).toBe(expected);
   });
 
-  it.each(['long', '1.2.3', '1e3', '1 000', ''])('keeps "%s" as it was typed', (text) => {
+  it.each(['long', '1.2.3', '1e3', '1 000', '', '30 °', '5 kg'])('keeps "%s" as it was typed', (text) => {
     expect(tidyEntry(armLength, text)).toBe(text);
   });
 });

@@ -85,6 +85,11 @@ describe('a link', () => {
     expect(read.ok && read.values.values.armLength).toBe(14.5);
   });
 
+  it('takes figures with their units', () => {
+    const read = readLink(TINY, 'armLength=1.45%20cm&temperature=60%20%C2%B0C');
+    expect(read.ok && [read.values.values.armLength, read.values.use.temperature]).toEqual([14.5, 60]);
+  });
+
   it('names every field at fault with its bound and unit', () => {
     const read = readLink(TINY, 'armLength=900&undercut=wide&temperature=400&opening=daily');
     expect(read.ok ? [] : read.issues).toEqual(
