@@ -10,6 +10,7 @@ import { about as pressLid } from './press-lid/about';
 import { about as rodClip } from './rod-clip/about';
 import { about as screwCap } from './screw-cap/about';
 import { about as screwPot } from './screw-pot/about';
+import { about as sideBuckle } from './side-buckle/about';
 import { about as torsionLatch } from './torsion-latch/about';
 
 /** What the list knows of a family before it is loaded. */
@@ -35,6 +36,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: pegStrap,
     load: () => import('./peg-strap').then((m) => m.default),
     loadGuide: () => import('./peg-strap/guide').then((m) => m.default),
+  },
+  {
+    about: sideBuckle,
+    load: () => import('./side-buckle').then((m) => m.default),
+    loadGuide: () => import('./side-buckle/guide').then((m) => m.default),
   },
   {
     about: rodClip,

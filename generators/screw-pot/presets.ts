@@ -19,7 +19,7 @@ export const presets: readonly Preset<Values>[] = [
     use: { opening: 'often', layers: 'along', temperature: 30 },
     values: {
       innerDiameter: 50,
-      innerDepth: 32,
+      innerDepth: 46,
       body: 'flush',
       divider: 'four',
       thread: 'quick',
