@@ -57,6 +57,8 @@ const envSchema = z.object({
   RATE_READS_PER_MINUTE: perMinute('RATE_READS_PER_MINUTE', 1200),
   RATE_CHECKS_PER_MINUTE: perMinute('RATE_CHECKS_PER_MINUTE', 1200),
   RATE_EXPORTS_PER_MINUTE: perMinute('RATE_EXPORTS_PER_MINUTE', 240),
+  RATE_WRITES_PER_MINUTE: perMinute('RATE_WRITES_PER_MINUTE', 240),
+  RATE_PICTURES_PER_MINUTE: perMinute('RATE_PICTURES_PER_MINUTE', 1200),
 });
 
 export type Env = Readonly<z.infer<typeof envSchema>>;

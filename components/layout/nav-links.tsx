@@ -8,7 +8,7 @@ import { PLACES } from './places';
 export function NavLinks() {
   const path = usePathname();
   return (
-    <ul className="flex items-center gap-1 sm:gap-3">
+    <ul className="flex flex-wrap items-center gap-x-1 sm:gap-x-3">
       {PLACES.map(({ href, name }) => {
         const here = path === href || path.startsWith(`${href}/`);
         return (

@@ -6,6 +6,7 @@ export interface Place {
 /** Where the header leads. A place is listed once its page exists. */
 export const PLACES: readonly Place[] = [
   { href: '/design', name: 'Design' },
+  { href: '/designs', name: 'My designs' },
   { href: '/materials', name: 'Materials' },
   { href: '/guide', name: 'Guide' },
 ];

@@ -1,6 +1,6 @@
 'use client';
 
-import { use, useEffect, useEffectEvent, useState } from 'react';
+import { type ReactNode, use, useEffect, useEffectEvent, useState } from 'react';
 import type { ViewportState } from '@/components/viewport/types';
 import type { Family } from '@/generators/contract';
 import type { Material } from '@/lib/materials/types';
@@ -30,10 +30,11 @@ import { ViewPanel } from './view/view-panel';
  * After the page is alive: takes the design of the address where it differs from the one the page was made with
  * (coming back to a page kept by the browser), else the work kept here when the address says nothing.
  */
-function useReopened(session: Session, query: string) {
+function useReopened(session: Session, query: string, local: boolean) {
   const [restored, setRestored] = useState(false);
   const { family } = session;
   const reopen = useEffectEvent(() => {
+    if (!local) return;
     const here = window.location.search.slice(1);
     const start = startOf(family, here);
     const kept = start.linked ? null : keptWork(family, localStorage);
@@ -53,20 +54,20 @@ function useReopened(session: Session, query: string) {
   return { restored, close, fresh };
 }
 
-function Bench({ session, query }: { session: Session; query: string }) {
+function Bench({ session, query, keep, local = true, title }: Given & { session: Session }) {
   const { family } = session;
   const [stance, setStance] = useState<string | null>(null);
   const [picture, setPicture] = useState<ViewportState>({ status: 'loading' });
-  const { restored, close, fresh } = useReopened(session, query);
+  const { restored, close, fresh } = useReopened(session, query, local);
   const volume = picture.bodies?.reduce((sum, body) => sum + body.volume, 0) ?? null;
-  useKeeping(session);
+  useKeeping(session, local);
   useUndoKeys(session);
   return (
     <main className="frame grid grid-cols-[minmax(0,1fr)] gap-4 pt-5 pb-14">
       <div className="flex flex-wrap items-end justify-between gap-x-6 gap-y-3">
         <div className="flex flex-wrap items-baseline gap-x-6">
-          <h1 className="font-bold text-4xl tracking-tight sm:text-5xl">{family.about.name}</h1>
-          <StartingPoints />
+          <h1 className="font-bold text-4xl tracking-tight sm:text-5xl">{title ?? family.about.name}</h1>
+          {local ? <StartingPoints /> : <span className="text-muted">{family.about.name}</span>}
         </div>
         <div className="flex flex-wrap items-center gap-2">
           <Keys />
@@ -75,6 +76,7 @@ function Bench({ session, query }: { session: Session; query: string }) {
           <Files bodies={(picture.bodies ?? []).map(({ name }) => name)} stance={stance} />
         </div>
       </div>
+      {keep}
       {restored && <Restored onFresh={fresh} onKeep={close} />}
       <UnknownWords words={startOf(family, query).unknown} />
       <Faults />
@@ -96,24 +98,33 @@ function Bench({ session, query }: { session: Session; query: string }) {
   );
 }
 
-export interface StudioProps {
-  readonly family: string;
-  readonly materials: readonly Material[];
+interface Given {
   /** query of the address the page was asked for, without "?" */
   readonly query: string;
+  /** how the design is kept in an account */
+  readonly keep?: ReactNode;
+  /** whether this browser keeps the work and the address follows it; not where an account does */
+  readonly local?: boolean;
+  /** what the design is called; the family's name where left out */
+  readonly title?: string;
+}
+
+export interface StudioProps extends Given {
+  readonly family: string;
+  readonly materials: readonly Material[];
 }
 
 const begin = (family: Family, materials: readonly Material[], query: string): Session =>
   createSession(family, materials, startOf(family, query).typed);
 
 /** The design page of a family. */
-export function Studio({ family: id, materials, query }: StudioProps) {
+export function Studio({ family: id, materials, ...given }: StudioProps) {
   const family = use(loadFamily(id));
-  const [session] = useState(() => begin(family, materials, query));
+  const [session] = useState(() => begin(family, materials, given.query));
   return (
     <SessionProvider value={session}>
       <StandingProvider>
-        <Bench session={session} query={query} />
+        <Bench session={session} {...given} />
       </StandingProvider>
     </SessionProvider>
   );

@@ -53,11 +53,13 @@ function sealOnPause({ typed, seal }: Session) {
   };
 }
 
-export function useKeeping(session: Session): void {
+/** `local`: in the address and in this browser. */
+export function useKeeping(session: Session, local: boolean): void {
   useEffect(() => {
-    const stops = [keepAddress(session), keepTyped(session), sealOnPause(session)];
+    const kept = local ? [keepAddress(session), keepTyped(session)] : [];
+    const stops = [...kept, sealOnPause(session)];
     return () => {
       for (const stop of stops) stop();
     };
-  }, [session]);
+  }, [session, local]);
 }

@@ -5,6 +5,7 @@ import type { Verdict } from '@/generators/report';
 import { Conflict, InvalidInput, NotFound } from '@/lib/errors';
 import type { Use } from '@/lib/materials/types';
 import { type GivenContent, readContent } from './design-content';
+import { type Picture, pictureOf } from './pictures';
 import { permit, type Viewer } from './policy';
 import { startedFromVersion } from './provenance';
 
@@ -35,6 +36,8 @@ export interface NewDesign extends GivenContent {
 export interface DesignChange extends GivenContent {
   /** the revision the change was made on */
   readonly revision: number;
+  /** a state of its own in the history, however soon after the last */
+  readonly apart?: boolean | undefined;
 }
 
 export type DesignFilter = Partial<Omit<queries.DesignFilter, 'limit' | 'offset'>> & {
@@ -138,11 +141,10 @@ interface Write {
   readonly id: string;
   readonly revision: number;
   readonly content: queries.Content;
-  /** a state of its own in the history, however soon after the last */
-  readonly apart?: boolean;
+  readonly apart: boolean;
 }
 
-function write({ ownerId, id, revision, content, apart = false }: Write): Design {
+function write({ ownerId, id, revision, content, apart }: Write): Design {
   const at = new Date();
   return database().transaction(
     (db) => {
@@ -165,7 +167,8 @@ function write({ ownerId, id, revision, content, apart = false }: Write): Design
 export async function saveDesign(viewer: Viewer, id: string, change: DesignChange): Promise<Design> {
   const owner = permit(viewer, 'design.own');
   const { content } = await readContent(change);
-  return write({ ownerId: owner.id, id, revision: change.revision, content });
+  const { revision, apart = false } = change;
+  return write({ ownerId: owner.id, id, revision, content, apart });
 }
 
 export function renameDesign(viewer: Viewer, id: string, name: string): Design {
@@ -223,4 +226,9 @@ export async function restoreState(
   const { family, material, use, values } = state;
   const { content } = await readContent({ family, material, use, parameters: values });
   return write({ ownerId: owner.id, id, revision: given.revision, content, apart: true });
+}
+
+export function designPicture(viewer: Viewer, id: string): Promise<Picture> {
+  const { family, parameters } = getDesign(viewer, id);
+  return pictureOf({ family, values: parameters });
 }

@@ -1,13 +1,17 @@
 import { env } from '@/lib/env';
 import { type RateLimit, rateLimit } from './rate-limit';
 
-export type RateName = 'reads' | 'checks' | 'exports';
+export type RateName = 'reads' | 'checks' | 'exports' | 'writes' | 'pictures';
 
 const perMinute = (name: RateName): number => {
-  const { RATE_READS_PER_MINUTE, RATE_CHECKS_PER_MINUTE, RATE_EXPORTS_PER_MINUTE } = env();
-  return { reads: RATE_READS_PER_MINUTE, checks: RATE_CHECKS_PER_MINUTE, exports: RATE_EXPORTS_PER_MINUTE }[
-    name
-  ];
+  const given = env();
+  return {
+    reads: given.RATE_READS_PER_MINUTE,
+    checks: given.RATE_CHECKS_PER_MINUTE,
+    exports: given.RATE_EXPORTS_PER_MINUTE,
+    writes: given.RATE_WRITES_PER_MINUTE,
+    pictures: given.RATE_PICTURES_PER_MINUTE,
+  }[name];
 };
 
 const made = new Map<RateName, RateLimit>();

@@ -2,7 +2,7 @@ import { RequestProblem } from './problem';
 import { route } from './route';
 
 /** Answers the methods an address does not take, naming those it does. */
-const takesOnly = (allowed: string) =>
+export const takesOnly = (allowed: string) =>
   route({
     rateLimit: 'reads',
     handler: ({ request }) => {

@@ -7,7 +7,7 @@ function refuse(limit: number): never {
 }
 
 /** The body's bytes, read no further than the limit whatever Content-Length says. */
-async function readBytes(request: Request, limit: number): Promise<Uint8Array> {
+export async function readBytes(request: Request, limit: number): Promise<Uint8Array> {
   if (Number(request.headers.get('content-length') ?? 0) > limit) refuse(limit);
   const chunks: Uint8Array[] = [];
   let size = 0;

@@ -1,4 +1,6 @@
 import type { z } from 'zod';
+import { currentViewer } from '@/lib/auth/session';
+import type { Viewer } from '@/lib/auth/viewer';
 import {
   Conflict,
   InvalidInput,
@@ -15,6 +17,7 @@ import { log } from './log';
 import { problemResponse, RequestProblem } from './problem';
 import { clientOf } from './rate-limit';
 import { readJson } from './read-json';
+import { fromOwnPage } from './same-origin';
 
 interface Schemas<B, P> {
   readonly body?: z.ZodType<B>;
@@ -26,6 +29,8 @@ interface Call<B, P> {
   readonly request: Request;
   readonly body: B;
   readonly params: P;
+  /** who asks; always null on a route without `auth` */
+  readonly viewer: Viewer;
   /** query without "?" */
   readonly query: string;
 }
@@ -34,6 +39,8 @@ interface RouteSpec<B, P> {
   readonly schemas?: Schemas<B, P>;
   readonly limits?: { readonly bodyBytes?: number; readonly urlCharacters?: number };
   readonly rateLimit: RateName;
+  /** the route knows who asks, and takes changes from pages of this site only */
+  readonly auth?: boolean;
   /** a value is sent as JSON, a Response as it is */
   readonly handler: (call: Call<B, P>) => unknown;
 }
@@ -65,6 +72,13 @@ function parse<T>(schema: z.ZodType<T> | undefined, input: unknown, whole: strin
   return result.data;
 }
 
+const READS: readonly string[] = ['GET', 'HEAD'];
+
+function checkOrigin(request: Request): void {
+  if (READS.includes(request.method) || fromOwnPage(request.headers)) return;
+  throw new RequestProblem('not-allowed', 'The request was sent by a page of another site.');
+}
+
 async function readCall<B, P>(
   spec: RouteSpec<B, P>,
   request: Request,
@@ -75,9 +89,12 @@ async function readCall<B, P>(
     throw new RequestProblem('uri-too-long', `The address may be at most ${urlCharacters} characters long.`);
   }
   await limiter(spec.rateLimit).take(clientOf(request));
+  if (spec.auth) checkOrigin(request);
+  const viewer = spec.auth ? await currentViewer() : null;
   const body = spec.schemas?.body && (await readJson(request, bodyBytes));
   return {
     request,
+    viewer,
     body: parse(spec.schemas?.body, body, 'body', spec.schemas?.units),
     params: parse(spec.schemas?.params, await params, 'address'),
     query: new URL(request.url).search.slice(1),

@@ -35,3 +35,22 @@ export async function problemOf(response: Response, kind: ProblemKind): Promise<
   expect(problem.requestId).toBe(response.headers.get('x-request-id'));
   return problem;
 }
+
+/** Any request with a JSON body, as a page of this site sends it. */
+export function sendTo(
+  handler: Handler,
+  method: string,
+  address: string,
+  {
+    body,
+    params = {},
+    headers = {},
+  }: { body?: unknown; params?: Params; headers?: Record<string, string> } = {},
+): Promise<Response> {
+  const request = new Request(BASE + address, {
+    method,
+    headers: { 'Content-Type': 'application/json', 'Sec-Fetch-Site': 'same-origin', ...headers },
+    ...(body !== undefined && { body: JSON.stringify(body) }),
+  });
+  return handler(request, { params: Promise.resolve(params) });
+}

@@ -13,8 +13,7 @@ export function CopyLink() {
   const { family, reading } = useSession();
   const [copied, setCopied] = useState<Copied>({ state: 'no' });
   const copy = async () => {
-    const { origin, pathname } = window.location;
-    const link = `${origin}${pathname}?${writeLink(family, reading.getState().design)}`;
+    const link = `${window.location.origin}/design/${family.about.id}?${writeLink(family, reading.getState().design)}`;
     try {
       await navigator.clipboard.writeText(link);
       setCopied({ state: 'yes' });

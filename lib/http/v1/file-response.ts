@@ -1,6 +1,6 @@
 import type { ExportedFile } from '@/lib/access/export';
 
-const matches = (header: string | null, etag: string): boolean =>
+export const matches = (header: string | null, etag: string): boolean =>
   (header ?? '').split(',').some((tag) => tag.trim() === '*' || tag.trim().replace(/^W\//, '') === etag);
 
 /** A file to save, or "not modified" for a client that has it already. */

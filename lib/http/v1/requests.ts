@@ -2,13 +2,13 @@ import { z } from 'zod';
 import { USE_FIELDS } from '@/generators/url-state';
 import type { FieldUnits } from '../issues';
 
-const familyId = z
+export const familyId = z
   .string({ error: 'family must be the id of a part family' })
   .min(1, 'family must be the id of a part family')
   .max(60, 'family must have at most 60 characters')
   .meta({ description: 'Id of a part family, see GET /api/v1/families', examples: ['cantilever-hook'] });
 
-const materialId = z
+export const materialId = z
   .string({ error: 'material must be the id of a material, or an object with its id' })
   .min(1, 'material must be the id of a material')
   .max(60, 'material must have at most 60 characters');
@@ -43,13 +43,13 @@ const materialWithOverrides = z
       'A material with single properties given: secant modulus (MPa, used as it stands), friction (one figure carries a band of +- 50 %), allowable strain (fraction, final: no factor for use, layers or temperature is applied to it).',
   });
 
-const parameters = z
+export const parameters = z
   .record(z.string().max(60), z.unknown())
   .refine((given) => Object.keys(given).length <= 200, 'parameters must have at most 200 entries')
   .meta({ description: 'By name, as in the JSON Schema of the family; left out ones take the default.' });
 
 const { temperature } = USE_FIELDS;
-const use = z
+export const use = z
   .strictObject({
     opening: z
       .enum(['once', 'sometimes', 'often'], 'opening must be one of once, sometimes, often')

@@ -16,7 +16,8 @@ const use = z.strictObject({
   layers,
   temperature: z.number(),
 });
-const verdict = z.enum(['within-limit', 'close-to-limit', 'over-limit', 'not-known']);
+export const VERDICTS = ['within-limit', 'close-to-limit', 'over-limit', 'not-known'] as const;
+const verdict = z.enum(VERDICTS);
 const known = z.number().nullable();
 const values = z.record(z.string(), z.unknown());
 

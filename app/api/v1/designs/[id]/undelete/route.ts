@@ -1,0 +1,16 @@
+import { undeleteDesign } from '@/lib/access/designs';
+import { route } from '@/lib/http/route';
+import { idParams } from '@/lib/http/v1/requests';
+
+export const POST = route({
+  auth: true,
+  rateLimit: 'writes',
+  schemas: { params: idParams },
+  handler: ({ viewer, params }) => undeleteDesign(viewer, params.id),
+});
+export {
+  takesPost as DELETE,
+  takesPost as GET,
+  takesPost as PATCH,
+  takesPost as PUT,
+} from '@/lib/http/methods';
