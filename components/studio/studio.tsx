@@ -25,6 +25,7 @@ import { Remedies } from './sheet/remedies';
 import { useKeeping } from './use-keeping';
 import { useUndoKeys } from './use-undo-keys';
 import { ViewPanel } from './view/view-panel';
+import { volumeOf } from './view/volume';
 
 /**
  * After the page is alive: takes the design of the address where it differs from the one the page was made with
@@ -59,7 +60,7 @@ function Bench({ session, query, keep, local = true, title }: Given & { session:
   const [stance, setStance] = useState<string | null>(null);
   const [picture, setPicture] = useState<ViewportState>({ status: 'loading' });
   const { restored, close, fresh } = useReopened(session, query, local);
-  const volume = picture.bodies?.reduce((sum, body) => sum + body.volume, 0) ?? null;
+  const volume = volumeOf(picture);
   useKeeping(session, local);
   useUndoKeys(session);
   return (

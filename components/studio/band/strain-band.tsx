@@ -110,18 +110,27 @@ function spoken(figure: Figure): string {
   return `${figure.label} ${formatQuantity(figure.value, figure.unit)}, ${limit}, ${verdict}`;
 }
 
-/** What goes into the part: mass and price of the plastic, as if printed solid. */
-function Stuff({ volume }: { volume: number }) {
+/** What goes into the part: mass and price of the plastic, as if printed solid; `volume` null while it is not known. */
+function Stuff({ volume }: { volume: number | null }) {
   const material = useReading((reading) => reading.material);
   if (!material.density) return null;
-  const mass = (volume / 1000) * material.density.value;
+  const mass = volume === null ? null : (volume / 1000) * material.density.value;
   const price = material.price;
   return (
     <div className="xl:max-w-36">
       <dt className="mb-1.5 text-muted text-sm leading-tight">Mass, printed solid</dt>
       <dd>
-        <BigFigure value={mass} unit="g" size="text-[2.1rem]" />
-        {price && (
+        {mass === null ? (
+          <>
+            <span aria-hidden="true" className="font-bold text-[2.1rem] leading-none">
+              …
+            </span>
+            <span className="sr-only">not known yet</span>
+          </>
+        ) : (
+          <BigFigure value={mass} unit="g" size="text-[2.1rem]" />
+        )}
+        {price && mass !== null && (
           <span className="mt-1 block text-muted text-xs tabular-nums">
             {((mass / 1000) * price.perKg).toFixed(2)} {price.currency}, price of {price.asOf}
           </span>
@@ -136,7 +145,7 @@ function basisName({ basis }: Standing): string {
   return basis.kind === 'computed' && basis.pending ? 'computed-small' : basis.kind;
 }
 
-/** `volume` of all bodies in mm3, once the solid is made. */
+/** `volume` of all bodies in mm3, null until the solid is made. */
 export function StrainBand({ volume = null }: { volume?: number | null }) {
   const { standing, took, firstAnswer } = useSolving();
   const { report } = standing;
@@ -163,14 +172,12 @@ export function StrainBand({ volume = null }: { volume?: number | null }) {
             <BasisLine figure={figure.id} />
             <Basis figure={figure} report={report} />
           </div>
-          {(headlines.length > 0 || volume !== null) && (
-            <dl className="flex flex-wrap content-start gap-x-8 gap-y-4 border-hair border-t pt-4 lg:max-w-56 lg:border-t-0 lg:border-l lg:pt-0 lg:pl-7 xl:grid xl:max-w-none xl:grid-cols-2">
-              {headlines.map((one) => (
-                <Headline key={one.id} figure={one} />
-              ))}
-              {volume !== null && <Stuff volume={volume} />}
-            </dl>
-          )}
+          <dl className="flex flex-wrap content-start gap-x-8 gap-y-4 border-hair border-t pt-4 lg:max-w-56 lg:border-t-0 lg:border-l lg:pt-0 lg:pl-7 xl:grid xl:max-w-none xl:grid-cols-2">
+            {headlines.map((one) => (
+              <Headline key={one.id} figure={one} />
+            ))}
+            <Stuff volume={volume} />
+          </dl>
         </div>
         <UseStrip />
         <p role="status" className="sr-only">

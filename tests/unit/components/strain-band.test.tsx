@@ -10,7 +10,11 @@ import { ROUND_PLASTIC, TINY } from '../generators/tiny-family';
 
 const { source } = ROUND_PLASTIC.poisson;
 
-function bandOf(change: (was: Report) => Partial<Report>, material = ROUND_PLASTIC): string {
+function bandOf(
+  change: (was: Report) => Partial<Report>,
+  material = ROUND_PLASTIC,
+  volume: number | null = null,
+): string {
   const check: Family['check'] = (...given) => {
     const was = TINY.check(...given);
     return report({ ...was, ...change(was) });
@@ -19,7 +23,7 @@ function bandOf(change: (was: Report) => Partial<Report>, material = ROUND_PLAST
   return renderToStaticMarkup(
     <SessionProvider value={session}>
       <StandingProvider>
-        <StrainBand />
+        <StrainBand volume={volume} />
       </StandingProvider>
     </SessionProvider>,
   );
@@ -66,6 +70,16 @@ describe('the strain band', () => {
     expect(text).toContain('Peak strain not known');
     expect(text).toContain('The arm is too short.');
     expect(text).not.toMatch(/Peak strain 0/);
+  });
+
+  it('does not know the mass before the solid is made, and gives neither weight nor price', () => {
+    const text = words(bandOf(() => ({})));
+    expect(text).toContain('Mass, printed solid … not known yet');
+    expect(text).not.toMatch(/\d g\b|EUR/);
+    // 2500 mm3 of 1.0 g/cm3 weigh 2.5 g
+    const made = words(bandOf(() => ({}), ROUND_PLASTIC, 2500));
+    expect(made).toMatch(/Mass, printed solid 2\.5\s*g/);
+    expect(made).not.toContain('not known yet');
   });
 
   it('hatches below a least value when the governing figure is a load to be carried', () => {
