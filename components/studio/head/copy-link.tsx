@@ -4,7 +4,7 @@ import { Link2 } from 'lucide-react';
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { writeLink } from '@/generators/url-state';
-import { useSession } from '../session-context';
+import { useReading, useSession } from '../session-context';
 
 type Copied = { state: 'no' | 'yes' } | { state: 'by-hand'; link: string };
 
@@ -12,6 +12,7 @@ type Copied = { state: 'no' | 'yes' } | { state: 'by-hand'; link: string };
 export function CopyLink() {
   const { family, reading } = useSession();
   const [copied, setCopied] = useState<Copied>({ state: 'no' });
+  const faulty = useReading(({ issues }) => issues.length > 0);
   const copy = async () => {
     const link = `${window.location.origin}/design/${family.about.id}?${writeLink(family, reading.getState().design)}`;
     try {
@@ -37,10 +38,16 @@ export function CopyLink() {
       </label>
     );
   }
+  const done = copied.state === 'yes';
   return (
-    <Button onClick={copy}>
-      <Link2 aria-hidden="true" size={18} />
-      <span role="status">{copied.state === 'yes' ? 'Link copied' : 'Copy link'}</span>
-    </Button>
+    <>
+      <Button onClick={copy}>
+        <Link2 aria-hidden="true" size={18} />
+        {done ? 'Link copied' : 'Copy link'}
+      </Button>
+      <span role="status" className="sr-only">
+        {done && (faulty ? 'Link of the last valid part copied' : 'Link copied')}
+      </span>
+    </>
   );
 }

@@ -42,6 +42,7 @@ export function exportLink(family: Family, design: Design, { format, stance, bod
 export function Files({ bodies, stance }: { bodies: readonly string[]; stance: string | null }) {
   const { family } = useSession();
   const design = useReading((reading) => reading.design);
+  const faulty = useReading(({ issues }) => issues.length > 0);
   const [format, setFormat] = useState<FileFormat>('stl');
   const choices = bodies.length > 1 ? bodies : [];
   return (
@@ -53,13 +54,17 @@ export function Files({ bodies, stance }: { bodies: readonly string[]; stance: s
       >
         <Download aria-hidden="true" size={18} />
         Download {format.toUpperCase()}
+        {faulty && ' '}
+        {faulty && (
+          <span className="max-w-20 whitespace-normal font-normal text-xs/tight">of the last valid part</span>
+        )}
       </a>
       <Note
         aria-label="Other files"
         className={classNames(buttonClass('ink'), 'rounded-l-none border-l-paper px-2!')}
         trigger={<ChevronDown aria-hidden="true" size={18} />}
       >
-        <h2 className="mb-2 font-bold">File</h2>
+        <h2 className="mb-2 font-bold">{faulty ? 'File of the last valid part' : 'File'}</h2>
         <Segmented legend="Format" value={format} options={FORMATS} onChange={setFormat} />
         <p className="mt-1.5 text-muted">{ABOUT[format]}</p>
         <ul className="mt-3 grid gap-1">
