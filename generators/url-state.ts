@@ -182,16 +182,41 @@ function plain(text: string): string {
   }
 }
 
-/** A link too long is read up to its last whole word. */
-const withinLimit = (query: string): string =>
-  query.length > LINK_LIMIT ? query.slice(0, query.lastIndexOf('&', LINK_LIMIT) + 1) : query;
+/** A link too long is read up to its last whole word; gives what is read and what is not. */
+function parted(query: string): readonly [string, string] {
+  if (query.length <= LINK_LIMIT) return [query, ''];
+  const end = query.lastIndexOf('&', LINK_LIMIT) + 1;
+  return [query.slice(0, end), query.slice(end)];
+}
 
-/** The entries a link sets, and the words in it that this family does not know. A later word wins. */
-export function linkEntries(family: Family, query: string): { entries: Entries; unknown: string[] } {
-  const pairs = pairsOf(withinLimit(query));
-  const known = (key: string) => LINK_WORDS.includes(key) || Object.hasOwn(family.parameters.fields, key);
-  const unknown = pairs.map(([key]) => key).filter((key) => !known(key));
-  const entries = Object.fromEntries(pairs.filter(([key]) => known(key)));
-  if (Object.keys(entries).length === 0) return { entries, unknown };
-  return { entries: { ...emptyEntries(family), ...entries }, unknown };
+/** What a link sets, and the names in it that could not be used. */
+export interface LinkEntries {
+  readonly entries: Entries;
+  /** words this family does not know */
+  readonly unknown: readonly string[];
+  /** known words given more than once; the last one counts */
+  readonly repeated: readonly string[];
+  /** words past the longest link that is read */
+  readonly unread: readonly string[];
+}
+
+const unique = (words: readonly string[]): string[] => [...new Set(words)];
+
+/** The words that stand more than once in a list, each told once. */
+export const repeatedIn = (words: readonly string[]): string[] =>
+  unique(words.filter((word, at) => words.indexOf(word) < at));
+
+/** Reads a link as far as it goes. A later word wins. */
+export function linkEntries(family: Family, query: string): LinkEntries {
+  const [read, left] = parted(query);
+  const pairs = pairsOf(read);
+  const isKnown = (key: string) => LINK_WORDS.includes(key) || Object.hasOwn(family.parameters.fields, key);
+  const known = pairs.filter(([key]) => isKnown(key));
+  const given = Object.fromEntries(known);
+  return {
+    entries: known.length === 0 ? given : { ...emptyEntries(family), ...given },
+    unknown: unique(pairs.map(([key]) => key).filter((key) => !isKnown(key))),
+    repeated: repeatedIn(known.map(([key]) => key)),
+    unread: unique(pairsOf(left).map(([key]) => key)),
+  };
 }

@@ -1,5 +1,5 @@
 import type { Family } from '@/generators/contract';
-import { type Entries, linkEntries } from '@/generators/url-state';
+import { type Entries, type LinkEntries, linkEntries } from '@/generators/url-state';
 import { presetTyped, type Typed } from './session';
 import { tidyEntry } from './step-entry';
 
@@ -59,8 +59,9 @@ export function dropWork(family: Family, storage: Pick<Storage, 'removeItem'>): 
 
 export interface Start {
   readonly typed: Typed;
-  /** words of the link that the family does not know */
-  readonly unknown: readonly string[];
+  /** names in the link that could not be used */
+  readonly unused: Omit<LinkEntries, 'entries'>;
+  /** true where the link says something about the part */
   readonly linked: boolean;
 }
 
@@ -77,11 +78,11 @@ function tidied(family: Family, entries: Entries): Entries {
 
 /** What the page opens with: the link where it says something, else the first preset. */
 export function startOf(family: Family, query: string): Start {
-  const { entries, unknown } = linkEntries(family, query);
+  const { entries, ...unused } = linkEntries(family, query);
   const linked = Object.keys(entries).length > 0;
   return {
     typed: linked ? { entries: tidied(family, entries), from: null } : presetTyped(family),
-    unknown,
+    unused,
     linked,
   };
 }

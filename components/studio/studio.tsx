@@ -1,6 +1,6 @@
 'use client';
 
-import { type ReactNode, use, useEffect, useEffectEvent, useState } from 'react';
+import { type ReactNode, use, useEffect, useEffectEvent, useRef, useState } from 'react';
 import type { ViewportState } from '@/components/viewport/types';
 import type { Family } from '@/generators/contract';
 import type { Material } from '@/lib/materials/types';
@@ -14,7 +14,7 @@ import { CopyLink } from './head/copy-link';
 import { Files } from './head/files';
 import { HistoryButtons } from './head/history-buttons';
 import { Keys } from './head/keys';
-import { Faults, Restored, UnknownWords } from './head/notices';
+import { Faults, LinkNotes, Restored } from './head/notices';
 import { StartingPoints } from './head/starting-points';
 import { loadFamily } from './load-family';
 import { Plastics } from './plastics';
@@ -33,9 +33,11 @@ import { volumeOf } from './view/volume';
  */
 function useReopened(session: Session, query: string, local: boolean) {
   const [restored, setRestored] = useState(false);
+  const opened = useRef<Session>(null);
   const { family } = session;
   const reopen = useEffectEvent(() => {
-    if (!local) return;
+    if (!local || opened.current === session) return;
+    opened.current = session;
     const here = window.location.search.slice(1);
     const start = startOf(family, here);
     const kept = start.linked ? null : keptWork(family, localStorage);
@@ -78,8 +80,8 @@ function Bench({ session, query, keep, local = true, title }: Given & { session:
         </div>
       </div>
       {keep}
-      {restored && <Restored onFresh={fresh} onKeep={close} />}
-      <UnknownWords words={startOf(family, query).unknown} />
+      {restored && <Restored instead={query !== ''} onFresh={fresh} onKeep={close} />}
+      <LinkNotes {...startOf(family, query)} />
       <Faults />
       <StrainBand volume={volume} />
       <div className="grid grid-cols-[minmax(0,1fr)] items-start gap-4 lg:grid-cols-[minmax(0,1fr)_27rem]">

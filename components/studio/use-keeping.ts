@@ -2,7 +2,7 @@
 
 import { useEffect } from 'react';
 import { writeLink } from '@/generators/url-state';
-import { keepWork } from './autosave';
+import { keepWork, startOf } from './autosave';
 import type { Session } from './session';
 import { throttle } from './throttle';
 
@@ -10,8 +10,16 @@ const ADDRESS_EVERY = 400;
 const SAVE_EVERY = 800;
 const UNDO_PAUSE = 900;
 
+/** True where the address as it is would bring back what stands in the fields. */
+function isInAddress({ family, typed }: Session): boolean {
+  const { entries } = startOf(family, window.location.search.slice(1)).typed;
+  const shown = typed.getState().entries;
+  return Object.keys(shown).every((key) => shown[key] === entries[key]);
+}
+
 /** Keeps the design in the address, so that a reload or a copied link brings it back; no new history entries. */
-function keepAddress({ family, reading }: Session) {
+export function keepAddress(session: Session) {
+  const { family, reading } = session;
   const path = window.location.pathname;
   const address = throttle(() => {
     if (window.location.pathname !== path) return;
@@ -21,6 +29,7 @@ function keepAddress({ family, reading }: Session) {
   const stop = reading.subscribe((now, was) => {
     if (now.design !== was.design) address.call();
   });
+  if (!isInAddress(session)) address.call();
   return () => {
     stop();
     address.cancel();

@@ -123,6 +123,8 @@ describe('an export that cannot be', () => {
     ['family=living-hinge&format=stl&opening=daily', 'opening'],
     ['family=living-hinge&format=stl&webLength=1e1', 'webLength'],
     ['family=living-hinge&format=stl&webLength=NaN', 'webLength'],
+    ['family=living-hinge&format=stl&webLength=3&webLength=4', 'webLength'],
+    ['family=living-hinge&format=stl&format=3mf', 'format'],
   ])('names the word at fault in %s', async (query, field) => {
     expect((await faults(await link(query))).map((issue) => issue.field)).toContain(field);
   });

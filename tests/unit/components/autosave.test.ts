@@ -64,7 +64,7 @@ describe('opening the page', () => {
   it('takes the first preset where it does not', () => {
     expect(startOf(TINY, 'from=mail')).toEqual({
       typed: presetTyped(TINY),
-      unknown: ['from'],
+      unused: { unknown: ['from'], repeated: [], unread: [] },
       linked: false,
     });
   });

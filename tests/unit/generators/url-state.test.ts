@@ -83,6 +83,10 @@ describe('a link', () => {
   it('takes a comma for a decimal point, and the later of two values', () => {
     const read = readLink(TINY, 'armLength=12,5&armLength=14%2C5');
     expect(read.ok && read.values.values.armLength).toBe(14.5);
+    expect(linkEntries(TINY, 'armLength=12&tip=1&armLength=14&from=a&from=b')).toMatchObject({
+      repeated: ['armLength'],
+      unknown: ['from'],
+    });
   });
 
   it('takes figures with their units', () => {
@@ -117,7 +121,11 @@ describe('a link', () => {
 
   it('is read up to the last whole word within its longest length', () => {
     const long = `armLength=21&${'x=1&'.repeat(LINK_LIMIT / 4)}thickness=3`;
-    expect(linkEntries(TINY, long).entries).toMatchObject({ armLength: '21', thickness: '2.0' });
+    expect(linkEntries(TINY, long)).toMatchObject({
+      entries: { armLength: '21', thickness: '2.0' },
+      unknown: ['x'],
+      unread: ['x', 'thickness'],
+    });
     expect(linkEntries(TINY, `armLength=${'1'.repeat(LINK_LIMIT)}`).entries).toEqual({});
   });
 
