@@ -16,7 +16,7 @@ export interface Computed {
   readonly kind: 'tension' | 'compression';
   readonly body: string;
   readonly place: Vec3;
-  /** N or N mm; null where the plastic's modulus is not known */
+  /** N or N mm; null where the plastic's modulus is not known, or not at this temperature */
   readonly force: number | null;
   /** the corrected formula's peak; null where it has none */
   readonly formula: number | null;
@@ -78,7 +78,7 @@ function computedOf(given: Report, plane: BendingPlane, solution: Solved): Compu
     kind: signed < 0 ? 'compression' : 'tension',
     body: plane.body,
     place: movePoint(plane.placements[0], [place[0], place[1], 0]),
-    force: forceOf(solution, plane),
+    force: given.allowable.stiffness === 'not-known' ? null : forceOf(solution, plane),
     formula,
     difference,
     likely: tells ? likelyReason(solution, plane) : null,

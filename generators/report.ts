@@ -57,10 +57,11 @@ export function judge(value: number | null, limit: number | null, kind: 'max' | 
   return share > CLOSE ? 'close-to-limit' : 'within-limit';
 }
 
-type Loose = Pick<Figure, 'id' | 'label' | 'unit' | 'because' | 'source'> & Partial<Figure>;
+/** A figure as a check gives it; what it leaves out is not known. */
+export type GivenFigure = Pick<Figure, 'id' | 'label' | 'unit' | 'because' | 'source'> & Partial<Figure>;
 
 /** A figure without a limit. Non-finite values become "not known". */
-export function plainFigure(given: Loose): Figure {
+export function plainFigure(given: GivenFigure): Figure {
   return {
     value: null,
     handbook: null,
@@ -74,7 +75,7 @@ export function plainFigure(given: Loose): Figure {
 }
 
 /** A figure judged against its limit; the verdict may be forced, for example outside the validity range. */
-export function judgedFigure(given: Loose): Figure {
+export function judgedFigure(given: GivenFigure): Figure {
   const plain = plainFigure(given);
   return { ...plain, verdict: given.verdict ?? judge(plain.value, plain.limit, plain.limitKind) };
 }
@@ -92,9 +93,34 @@ export function worstVerdict(figures: readonly Figure[]): Verdict {
   return verdicts.reduce<Verdict>((worst, next) => (RANK[next] > RANK[worst] ? next : worst), 'within-limit');
 }
 
-/** Completes a report: the verdict is the worst of its figures. */
+/** Units of figures that stand on a modulus. */
+const STIFF: ReadonlySet<Unit> = new Set<Unit>(['N', 'N/mm', 'Nmm', 'Nm', 'Hz']);
+
+const isStiff = ({ unit }: { readonly unit: Unit }): boolean => STIFF.has(unit);
+
+/** A force worked out with the moduli of 23 °C, as far as it stands at the temperature of use. */
+function atTemperature(figure: Figure, { stiffness }: AllowableStrain): Figure {
+  if (stiffness === 'as-given' || !isStiff(figure) || figure.value === null) return figure;
+  if (stiffness === 'softer') {
+    const note = ' Worked out for 23 °C: warm plastic is softer.';
+    const because = figure.because.endsWith(note) ? figure.because : figure.because + note;
+    return { ...figure, because };
+  }
+  const because = 'Not known: only the modulus at 23 °C is known, and it does not hold at this temperature.';
+  const verdict = figure.verdict && 'not-known';
+  return { ...figure, value: null, handbook: null, low: null, high: null, verdict, because };
+}
+
+/**
+ * Completes a report: the verdict is the worst of its figures. Where the plastic's stiffness at the temperature of
+ * use is not known, neither are its forces.
+ */
 export function report(parts: Omit<Report, 'verdict'>): Report {
-  return { ...parts, verdict: worstVerdict(parts.figures) };
+  const { allowable } = parts;
+  const figures = parts.figures.map((figure) => atTemperature(figure, allowable));
+  const curves =
+    allowable.stiffness === 'not-known' ? parts.curves.filter(({ y }) => !isStiff(y)) : parts.curves;
+  return { ...parts, figures, curves, verdict: worstVerdict(figures) };
 }
 
 export const VERDICT_WORDS: Readonly<Record<Verdict, string>> = {

@@ -3,13 +3,15 @@ import {
   lockingRatio,
   nutFactorTorque,
   PRINTED_NUT_FACTOR,
+  type TorqueRange,
   torquePerLoad,
 } from '@/lib/mechanics/thread-torque';
 import { formatQuantity } from '@/lib/units';
-import { type Figure, judgedFigure, plainFigure } from './report';
+import { type Figure, type GivenFigure, judgedFigure, plainFigure } from './report';
 import { MODULUS_MISSING, type ScrewContext, type Seat, strengthMissing } from './screw-context';
 import * as source from './screw-sources';
 
+const torqueText = (value: number): string => formatQuantity(value, 'Nmm');
 const newton = (value: number): string => formatQuantity(value, 'N');
 
 function strengthFigures(context: ScrewContext): Figure[] {
@@ -103,6 +105,15 @@ function seatTorque(
   };
 }
 
+/** A torque is close to the limit where a light hand does not reach it, and over it where a firm one does not. */
+function judgedByHand(figure: GivenFigure, hand: TorqueRange | undefined): Figure {
+  const judged = judgedFigure(figure);
+  if (!hand || judged.value === null) return judged;
+  const because = `${judged.because} A light hand gives ${torqueText(hand.low)}, a firm one ${torqueText(hand.high)}.`;
+  const light = judged.verdict === 'within-limit' && judged.value > hand.low;
+  return { ...judged, because, ...(light && { verdict: 'close-to-limit' }) };
+}
+
 function closingFigure(context: ScrewContext): Figure {
   const { p, seat, mechanics, words } = context;
   const common = {
@@ -114,7 +125,10 @@ function closingFigure(context: ScrewContext): Figure {
   if (seat?.pressure === 0) {
     return plainFigure({ ...common, limit: null, because: seat.advice, source: source.SEAT });
   }
-  if (seat) return judgedFigure({ ...common, ...seatTorque(context, seat), source: source.SEAT });
+  if (seat) {
+    const figure = { ...common, ...seatTorque(context, seat), source: source.SEAT };
+    return judgedByHand(figure, mechanics.closing?.hand);
+  }
   if (p.seal === 'none') {
     const because = `Without a seal there is nothing to bed: turn until the ${words.cap} stops on the rim.`;
     return plainFigure({ ...common, limit: null, because, source: source.SCREW });
@@ -122,7 +136,7 @@ function closingFigure(context: ScrewContext): Figure {
   if (!mechanics.closing) return judgedFigure({ ...common, because: MODULUS_MISSING, source: source.PRESS });
   const { drag } = mechanics.closing;
   const because = `The plug rubs round in the bore. It must stay under what a firm hand gives, or the ${words.cap} never comes home.`;
-  return judgedFigure({ ...common, value: drag, because, source: source.PRESS });
+  return judgedByHand({ ...common, value: drag, because, source: source.PRESS }, mechanics.closing.hand);
 }
 
 function openingFigure({ material, mechanics, words }: ScrewContext): Figure {

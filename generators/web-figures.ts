@@ -65,34 +65,55 @@ function peakStrain({ material, allowable, folded, drawn }: WebSubject): Figure 
   });
 }
 
-function drawnStrain({ material, folded, drawn }: WebSubject): Figure {
-  const { nominal, strain, shape } = folded;
+/** Why a web that must draw cannot be judged by the drawn range; null where it can. */
+function notDrawn({ material, use, allowable, folded }: WebSubject): string | null {
+  if (!folded.shape) return 'this recess does not let the leaves be pressed face to face';
+  if (use.layers === 'across' && material.process === 'printed') {
+    return 'the fold pulls the layers apart, and such a web tears before it draws. Print it lying flat';
+  }
+  return allowable.value === null ? allowable.because.replace(/^Not known: |\.$/g, '') : null;
+}
+
+function drawnReason(value: number | null): string {
+  const low = formatQuantity(DRAWN_RANGE.low, 'strain');
+  if (value === null || value > DRAWN_RANGE.high) {
+    return 'Past what drawn webs work at: it tears instead of thinning. Lengthen the web or make it thinner.';
+  }
+  return value < DRAWN_RANGE.low
+    ? `Under ${low} the web yields in places without drawing evenly: shorten it, or lengthen it until it stays elastic.`
+    : 'Fold it a few times while still warm from the bed: the web whitens, thins and lasts.';
+}
+
+function drawnStrain(subject: WebSubject): Figure {
+  const { material, folded, drawn } = subject;
+  const { nominal, shape } = folded;
   const value = shape ? nominal * Math.max(shape.middle, shape.exit) : null;
-  const common = { id: 'drawn-strain', label: 'Drawn web, nominal strain', unit: 'strain' } as const;
+  const common = {
+    id: 'drawn-strain',
+    label: 'Drawn web, nominal strain',
+    unit: 'strain',
+    value,
+    handbook: nominal,
+    source: source.DRAWN,
+  } as const;
   if (!drawn) {
     const because = material.drawsWhenFolded
       ? 'The web stays elastic: it does not need to draw.'
       : `${material.shortName} does not draw into a lasting hinge; only the elastic verdict counts.`;
-    return plainFigure({ ...common, value, handbook: nominal, because, source: source.DRAWN });
+    return plainFigure({ ...common, because });
+  }
+  const limit = DRAWN_RANGE.high;
+  const gap = notDrawn(subject);
+  if (gap !== null) {
+    return judgedFigure({ ...common, limit, verdict: 'not-known', because: `Not known: ${gap}.` });
   }
   const thin = value !== null && value < DRAWN_RANGE.low;
-  const because = thin
-    ? `Under ${formatQuantity(DRAWN_RANGE.low, 'strain')} the web yields in places without drawing evenly: shorten it, or lengthen it until it stays elastic.`
-    : 'Fold it a few times while still warm from the bed: the web whitens, thins and lasts.';
-  const verdict = strain && thin ? 'close-to-limit' : judge(value, DRAWN_RANGE.high);
-  return judgedFigure({
-    ...common,
-    value,
-    handbook: nominal,
-    limit: DRAWN_RANGE.high,
-    verdict,
-    because,
-    source: source.DRAWN,
-  });
+  const verdict = thin ? 'close-to-limit' : judge(value, limit);
+  return judgedFigure({ ...common, limit, verdict, because: drawnReason(value) });
 }
 
 /** Peak and drawn strain: one of them judges the web. */
-export const webStrainFigures = (subject: WebSubject): Figure[] => [
+export const webStrainFigures = (subject: WebSubject): readonly [peak: Figure, drawn: Figure] => [
   peakStrain(subject),
   drawnStrain(subject),
 ];
@@ -153,28 +174,41 @@ export function webMoment({ fold, width, material, drawn }: WebSubject): Figure 
   return plainFigure({ ...common, value, handbook: drawn ? null : moment.handbook, because });
 }
 
-export function webEndurance({ material, use, folded, allowable, drawn }: WebSubject): Figure {
-  const common = { id: 'fold-endurance', label: 'Fold endurance', unit: 'cycles' } as const;
-  const peak = folded.strain?.peak ?? null;
-  const elastic = peak !== null && allowable.value !== null && peak <= allowable.value;
-  const tested = material.foldEndurance;
-  if (tested.class === 'long-life' && (drawn || elastic)) {
-    const value = drawn ? 1_000_000 : null;
-    const because = `${tested.because} ${drawn ? '' : 'Within the allowable strain.'} Ranking only: prove it with a test hinge.`;
-    return judgedFigure({
-      ...common,
-      value,
-      low: value ?? 1000,
-      verdict: 'within-limit',
-      because,
-      source: source.ENDURANCE,
-    });
+/** Folds asked of a hinge, by how often it is used. */
+const FOLDS: Readonly<Record<Use['opening'], number>> = { once: 1, sometimes: 100, often: 1000 };
+
+const ENDURANCE = {
+  id: 'fold-endurance',
+  label: 'Fold endurance',
+  unit: 'cycles',
+  limitKind: 'min',
+} as const;
+
+function drawnEndurance({ material, use }: WebSubject, web: Figure): Figure {
+  const common = { ...ENDURANCE, limit: FOLDS[use.opening], source: source.ENDURANCE };
+  if (web.verdict === 'not-known') return judgedFigure({ ...common, because: web.because });
+  if (web.verdict === 'over-limit') {
+    const because = 'Not known: the folding test was of webs that draw, and this one is strained past that.';
+    return judgedFigure({ ...common, because });
   }
-  if (elastic) {
+  const { class: tested, because } = material.foldEndurance;
+  if (tested !== 'long-life') return judgedFigure({ ...common, because: `Not known: ${because}` });
+  const value = 1_000_000;
+  const told = `${because} Ranking only: prove it with a test hinge.`;
+  return judgedFigure({ ...common, value, low: value, because: told });
+}
+
+export function webEndurance(subject: WebSubject, web: Figure): Figure {
+  const { material, use, folded, allowable, drawn } = subject;
+  if (drawn) return drawnEndurance(subject, web);
+  const common = { ...ENDURANCE, limit: FOLDS[use.opening] };
+  const peak = folded.strain?.peak ?? null;
+  if (peak !== null && allowable.value !== null && peak <= allowable.value) {
     const because = 'The web stays elastic: such hinges last several thousand folds.';
     return judgedFigure({ ...common, low: 1000, verdict: 'within-limit', because, source: source.CLASSES });
   }
-  if (tested.class === 'unknown' || peak === null) {
+  const tested = material.foldEndurance;
+  if (tested.class === 'unknown' || peak === null || allowable.value === null) {
     return judgedFigure({ ...common, because: `Not known: ${tested.because}`, source: tested.source });
   }
   const verdict = use.opening === 'once' ? null : 'over-limit';

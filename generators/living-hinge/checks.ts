@@ -20,14 +20,20 @@ import { foldOf } from './mechanics';
 import type { Values } from './schema';
 import { pressedShut, webOf } from './web';
 
+/** Leaves cannot be folded further, deg. */
+const FULL_TURN = 360;
+
 function meetingFigure(p: Values, { folded }: WebSubject): Figure {
-  const value = degrees(folded.meetingAngle);
-  const meets = value < p.foldAngle;
+  const angle = degrees(folded.meetingAngle);
+  const meets = angle < p.foldAngle;
+  const value = Math.min(angle, FULL_TURN);
   const because = pressedShut(p)
     ? `The leaves are pressed face to face; the web exits stand ${folded.separation.toFixed(2)} of its length apart, an even fold wants ${FREE_SEPARATION.toFixed(2)}.`
     : meets
       ? 'The leaf edges meet before the fold is reached and then force the web: lengthen the web or reduce what lies inside the fold.'
-      : 'The leaf edges clear each other up to the fold angle.';
+      : angle >= FULL_TURN
+        ? 'The leaf edges never meet: the web is long enough for a full turn.'
+        : 'The leaf edges clear each other up to the fold angle.';
   const figure = plainFigure({
     id: 'meeting-angle',
     label: 'Fold angle where the leaf edges meet',
@@ -81,13 +87,15 @@ export function check(p: Values, material: Material, use: Use): Report {
   const allowable = allowableStrain(material, use);
   const { layerHeight, leafWidth: width } = p;
   const subject = webSubject({ fold: foldOf(p), width, layerHeight, material, use, allowable });
+  const strains = webStrainFigures(subject);
+  const drawnWeb = strains[1];
   return report({
     governing: webGoverning(subject),
-    headline: ['fold-moment', 'elastic-web-length', 'meeting-angle'],
+    headline: ['fold-moment', 'elastic-web-length', subject.drawn ? 'fold-endurance' : 'meeting-angle'],
     figures: [
-      ...webStrainFigures(subject),
+      ...strains,
       ...webLengthFigures(subject),
-      webEndurance(subject),
+      webEndurance(subject, drawnWeb),
       webMoment(subject),
       meetingFigure(p, subject),
       webLayers(subject),

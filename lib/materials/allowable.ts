@@ -15,6 +15,8 @@ export interface AllowableStrain {
   readonly value: number | null;
   readonly factors: readonly AllowableFactor[];
   readonly because: string;
+  /** what forces worked out with the moduli of 23 °C are worth at the temperature of use */
+  readonly stiffness: 'as-given' | 'softer' | 'not-known';
 }
 
 const GUIDE: Source = {
@@ -109,6 +111,11 @@ function temperatureFactor(material: Material, temperature: number): AllowableFa
   return { id: 'temperature', label, value: known ? 1 : null, source: HEAT, ...(note && { note }) };
 }
 
+function stiffnessAt(material: Material, temperature: number): AllowableStrain['stiffness'] {
+  if (!heatNote(material, temperature).known) return 'not-known';
+  return temperature > ROOM_LIMIT ? 'softer' : 'as-given';
+}
+
 function reason(factors: readonly AllowableFactor[]): string {
   const told = (factor: AllowableFactor) => (factor.note ? `${factor.label} (${factor.note})` : factor.label);
   const missing = factors.filter((factor) => factor.value === null).map(told);
@@ -116,7 +123,7 @@ function reason(factors: readonly AllowableFactor[]): string {
   return factors.map(told).join(', ');
 }
 
-function given(material: Material, value: number): AllowableStrain {
+function given(material: Material, value: number, use: Use): AllowableStrain {
   const whole = (id: AllowableFactor['id'], label: string): AllowableFactor => ({
     id,
     label,
@@ -130,7 +137,8 @@ function given(material: Material, value: number): AllowableStrain {
     whole('layers', covered),
     whole('temperature', covered),
   ];
-  return { value, factors, because: 'The allowable strain was given for this use; no factor is applied.' };
+  const because = 'The allowable strain was given for this use; no factor is applied.';
+  return { value, factors, because, stiffness: stiffnessAt(material, use.temperature) };
 }
 
 /**
@@ -139,7 +147,7 @@ function given(material: Material, value: number): AllowableStrain {
  * A strain given for the use at hand replaces the product.
  */
 export function allowableStrain(material: Material, use: Use): AllowableStrain {
-  if (material.allowableFinal) return given(material, material.allowableFinal.value);
+  if (material.allowableFinal) return given(material, material.allowableFinal.value, use);
   const limit = material.allowableOnce;
   const factors: AllowableFactor[] = [
     {
@@ -155,5 +163,5 @@ export function allowableStrain(material: Material, use: Use): AllowableStrain {
   const value = factors.some((factor) => factor.value === null)
     ? null
     : factors.reduce((product, factor) => product * (factor.value ?? Number.NaN), 1);
-  return { value, factors, because: reason(factors) };
+  return { value, factors, because: reason(factors), stiffness: stiffnessAt(material, use.temperature) };
 }

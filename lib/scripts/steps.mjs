@@ -4,6 +4,7 @@
 import { spawn, spawnSync } from 'node:child_process';
 import { createHash } from 'node:crypto';
 import { existsSync, mkdirSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
+import { createServer } from 'node:net';
 import path from 'node:path';
 
 const bin = (name, file) => path.join('node_modules', name, file);
@@ -111,6 +112,21 @@ export function startServer({ host, port, env = {} }) {
     stdio: 'inherit',
     env: { ...process.env, ...quiet, ...env },
   });
+}
+
+/** Whether something else already listens there. */
+export function isTaken(host, port) {
+  return new Promise((resolve) => {
+    const probe = createServer();
+    probe.once('error', (error) => resolve(error.code === 'EADDRINUSE'));
+    probe.listen({ host, port }, () => probe.close(() => resolve(false)));
+  });
+}
+
+/** npm does not hand on every signal: stop when it has gone and left this script behind. */
+export function whenOrphaned(stop) {
+  const parent = process.ppid;
+  setInterval(() => process.ppid !== parent && stop(), 1000).unref();
 }
 
 /** Resolves when the address answers with success; rejects after the time given. */

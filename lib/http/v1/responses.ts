@@ -59,6 +59,9 @@ const allowable = z.strictObject({
     }),
   ),
   because: z.string(),
+  stiffness: z
+    .enum(['as-given', 'softer', 'not-known'])
+    .meta({ description: 'What forces from the moduli of 23 °C are worth at the temperature of use' }),
 });
 
 const computed = z.strictObject({

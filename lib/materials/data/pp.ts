@@ -47,7 +47,11 @@ export const pp: Material = {
   tensileModulusAcross: null,
   secant: ASSUMED,
   poisson: middle(fraction, [0.4, 0.42], BEAM_BOOKS),
-  yieldStrain: middle(strain, [0.1, 0.2], detail(PP_SHEETS, 'moulded 8-12 %')),
+  yieldStrain: middle(
+    strain,
+    [0.1, 0.2],
+    detail(PP_SHEETS, 'strain at yield, printed; moulded grades yield at 8-12 %'),
+  ),
   tensileStrength: middle(strength, [9, 20], detail(PP_SHEETS, 'stress at yield')),
   tensileStrengthAcross: null,
   breakStrain: null,

@@ -85,6 +85,30 @@ describe('living hinge: verdicts', () => {
     expect(figure(checked(id), 'fold-endurance').verdict).toBe(verdict);
   });
 
+  it('knows neither drawing nor endurance of a web whose layers the fold pulls apart', () => {
+    const report = checked('pp', {}, { ...DEFAULT_USE, layers: 'across' });
+    expect(figure(report, 'drawn-strain').verdict).toBe('not-known');
+    expect(figure(report, 'drawn-strain').because).toMatch(/layers apart/);
+    expect(figure(report, 'fold-endurance')).toMatchObject({ value: null, verdict: 'not-known' });
+  });
+
+  it('knows nothing of a drawn web past the heat limit of the plastic', () => {
+    const report = checked('pp', {}, { ...DEFAULT_USE, temperature: 120 });
+    expect(figure(report, 'drawn-strain').verdict).toBe('not-known');
+    expect(figure(report, 'fold-moment').value).toBeNull();
+  });
+
+  it('promises no endurance of a web strained past what drawn webs work at', () => {
+    const report = checked('pp', { webLength: 0.5, webFillet: 0.2 });
+    expect(figure(report, 'drawn-strain').verdict).toBe('over-limit');
+    expect(figure(report, 'drawn-strain').because).toMatch(/tears/);
+    expect(figure(report, 'fold-endurance')).toMatchObject({ value: null, verdict: 'not-known' });
+  });
+
+  it('gives no angle past a full turn at which leaf edges meet', () => {
+    expect(figure(checked('pp'), 'meeting-angle')).toMatchObject({ value: 360, verdict: 'within-limit' });
+  });
+
   it('caps the holding moment at the plastic moment', () => {
     const moment = figure(checked('pp'), 'fold-moment').value!;
     const yieldStress = material('pp').tensileStrength!.value;

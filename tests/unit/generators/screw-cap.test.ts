@@ -162,6 +162,18 @@ describe('screw cap: plug', () => {
     expect(figure(tight, 'closing-load').value!).toBeLessThan(figure(checked(), 'closing-load').value!);
   });
 
+  it('is close to the limit where a light hand does not close it', () => {
+    const plain = figure(checked(), 'closing-torque');
+    const [low, high] = [figure(checked(), 'hand-torque').low!, figure(checked(), 'hand-torque').high!];
+    expect(plain.value!).toBeLessThan(low);
+    expect(plain.verdict).toBe('within-limit');
+    const rough = { ...toughPlastic, friction: { ...toughPlastic.friction, value: 0.55, high: 0.6 } };
+    const firm = figure(checked({}, rough), 'closing-torque');
+    expect(firm.value!).toBeGreaterThan(low);
+    expect(firm.value!).toBeLessThan(0.85 * high);
+    expect(firm.verdict).toBe('close-to-limit');
+  });
+
   it('drags along with its depth', () => {
     const curve = checked(plugged).curves.find(({ id }) => id === 'torque-over-turn')!;
     expect(curve.points[0]).toEqual([0, 0]);
