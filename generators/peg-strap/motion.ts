@@ -1,6 +1,6 @@
 import type { Vec3 } from '@/lib/geometry/kernel';
 import type { Material } from '@/lib/materials/types';
-import { spiralOf, spiralRadius } from '@/lib/mechanics/strap';
+import { bentHoleFactor, spiralOf, spiralRadius } from '@/lib/mechanics/strap';
 import { halfTurnCurvature, halfTurnTwist, twistStrain } from '@/lib/mechanics/strap-half-turn';
 import { followStrip, stripFrame } from '@/lib/mechanics/strip-curve';
 import type { Motion, Posed } from '../contract';
@@ -84,32 +84,48 @@ function stretch(x: number, y: number, radius: number, growth: number): number {
 
 const larger = (a: number, b: number): number => (Math.abs(a) > Math.abs(b) ? a : b);
 
+/**
+ * Bending strain beside an eye over that of the plain strip: the factor of a bent hole at the eye's sides, none before
+ * and behind it, fading with the third power of the distance. The fading is drawn, not computed.
+ */
+function crowdingOf(values: PegStrap) {
+  const { eyeDiameter, eyePitch, eyeCount, strapWidth, strapThickness } = values;
+  const first = firstEyeAt(values);
+  const factor = bentHoleFactor(eyeDiameter, strapWidth, strapThickness);
+  return (s: number, y: number): number => {
+    const index = Math.min(eyeCount - 1, Math.max(0, Math.round((s - first) / eyePitch)));
+    const x = s - first - index * eyePitch;
+    const away = Math.max(Math.hypot(x, y), eyeDiameter / 2, Number.EPSILON);
+    const side = Math.min(1, (y / away) ** 2);
+    return 1 + (eyeDiameter / 2 / away) ** 3 * ((factor - 1) * side - (1 - side));
+  };
+}
+
 /** Stretch along the strip at a point: bending by its height, twist by its distance from the axis. */
-function fibreStrain(values: PegStrap, moment: Moment, s: number, y: number, height: number): number {
+function fibreStrain(
+  values: PegStrap,
+  moment: Moment,
+  crowding: (s: number, y: number) => number,
+  [s, y, height]: readonly [number, number, number],
+): number {
   const twist = moment.twist(s);
   const { middle } = twistStrain(twist, values.strapWidth, values.strapThickness);
-  return -moment.curvature(s) * height + middle + (twist * y) ** 2 / 2;
+  return -moment.curvature(s) * height * crowding(s, y) + middle + (twist * y) ** 2 / 2;
 }
 
 /** Largest strain painted on the strip, fully rolled up: lifted off the head and closed. */
 function paintedPeak(values: PegStrap): number {
-  const { from, to } = stripLayout(values);
-  const [half, edge] = [values.strapThickness / 2, values.strapWidth / 2];
-  let peak = values.headDiameter / values.eyeDiameter - 1;
-  for (const moment of [momentOf(values, ROLLED), momentOf(values, 1)]) {
-    for (let at = 0; at <= STEPS; at += 1) {
-      const s = from + ((to - from) * at) / STEPS;
-      for (const [y, height] of [
-        [0, half],
-        [0, -half],
-        [edge, half],
-        [edge, -half],
-      ] as const) {
-        peak = Math.max(peak, Math.abs(fibreStrain(values, moment, s, y, height)));
-      }
-    }
-  }
-  return peak;
+  const { from, to, eyes } = stripLayout(values);
+  const [half, edge, beside] = [values.strapThickness / 2, values.strapWidth / 2, values.eyeDiameter / 2];
+  const along = Array.from({ length: STEPS + 1 }, (_, at) => from + ((to - from) * at) / STEPS);
+  const places = [...along.flatMap((s) => [0, edge].map((y) => [s, y])), ...eyes.map((s) => [s, beside])];
+  const crowding = crowdingOf(values);
+  const strains = [momentOf(values, ROLLED), momentOf(values, 1)].flatMap((moment) =>
+    places.flatMap(([s, y]) =>
+      [half, -half].map((height) => Math.abs(fibreStrain(values, moment, crowding, [s!, y!, height]))),
+    ),
+  );
+  return strains.reduce((a, b) => Math.max(a, b), values.headDiameter / values.eyeDiameter - 1);
 }
 
 /**
@@ -123,6 +139,7 @@ export function motion(values: PegStrap, _material: Material): Motion {
   const { from, to } = stripLayout(values);
   const eyeAt = firstEyeAt(values);
   const frame = new Float64Array(12);
+  const crowding = crowdingOf(values);
 
   function pose(_body: string, rest: Float32Array, t: number, out: Posed): void {
     const moment = momentOf(values, t);
@@ -139,7 +156,7 @@ export function motion(values: PegStrap, _material: Material): Motion {
         out.positions[i + axis] = moment.shift[axis]! + bent + held * (rest[i + axis]! - bent);
       }
       const inStrip = Math.min(height, strapThickness / 2);
-      const strain = larger(fibreStrain(values, moment, s, across, inStrip), eye);
+      const strain = larger(fibreStrain(values, moment, crowding, [x, y, inStrip]), eye);
       out.strain[i / 3] = (1 - held) * strain;
     }
   }

@@ -3,6 +3,7 @@ import strap from '@/generators/peg-strap';
 import { headRadius, stripLayout } from '@/generators/peg-strap/layout';
 import { type PegStrap, parameters } from '@/generators/peg-strap/schema';
 import { materialById } from '@/lib/materials/data';
+import { DEFAULT_USE } from '@/lib/materials/types';
 
 const tpu = materialById('tpu-95a')!;
 const straight: PegStrap = parameters.defaults;
@@ -170,6 +171,16 @@ describe('peg strap: motion', () => {
     expect(Math.max(...along)).toBeLessThan(to);
   });
 
+  it('paints the side of an eye on the bundle with the strain that the verdict stands on', () => {
+    const long = { ...straight, eyeCount: 3 };
+    const [, second] = stripLayout(long).eyes;
+    const { strain } = posed(long, 1, [[second!, long.eyeDiameter / 2, long.strapThickness]]);
+    const report = strap.check(long, tpu, DEFAULT_USE);
+    const told = report.figures.find(({ id }) => id === 'eye-bend-strain')!.value!;
+    expect(strain[0]! / told).toBeGreaterThan(0.75);
+    expect(strain[0]! / told).toBeLessThanOrEqual(1.001);
+  });
+
   it('paints no more than its peak and reaches most of it', () => {
     for (const [, values] of BOTH) {
       const { peakStrain } = strap.motion(values, tpu);
@@ -179,7 +190,10 @@ describe('peg strap: motion', () => {
           [0, values.strapThickness].map((z): Point => [x, side * values.strapWidth, z]),
         ),
       );
-      const all = [0.5, 0.88, 1].flatMap((t) => posed(values, t, points).strain.map(Math.abs));
+      points.push(
+        ...stripLayout(values).eyes.map((x): Point => [x, values.eyeDiameter / 2, values.strapThickness]),
+      );
+      const all = [0.5, 0.75, 0.88, 1].flatMap((t) => posed(values, t, points).strain.map(Math.abs));
       expect(Math.max(...all)).toBeLessThanOrEqual(peakStrain * 1.001);
       expect(Math.max(...all)).toBeGreaterThan(0.9 * peakStrain);
     }
