@@ -45,3 +45,14 @@ export function TextField({
     </div>
   );
 }
+
+export const NewPasswordField = ({ name = 'password', label = 'New password' }) => (
+  <TextField
+    name={name}
+    label={label}
+    type="password"
+    hint="At least 12 characters; a few unrelated words make a good one."
+    autoComplete="new-password"
+    maxLength={200}
+  />
+);

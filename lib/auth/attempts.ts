@@ -13,6 +13,7 @@ const ALLOWED = {
   'mail-account': { points: 4, duration: 60 * MINUTE },
   'mail-address': { points: 20, duration: 60 * MINUTE },
   'link-address': { points: 60, duration: 15 * MINUTE },
+  'invite-account': { points: 100, duration: 60 * MINUTE },
   'password-account': { points: 10, duration: 15 * MINUTE },
 } as const;
 

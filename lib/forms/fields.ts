@@ -38,3 +38,16 @@ export const nextField = z
   .max(2000)
   .optional()
   .transform((path) => (path && /^\/(?![/\\])[^\s\\]*$/.test(path) ? path : '/account'));
+
+/** What a mailed link holds. */
+export const tokenField = z
+  .string('Open the link of the mail again')
+  .max(200, 'Open the link of the mail again');
+
+export const idField = z.string('Reload the page').min(1, 'Reload the page').max(100, 'Reload the page');
+
+/** Roles beside `member`, which every member has. */
+export const rolesField = z
+  .array(z.enum(['host', 'librarian', 'admin'], 'There is no such role'))
+  .max(3)
+  .default([]);

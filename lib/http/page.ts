@@ -2,7 +2,7 @@ import 'server-only';
 import { notFound, redirect } from 'next/navigation';
 import { currentViewer } from '@/lib/auth/session';
 import type { Viewer } from '@/lib/auth/viewer';
-import { NotAllowed, NotFound, SignInNeeded } from '@/lib/errors';
+import { Conflict, NotAllowed, NotFound, SignInNeeded } from '@/lib/errors';
 
 export const signInAddress = (next: string): string => `/sign-in?next=${encodeURIComponent(next)}`;
 
@@ -17,6 +17,35 @@ export async function readPage<T>(path: string, read: (viewer: Viewer) => T | Pr
   } catch (error) {
     if (error instanceof SignInNeeded) redirect(signInAddress(path));
     if (error instanceof NotAllowed || error instanceof NotFound) notFound();
+    throw error;
+  }
+}
+
+export type Asked = Promise<Readonly<Record<string, string | string[] | undefined>>>;
+
+/** One value of the query of a page, at most `max` characters of it. */
+export async function askedFor(asked: Asked, name: string, max = 200): Promise<string | undefined> {
+  const value = (await asked)[name];
+  return typeof value === 'string' && value !== '' ? value.slice(0, max) : undefined;
+}
+
+/** A whole number from 1 in the query of a page; 1 where there is none. */
+export async function pageAsked(asked: Asked): Promise<number> {
+  const value = await askedFor(asked, 'page', 6);
+  return value && /^[1-9]\d{0,4}$/.test(value) ? Number(value) : 1;
+}
+
+/** The token of a mailed link and what it stands for; null when the link is no longer good. */
+export async function readToken<T>(
+  asked: Asked,
+  read: (token: string) => T,
+): Promise<{ readonly token: string; readonly found: T } | null> {
+  const token = await askedFor(asked, 'token');
+  if (token === undefined) return null;
+  try {
+    return { token, found: read(token) };
+  } catch (error) {
+    if (error instanceof Conflict) return null;
     throw error;
   }
 }

@@ -55,6 +55,9 @@ const GUARDS: Readonly<Record<string, string>> = {
   'Cross-Origin-Resource-Policy': 'same-origin',
 };
 
+/** Methods that change nothing. */
+const READING: ReadonlySet<string> = new Set(['GET', 'HEAD', 'OPTIONS']);
+
 /** Faults told in one answer. */
 const MOST_ERRORS = 50;
 
@@ -87,6 +90,9 @@ async function readCall<B, P>(
   const { bodyBytes = BODY_LIMIT, urlCharacters = URL_LIMIT } = spec.limits ?? {};
   if (request.url.length > urlCharacters) {
     throw new RequestProblem('uri-too-long', `The address may be at most ${urlCharacters} characters long.`);
+  }
+  if (!READING.has(request.method) && !fromOwnPage(request.headers)) {
+    throw new RequestProblem('not-allowed', 'This was sent by a page of another site.');
   }
   await limiter(spec.rateLimit).take(clientOf(request));
   if (spec.auth) checkOrigin(request);
