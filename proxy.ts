@@ -1,11 +1,13 @@
 import { type NextRequest, NextResponse } from 'next/server';
 import { env, overHttps } from '@/lib/env';
-import { contentPolicy, STANDING_HEADERS, TRANSPORT_SECURITY } from '@/lib/http/headers';
+import { contentPolicy, DATA_POLICY, STANDING_HEADERS, TRANSPORT_SECURITY } from '@/lib/http/headers';
 
 /** Puts the security headers on every answer, and hands pages the nonce their scripts carry. Decides nothing else. */
 export function proxy(request: NextRequest): NextResponse {
   const nonce = crypto.randomUUID().replaceAll('-', '');
-  const policy = contentPolicy(nonce, { development: env().NODE_ENV === 'development', https: overHttps() });
+  const data = request.nextUrl.pathname.startsWith('/api/');
+  const given = { development: env().NODE_ENV === 'development', https: overHttps() };
+  const policy = data ? DATA_POLICY : contentPolicy(nonce, given);
   const headers = new Headers(request.headers);
   headers.set('x-nonce', nonce);
   headers.set('content-security-policy', policy);

@@ -5,6 +5,7 @@ import { answers } from '@/components/site/answers';
 import { Bend } from '@/components/site/bend';
 import { firstBend, loadSample, sampleLink } from '@/components/site/first-bend';
 import { Headline } from '@/components/site/headline';
+import { once } from '@/components/site/once';
 import { PartTiles } from '@/components/site/part-tiles';
 import { FAMILIES } from '@/generators';
 
@@ -18,8 +19,14 @@ export const metadata: Metadata = {
   openGraph: { title, description, type: 'website', siteName: 'Bendwell' },
 };
 
-export default async function HomePage() {
+/** The same for everyone, so worked out once by each server. */
+const content = once(async () => {
   const [bend, href, sample] = await Promise.all([firstBend(), sampleLink(), loadSample()]);
+  return { bend, href, answers: answers(sample) };
+});
+
+export default async function HomePage() {
+  const { bend, href, answers: sampleAnswers } = await content();
   return (
     <main className="frame grid gap-16 pb-20 sm:gap-24">
       <div>
@@ -31,7 +38,7 @@ export default async function HomePage() {
         <h2 id="answers" className="mb-6 max-w-3xl font-bold text-4xl tracking-tight">
           What it tells you of that hook, in PETG, pulled all the way
         </h2>
-        <AnswerList answers={answers(sample)} />
+        <AnswerList answers={sampleAnswers} />
       </section>
       <section aria-labelledby="parts">
         <h2 id="parts" className="mb-6 font-bold text-4xl tracking-tight">

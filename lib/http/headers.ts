@@ -26,6 +26,9 @@ export function contentPolicy(
     .join('; ');
 }
 
+/** For answers that are data and load nothing. */
+export const DATA_POLICY = "default-src 'none'; frame-ancestors 'none'";
+
 /** On every answer, file or page. */
 export const STANDING_HEADERS: Readonly<Record<string, string>> = {
   'X-Content-Type-Options': 'nosniff',

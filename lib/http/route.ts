@@ -11,6 +11,7 @@ import {
   TooMany,
   Unavailable,
 } from '@/lib/errors';
+import { DATA_POLICY } from './headers';
 import { type FieldUnits, issuesOf } from './issues';
 import { BODY_LIMIT, limiter, type RateName, URL_LIMIT } from './limits';
 import { log } from './log';
@@ -48,7 +49,7 @@ interface RouteSpec<B, P> {
 type Handler = (request: Request, context: { params: Promise<unknown> }) => Promise<Response>;
 
 const GUARDS: Readonly<Record<string, string>> = {
-  'Content-Security-Policy': "default-src 'none'; frame-ancestors 'none'",
+  'Content-Security-Policy': DATA_POLICY,
   'X-Content-Type-Options': 'nosniff',
   'X-Frame-Options': 'DENY',
   'Referrer-Policy': 'no-referrer',
