@@ -1,6 +1,7 @@
 import { about as cantileverHook } from './cantilever-hook/about';
 import type { About, Family, Guide } from './contract';
 import { about as foldedHook } from './folded-hook/about';
+import { about as hingedBox } from './hinged-box/about';
 import { about as knuckleHinge } from './knuckle-hinge/about';
 import { about as latticeHinge } from './lattice-hinge/about';
 import { about as livingHinge } from './living-hinge/about';
@@ -86,6 +87,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: latticeHinge,
     load: () => import('./lattice-hinge').then((m) => m.default),
     loadGuide: () => import('./lattice-hinge/guide').then((m) => m.default),
+  },
+  {
+    about: hingedBox,
+    load: () => import('./hinged-box').then((m) => m.default),
+    loadGuide: () => import('./hinged-box/guide').then((m) => m.default),
   },
 ];
 

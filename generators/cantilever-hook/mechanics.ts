@@ -16,7 +16,7 @@ import {
   wallSprings,
   widthStiffening,
 } from '@/lib/mechanics/root';
-import { standingConcentration } from '@/lib/mechanics/standing-arm';
+import { MOST_DEFLECTION, standingConcentration } from '@/lib/mechanics/standing-arm';
 import { wallStrain } from '@/lib/mechanics/thin-wall';
 import { inPanel, slotWidth } from './dimensions';
 import type { HookValues } from './schema';
@@ -113,9 +113,6 @@ export function rootShare(flexible: FlexibleArm): number {
   return 1 - compliance({ ...flexible, springs: [] }) / compliance(flexible);
 }
 
-/** Corrected figures hold to this deflection over length, and from this slenderness on. */
-export const MOST_DEFLECTION = 0.5;
-export const LEAST_SLENDERNESS = 2;
 /** The plain formulas are not used past this deflection over length (common practice). */
 export const GUIDE_MOST_DEFLECTION = 0.3;
 

@@ -1,6 +1,7 @@
 import type { Source } from '@/lib/materials/types';
 import { guideStrain, guideUndercut } from '@/lib/mechanics/beam';
 import { shoulderConcentration } from '@/lib/mechanics/fillet';
+import { MOST_DEFLECTION } from '@/lib/mechanics/standing-arm';
 import { formatQuantity } from '@/lib/units';
 import { type Figure, judgedFigure, plainFigure } from '../report';
 import { inPanel } from './dimensions';
@@ -8,7 +9,6 @@ import {
   armOf,
   deflectionRatio,
   GUIDE_MOST_DEFLECTION,
-  MOST_DEFLECTION,
   peakOf,
   permissibleDeflection,
   rootShare,

@@ -2,15 +2,14 @@ import { type AllowableStrain, allowableStrain } from '@/lib/materials/allowable
 import { secantModulus } from '@/lib/materials/secant';
 import type { Material, Use } from '@/lib/materials/types';
 import type { FlexibleArm } from '@/lib/mechanics/large-deflection';
+import { armFault } from '@/lib/mechanics/standing-arm';
 import { inPanel } from './dimensions';
 import {
+  armOf,
   deflectionRatio,
   flexibleArm,
   GUIDE_MOST_DEFLECTION,
   type HookStrain,
-  LEAST_SLENDERNESS,
-  MOST_DEFLECTION,
-  slenderness,
   strainOf,
 } from './mechanics';
 import type { HookValues } from './schema';
@@ -30,8 +29,8 @@ export interface Subject {
 }
 
 function troubleOf(v: HookValues): string | null {
-  if (deflectionRatio(v) > MOST_DEFLECTION) return 'the arm bends by more than half its length';
-  if (slenderness(v) < LEAST_SLENDERNESS) return 'the arm is shorter than twice its thickness';
+  const fault = armFault(armOf(v), v.undercut);
+  if (fault) return fault;
   const flatness = v.rootWidth / v.rootThickness;
   if (inPanel(v) && (flatness < 1 || flatness > 8)) {
     return 'in a panel the arm must be one to eight times as wide as thick';

@@ -9,6 +9,16 @@ import { blockSprings, narrowingSlope, rootSection, widthStiffening } from './ro
  * strain as a fraction, tension positive. Validity and errors as its pieces tell; fillet 0.1 to 1 arm thickness.
  */
 
+/** The corrected figures hold to this deflection over length, and from this slenderness on. */
+export const MOST_DEFLECTION = 0.5;
+export const LEAST_SLENDERNESS = 2;
+
+/** Why an arm is outside the range of the corrected figures; null where it is inside. */
+export function armFault({ length, rootThickness }: Arm, deflection: number): string | null {
+  if (deflection > MOST_DEFLECTION * length) return 'the arm bends by more than half its length';
+  return length < LEAST_SLENDERNESS * rootThickness ? 'the arm is shorter than twice its thickness' : null;
+}
+
 /** Peak over nominal strain where the root fillet ends; infinite where there is none. */
 export const standingConcentration = (arm: Arm, fillet: number, poisson: number): number =>
   narrowingAtFillet(narrowingSlope(arm)) *
