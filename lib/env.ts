@@ -59,6 +59,7 @@ const envSchema = z.object({
   RATE_EXPORTS_PER_MINUTE: perMinute('RATE_EXPORTS_PER_MINUTE', 240),
   RATE_WRITES_PER_MINUTE: perMinute('RATE_WRITES_PER_MINUTE', 240),
   RATE_PICTURES_PER_MINUTE: perMinute('RATE_PICTURES_PER_MINUTE', 1200),
+  RATE_UPLOADS_PER_MINUTE: perMinute('RATE_UPLOADS_PER_MINUTE', 20),
 });
 
 export type Env = Readonly<z.infer<typeof envSchema>>;

@@ -1,7 +1,7 @@
 import { env } from '@/lib/env';
 import { type RateLimit, rateLimit } from './rate-limit';
 
-export type RateName = 'reads' | 'checks' | 'exports' | 'writes' | 'pictures';
+export type RateName = 'reads' | 'checks' | 'exports' | 'writes' | 'pictures' | 'uploads';
 
 const perMinute = (name: RateName): number => {
   const given = env();
@@ -11,6 +11,7 @@ const perMinute = (name: RateName): number => {
     exports: given.RATE_EXPORTS_PER_MINUTE,
     writes: given.RATE_WRITES_PER_MINUTE,
     pictures: given.RATE_PICTURES_PER_MINUTE,
+    uploads: given.RATE_UPLOADS_PER_MINUTE,
   }[name];
 };
 
