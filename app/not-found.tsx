@@ -1,6 +1,9 @@
+import type { Metadata } from 'next';
 import Link from 'next/link';
 import { DeadEnd } from '@/components/layout/dead-end';
 import { buttonClass } from '@/components/ui/button';
+
+export const metadata: Metadata = { title: 'Not found' };
 
 export default function NotFoundPage() {
   return (

@@ -1,3 +1,4 @@
+import Link from 'next/link';
 import { LogoMark } from './logo';
 
 const CAUTIONS: readonly { head: string; text: string }[] = [
@@ -25,11 +26,19 @@ export function SiteFooter() {
       <div className="frame grid gap-x-10 gap-y-6 py-8 text-sm lg:grid-cols-[13rem_1fr]">
         <div className="flex items-start gap-3 text-muted">
           <LogoMark size={24} />
-          <p>
-            Local codes and licensed practice come first.
-            <br />
-            All lengths in millimetres.
-          </p>
+          <div>
+            <p>
+              Local codes and licensed practice come first.
+              <br />
+              All lengths in millimetres.
+            </p>
+            <Link
+              href="/about"
+              className="inline-flex min-h-9 items-center underline underline-offset-4 hover:text-ink pointer-coarse:min-h-11"
+            >
+              What the figures mean
+            </Link>
+          </div>
         </div>
         <ul className="grid gap-x-8 gap-y-4 sm:grid-cols-2 xl:grid-cols-4">
           {CAUTIONS.map(({ head, text }) => (

@@ -1,5 +1,6 @@
 import Link from 'next/link';
 import { KindGlyph } from '@/components/studio/kind-glyph';
+import { classNames } from '@/components/ui/class-names';
 import { type About, KIND_NAME, type Kind } from '@/generators/contract';
 
 const KINDS = Object.keys(KIND_NAME) as Kind[];
@@ -46,6 +47,38 @@ function Tile({ about }: { about: About }) {
   );
 }
 
+const SPAN = {
+  two: { 1: 'sm:col-span-1', 2: 'sm:col-span-2' },
+  three: { 1: 'lg:col-span-1', 2: 'lg:col-span-2', 3: 'lg:col-span-3' },
+  four: { 1: 'xl:col-span-1', 2: 'xl:col-span-2', 3: 'xl:col-span-3', 4: 'xl:col-span-4' },
+} as const;
+
+/** Columns left over in the last row of `count` tiles; all of them where the row is full. */
+export const leftOver = (count: number, columns: number): number => columns - (count % columns);
+
+/** Fills the last row, however many tiles there are. */
+function LastTile({ count }: { count: number }) {
+  const spans = [
+    SPAN.two[leftOver(count, 2) as 1 | 2],
+    SPAN.three[leftOver(count, 3) as 1 | 2 | 3],
+    SPAN.four[leftOver(count, 4) as 1 | 2 | 3 | 4],
+  ];
+  return (
+    <li
+      className={classNames(
+        'flex flex-col justify-center gap-2 rounded-sheet border border-edge border-dashed p-6',
+        ...spans,
+      )}
+    >
+      <h3 className="font-bold text-2xl leading-tight">Not sure which?</h3>
+      <p className="max-w-prose text-muted">Each kind of part is right for some jobs and wrong for others.</p>
+      <Link href="/design" className="inline-flex min-h-9 w-fit items-center font-semibold">
+        <span className="marked">Compare when each is right</span>
+      </Link>
+    </li>
+  );
+}
+
 /** Every family with its picture, in the order of the kinds. */
 export function PartTiles({ families }: { families: readonly About[] }) {
   const sorted = [...families].sort((a, b) => KINDS.indexOf(a.kind) - KINDS.indexOf(b.kind));
@@ -54,6 +87,7 @@ export function PartTiles({ families }: { families: readonly About[] }) {
       {sorted.map((about) => (
         <Tile key={about.id} about={about} />
       ))}
+      <LastTile count={sorted.length} />
     </ul>
   );
 }

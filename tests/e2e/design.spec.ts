@@ -186,6 +186,7 @@ test('keeps the verdict in sight while the sheet is scrolled on a phone', async 
 test('answers a part there is none of with a page that says so', async ({ page }) => {
   const answer = await page.goto('/design/no-such-part');
   expect(answer!.status()).toBe(404);
+  await expect(page).toHaveTitle('Not found · Bendwell');
   await expect(page.getByRole('heading', { name: 'No such page' })).toBeVisible();
   complaints.length = 0;
 });
