@@ -10,6 +10,8 @@ export interface Remedy {
   readonly to: number;
   /** the governing figure after the change */
   readonly figure: Figure;
+  /** another figure that one more step would push over its limit, which is why it goes no further; else null */
+  readonly stoppedBy: Figure | null;
 }
 
 /** `worse`: another figure is pushed over its limit. `refused`: the family does not take the value. */
@@ -19,6 +21,8 @@ interface Trial {
   readonly value: number;
   readonly state: State;
   readonly figure: Figure | undefined;
+  /** the first other figure pushed over its limit */
+  readonly pushed: Figure | undefined;
 }
 
 /** Most grid steps a search goes to either side; past it the dimension is no longer the same design. */
@@ -34,12 +38,13 @@ const overLimit = (report: Report): string[] =>
 
 function tryValue(subject: Subject, before: Report, key: string, value: number): Trial {
   const after = changed(subject, key, value);
-  if (!after) return { value, state: 'refused', figure: undefined };
+  if (!after) return { value, state: 'refused', figure: undefined, pushed: undefined };
   const report = checkOf(after);
   const figure = figureOf(report, before.governing);
   const was = overLimit(before);
-  const worse = overLimit(report).some((id) => id !== before.governing && !was.includes(id));
-  return { value, state: worse ? 'worse' : stateOf(figure), figure };
+  const pushed = overLimit(report).find((id) => id !== before.governing && !was.includes(id));
+  const state = pushed === undefined ? stateOf(figure) : 'worse';
+  return { value, state, figure, pushed: pushed === undefined ? undefined : figureOf(report, pushed) };
 }
 
 interface Edge {
@@ -75,13 +80,20 @@ function grid({ step, min, max }: NumberField, value: number, direction: 1 | -1)
   return { reach: Math.min(direction * (end - start), REACH), at };
 }
 
-function search(subject: Subject, before: Report, key: string, direction: 1 | -1): Trial | undefined {
+interface Found {
+  readonly trial: Trial;
+  readonly stoppedBy: Figure | null;
+}
+
+function search(subject: Subject, before: Report, key: string, direction: 1 | -1): Found | undefined {
   const field = subject.family.parameters.fields[key] as NumberField;
   const { reach, at } = grid(field, subject.values[key] as number, direction);
   const present = stateOf(figureOf(before, before.governing));
   const { last, next } = edge((offset) => tryValue(subject, before, key, at(offset)), reach, present);
-  if (present === 'fails') return next?.state === 'meets' ? next : undefined;
-  return next?.state === 'fails' || next?.state === 'worse' ? last : undefined;
+  if (present === 'fails') return next?.state === 'meets' ? { trial: next, stoppedBy: null } : undefined;
+  if (!last || (next?.state !== 'fails' && next?.state !== 'worse')) return undefined;
+  const alsoOver = stateOf(next.figure) === 'fails';
+  return { trial: last, stoppedBy: alsoOver ? null : (next.pushed ?? null) };
 }
 
 /**
@@ -96,8 +108,10 @@ export function remedyOf(subject: Subject, key: string, before: Report = checkOf
   if (stateOf(figureOf(before, before.governing)) === 'refused') return null;
   const found = ([1, -1] as const)
     .flatMap((direction) => search(subject, before, key, direction) ?? [])
-    .sort((a, b) => Math.abs(a.value - from) - Math.abs(b.value - from))[0];
-  return found?.figure ? { field: key, from, to: found.value, figure: found.figure } : null;
+    .sort((a, b) => Math.abs(a.trial.value - from) - Math.abs(b.trial.value - from))[0];
+  if (!found?.trial.figure) return null;
+  const { value, figure } = found.trial;
+  return { field: key, from, to: value, figure, stoppedBy: found.stoppedBy };
 }
 
 /** Smallest relative change first. */

@@ -6,6 +6,7 @@ import { classNames } from '@/components/ui/class-names';
 import { Sheet } from '@/components/ui/sheet';
 import type { NumberField } from '@/generators/parameters';
 import { byEase, ease, type Remedy, remedyOf } from '@/generators/remedies';
+import type { Figure } from '@/generators/report';
 import { figureOf, numbersOf } from '@/generators/sensitivity';
 import { entryText } from '@/generators/url-state';
 import { formatQuantity, UNIT_SYMBOL } from '@/lib/units';
@@ -41,6 +42,13 @@ function useRemedies(over: boolean): Found | null {
   return { list: list.slice(0, MOST), current: answers.current };
 }
 
+/** "Wall left, at least 0.8 mm" */
+export function limitWords({ label, limit, limitKind, unit }: Figure): string {
+  return limit === null
+    ? label
+    : `${label}, ${limitKind === 'max' ? 'at most' : 'at least'} ${formatQuantity(limit, unit)}`;
+}
+
 function RemedyLine({ remedy }: { remedy: Remedy }) {
   const session = useSession();
   const field = session.family.parameters.fields[remedy.field] as NumberField;
@@ -58,6 +66,9 @@ function RemedyLine({ remedy }: { remedy: Remedy }) {
         <b className="whitespace-nowrap font-mono">
           {text} {unit}
         </b>
+        {remedy.stoppedBy && (
+          <span className="block text-muted text-xs">stopped by {limitWords(remedy.stoppedBy)}</span>
+        )}
       </span>
       <span className="font-mono text-muted text-xs">
         {formatQuantity(remedy.figure.value, remedy.figure.unit)}

@@ -61,10 +61,14 @@ describe('the room of a part within its limit', () => {
     expect(remedyOf(within, 'undercut')).toMatchObject({ to: 3.5 });
   });
 
-  it('ends before another figure goes over its limit', () => {
+  it('ends before another figure goes over its limit, and names it', () => {
     // no arm in the range is too short for so small an undercut; the case ends at 40 mm
     const calm = subject({ armLength: 30, undercut: 0.2, thickness: 2 });
-    expect(remedyOf(calm, 'armLength')).toMatchObject({ from: 30, to: 40 });
+    const room = remedyOf(calm, 'armLength');
+    expect(room).toMatchObject({ from: 30, to: 40 });
+    expect(room!.stoppedBy).toMatchObject({ verdict: 'over-limit', limit: 40 });
+    expect(room!.stoppedBy!.id).not.toBe('peak-strain');
+    expect(remedyOf(within, 'armLength')!.stoppedBy).toBeNull();
   });
 
   it('is not told where the field ends before the limit does', () => {
