@@ -1,12 +1,13 @@
 'use client';
 
+import type { ReactNode } from 'react';
 import { SelectField } from '@/components/ui/select-field';
 import { SwitchField } from '@/components/ui/switch-field';
 import type { ChoiceField, ToggleField } from '@/generators/parameters';
 import { useEntry, useIssue, useSession } from '../session-context';
 import { describedBy, FieldRow, fieldId, type RowLayout } from './field-row';
 
-function ChoiceHelp({ field }: { field: ChoiceField }) {
+function ChoiceHelp({ field, more }: { field: ChoiceField; more: ReactNode }) {
   const explained = field.options.filter((option) => option.help);
   return (
     <>
@@ -16,6 +17,7 @@ function ChoiceHelp({ field }: { field: ChoiceField }) {
           <b>{option.label}</b>: {option.help}
         </p>
       ))}
+      {more}
     </>
   );
 }
@@ -24,10 +26,13 @@ export function ChoiceRow({
   name,
   field,
   layout = 'wide',
+  more,
 }: {
   name: string;
   field: ChoiceField;
   layout?: RowLayout;
+  /** told after the help of the field */
+  more?: ReactNode;
 }) {
   const session = useSession();
   const value = useEntry(name);
@@ -38,7 +43,7 @@ export function ChoiceRow({
       name={name}
       label={field.label}
       layout={layout}
-      help={<ChoiceHelp field={field} />}
+      help={<ChoiceHelp field={field} more={more} />}
       error={issue?.message}
       control={
         <SelectField

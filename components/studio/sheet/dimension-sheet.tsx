@@ -4,6 +4,7 @@ import { useCallback, useMemo } from 'react';
 import { useStore } from 'zustand';
 import { Sheet } from '@/components/ui/sheet';
 import { type Field, fieldApplies } from '@/generators/parameters';
+import type { Report } from '@/generators/report';
 import { effectOf, figureOf, numbersOf } from '@/generators/sensitivity';
 import { UNIT_SYMBOL } from '@/lib/units';
 import { useCalibrated, useStandingReport } from '../computed/standing-context';
@@ -11,7 +12,7 @@ import { chosenValues } from '../session';
 import { useReading, useSession } from '../session-context';
 import { useIdleMap } from '../use-idle-map';
 import { ChoiceRow, ToggleRow } from './choice-row';
-import { EffectCell } from './effect-cell';
+import { EffectCell, type EffectWord, EffectWords, effectWord } from './effect-cell';
 import { Group } from './group';
 import { NumberRow } from './number-row';
 
@@ -55,6 +56,9 @@ function Row({
   return <NumberRow name={name} field={field} valid={Number(valid)} effect={effect ?? <span />} />;
 }
 
+const wordsIn = (effects: ReturnType<typeof useEffects>, report: Report): ReadonlySet<EffectWord> =>
+  new Set([...(effects?.found.values() ?? [])].flatMap((effect) => effectWord(effect, report) ?? []));
+
 /** Every dimension of the part by group, with what each does. */
 export function DimensionSheet() {
   const { family } = useSession();
@@ -62,6 +66,7 @@ export function DimensionSheet() {
   const effects = useEffects();
   const report = useStandingReport();
   const governing = figureOf(report, report.governing);
+  const words = governing ? wordsIn(effects, report) : new Set<EffectWord>();
   const symbol = governing && UNIT_SYMBOL[governing.unit];
   const legend =
     governing && `effect on ${governing.unit === 'strain' ? 'strain' : governing.label.toLowerCase()}`;
@@ -82,6 +87,7 @@ export function DimensionSheet() {
           ))}
         </Group>
       ))}
+      <EffectWords words={words} />
     </Sheet>
   );
 }

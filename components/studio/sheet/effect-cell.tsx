@@ -17,7 +17,44 @@ export function changeText(change: number, value: number | null, unit: Unit): st
 const FORCES: readonly Unit[] = ['N', 'N/mm'];
 const TORQUES: readonly Unit[] = ['Nmm', 'Nm'];
 
-function elsewhere(effect: Effect, report: Report): string {
+/** What the words in the column mean, each told under the sheet where it stands in it. */
+const MEANING = {
+  'not alone':
+    'no step of this dimension by itself gives a part that can be made; another has to move with it',
+  'force only': 'leaves this figure as it is and moves a force',
+  'torque only': 'leaves this figure as it is and moves a torque',
+  'other figures': 'leaves this figure as it is and moves others at the head of the page',
+  none: 'moves none of the figures at the head of the page',
+  'not known': 'the figure after the step is not known',
+} as const;
+
+export type EffectWord = keyof typeof MEANING;
+
+/** The word that stands for an effect without a size; null where there is a size, or no answer yet. */
+export function effectWord(effect: Effect | null | undefined, report: Report): EffectWord | null {
+  if (effect === null) return 'not alone';
+  if (!effect) return null;
+  if (effect.change === null) return 'not known';
+  return effect.change === 0 ? elsewhere(effect, report) : null;
+}
+
+/** The meaning of the words that stand in the column. */
+export function EffectWords({ words }: { words: ReadonlySet<EffectWord> }) {
+  const used = (Object.keys(MEANING) as EffectWord[]).filter((word) => words.has(word));
+  if (used.length === 0) return null;
+  return (
+    <dl aria-label="Words in the effect column" className="border-hair border-t px-4 py-3 text-xs sm:px-5">
+      {used.map((word) => (
+        <div key={word} className="flex gap-x-2 py-0.5">
+          <dt className="w-20 shrink-0 font-semibold">{word}</dt>
+          <dd className="text-muted">{MEANING[word]}</dd>
+        </div>
+      ))}
+    </dl>
+  );
+}
+
+function elsewhere(effect: Effect, report: Report): EffectWord {
   const units = effect.moves.flatMap((id) => figureOf(report, id)?.unit ?? []);
   if (units.length === 0) return 'none';
   if (units.every((unit) => FORCES.includes(unit))) return 'force only';
@@ -36,12 +73,9 @@ export function EffectCell({
   governing: Figure;
   unit: Unit;
 }) {
-  if (effect === null) return <span className="text-right text-muted text-xs">not alone</span>;
-  if (!effect) return <span />;
-  if (effect.change === null || effect.change === 0) {
-    const text = effect.change === null ? 'not known' : elsewhere(effect, report);
-    return <span className="text-right text-muted text-xs">{text}</span>;
-  }
+  const word = effectWord(effect, report);
+  if (word) return <span className="text-right text-muted text-xs">{word}</span>;
+  if (!effect?.change) return <span />;
   const size = String(Math.abs(effect.step));
   const step = signed(unit === 'deg' ? `${size}°` : `${size} ${UNIT_SYMBOL[unit]}`, effect.step < 0);
   return (

@@ -15,7 +15,7 @@ function MaterialRow() {
   const optionsOf = (process: 'printed' | 'moulded') =>
     session.materials
       .filter((one) => one.process === process)
-      .map(({ id, name }) => ({ value: id, label: name }));
+      .map(({ id, name }) => ({ value: id, label: name.replace(/, (printed|moulded)\b/, '') }));
   const moulded = optionsOf('moulded');
   const stray = session.materials.some(({ id }) => id === value) ? [] : [{ value, label: value }];
   return (
@@ -46,16 +46,30 @@ function MaterialRow() {
   );
 }
 
+/** Which way up gives which layers, the best first, as it lies in the file unless another is chosen. */
+function LayersRow() {
+  const { family } = useSession();
+  const values = useReading((reading) => reading.design.values);
+  const stances = family.stances(values);
+  const more = stances.map(({ id, label, layers }, at) => (
+    <p key={id} className="mt-2">
+      <b>{label}</b>: layers {layers} the strain
+      {at === 0 && ', as the file has it unless you lay it otherwise'}.
+    </p>
+  ));
+  return <ChoiceRow name="layers" field={USE_FIELDS.layers} layout="stack" more={more} />;
+}
+
 /** Plastic and how the part is used: what the allowed strain comes from. */
 export function UseStrip() {
   const temperature = useReading((reading) => reading.design.use.temperature);
   return (
-    <fieldset className="grid grid-cols-2 gap-x-2 border-hair border-t px-3 pt-1 pb-2 sm:gap-x-4 sm:px-5 lg:grid-cols-[2fr_1fr_1.2fr_1fr]">
+    <fieldset className="grid grid-cols-2 gap-x-2 border-hair border-t px-3 pt-1 pb-2 sm:gap-x-4 sm:px-5 lg:grid-cols-[2fr_1fr_1fr_1.2fr] max-sm:[&>div:first-of-type]:col-span-2 max-sm:[&>div:last-of-type]:col-span-2">
       <legend className="sr-only">Plastic and use</legend>
       <MaterialRow />
       <ChoiceRow name="opening" field={USE_FIELDS.opening} layout="stack" />
-      <ChoiceRow name="layers" field={USE_FIELDS.layers} layout="stack" />
       <NumberRow name="temperature" field={USE_FIELDS.temperature} valid={temperature} layout="stack" />
+      <LayersRow />
     </fieldset>
   );
 }

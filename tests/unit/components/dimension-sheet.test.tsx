@@ -151,5 +151,13 @@ describe('the dimension sheet', () => {
     await beIdle();
     expect(effect('armLength')).toBe('+1 mm changes Peak strain by −0.084');
     expect(effect('arms')).toBe('force only');
+    const legend = document.querySelector('[aria-label="Words in the effect column"]')!;
+    const words = [...legend.querySelectorAll('dt')].map((one) => one.textContent);
+    const said = [...document.querySelectorAll('input')].flatMap((one) => {
+      const text = one.closest('.grid')!.lastElementChild!.textContent!;
+      return /^[a-z ]+$/.test(text) ? [text] : [];
+    });
+    expect(new Set(words)).toEqual(new Set(said));
+    expect(legend.textContent).toContain('force onlyleaves this figure as it is and moves a force');
   });
 });

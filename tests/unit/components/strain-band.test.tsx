@@ -4,7 +4,7 @@ import { StrainBand } from '@/components/studio/band/strain-band';
 import { StandingProvider } from '@/components/studio/computed/standing-context';
 import { createSession, presetTyped } from '@/components/studio/session';
 import { SessionProvider } from '@/components/studio/session-context';
-import type { Family } from '@/generators/contract';
+import type { Family, Stance } from '@/generators/contract';
 import { judgedFigure, type Report, report } from '@/generators/report';
 import { ROUND_PLASTIC, TINY } from '../generators/tiny-family';
 
@@ -14,12 +14,13 @@ function bandOf(
   change: (was: Report) => Partial<Report>,
   material = ROUND_PLASTIC,
   volume: number | null = null,
+  stances: readonly Stance[] = [],
 ): string {
   const check: Family['check'] = (...given) => {
     const was = TINY.check(...given);
     return report({ ...was, ...change(was) });
   };
-  const session = createSession({ ...TINY, check }, [material], presetTyped(TINY));
+  const session = createSession({ ...TINY, check, stances: () => stances }, [material], presetTyped(TINY));
   return renderToStaticMarkup(
     <SessionProvider value={session}>
       <StandingProvider>
@@ -80,6 +81,20 @@ describe('the strain band', () => {
     const made = words(bandOf(() => ({}), ROUND_PLASTIC, 2500));
     expect(made).toMatch(/Mass, printed solid 2\.5\s*g/);
     expect(made).not.toContain('not known yet');
+  });
+
+  it('tells beside the layers which way up gives them', () => {
+    const stance = { id: 'side', label: 'On its side', because: '', layers: 'along', orient: {} } as const;
+    const text = words(
+      bandOf(() => ({}), ROUND_PLASTIC, null, [
+        stance,
+        { ...stance, id: 'up', label: 'Upright', layers: 'across' },
+      ]),
+    );
+    expect(text).toMatch(
+      /On its side : layers along the strain, as the file has it unless you lay it otherwise/,
+    );
+    expect(text).toContain('Upright : layers across the strain.');
   });
 
   it('hatches below a least value when the governing figure is a load to be carried', () => {
