@@ -1,3 +1,4 @@
+import { about as armLadder } from './arm-ladder/about';
 import { about as cantileverHook } from './cantilever-hook/about';
 import type { About, Family, Guide } from './contract';
 import { about as foldedHook } from './folded-hook/about';
@@ -92,6 +93,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: hingedBox,
     load: () => import('./hinged-box').then((m) => m.default),
     loadGuide: () => import('./hinged-box/guide').then((m) => m.default),
+  },
+  {
+    about: armLadder,
+    load: () => import('./arm-ladder').then((m) => m.default),
+    loadGuide: () => import('./arm-ladder/guide').then((m) => m.default),
   },
 ];
 
