@@ -10,9 +10,8 @@ export function audited<T>(actor: Member, event: Event, work: (tx: Db, now: Date
   const at = new Date();
   return database().transaction(
     (tx) => {
-      const result = work(tx, at);
       recordEvent(tx, { at, actor, ...event });
-      return result;
+      return work(tx, at);
     },
     { behavior: 'immediate' },
   );

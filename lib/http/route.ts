@@ -40,7 +40,7 @@ interface RouteSpec<B, P> {
   readonly schemas?: Schemas<B, P>;
   readonly limits?: { readonly bodyBytes?: number; readonly urlCharacters?: number };
   readonly rateLimit: RateName;
-  /** the route knows who asks, and takes changes from pages of this site only */
+  /** the route knows who asks */
   readonly auth?: boolean;
   /** a value is sent as JSON, a Response as it is */
   readonly handler: (call: Call<B, P>) => unknown;
@@ -55,9 +55,6 @@ const GUARDS: Readonly<Record<string, string>> = {
   'Referrer-Policy': 'no-referrer',
   'Cross-Origin-Resource-Policy': 'same-origin',
 };
-
-/** Methods that change nothing. */
-const READING: ReadonlySet<string> = new Set(['GET', 'HEAD', 'OPTIONS']);
 
 /** Faults told in one answer. */
 const MOST_ERRORS = 50;
@@ -92,11 +89,8 @@ async function readCall<B, P>(
   if (request.url.length > urlCharacters) {
     throw new RequestProblem('uri-too-long', `The address may be at most ${urlCharacters} characters long.`);
   }
-  if (!READING.has(request.method) && !fromOwnPage(request.headers)) {
-    throw new RequestProblem('not-allowed', 'This was sent by a page of another site.');
-  }
+  checkOrigin(request);
   await limiter(spec.rateLimit).take(clientOf(request));
-  if (spec.auth) checkOrigin(request);
   const viewer = spec.auth ? await currentViewer() : null;
   const body = spec.schemas?.body && (await readJson(request, bodyBytes));
   return {

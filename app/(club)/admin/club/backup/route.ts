@@ -1,11 +1,11 @@
 import { backupDatabase } from '@/lib/access/backup';
-import { currentViewer } from '@/lib/auth/session';
 import { route } from '@/lib/http/route';
 
 export const POST = route({
+  auth: true,
   rateLimit: 'exports',
-  async handler() {
-    const { name, size, content } = await backupDatabase(await currentViewer());
+  async handler({ viewer }) {
+    const { name, size, content } = await backupDatabase(viewer);
     return new Response(content, {
       headers: {
         'Content-Type': 'application/vnd.sqlite3',
