@@ -8,6 +8,8 @@ export default defineConfig({
     tsconfigPaths: true,
     alias: {
       'server-only': here('./tests/support/server-only.ts'),
+      'next/cache': here('./tests/support/next-cache.ts'),
+      'next/headers': here('./tests/support/next-headers.ts'),
       '@/lib/jobs/start-build-thread': here('./tests/support/start-build-thread.ts'),
       '@/lib/jobs/start-picture-thread': here('./tests/support/start-picture-thread.ts'),
       '@/lib/jobs/start-solve-thread': here('./tests/support/start-solve-thread.ts'),
