@@ -1,5 +1,6 @@
 import { about as armLadder } from './arm-ladder/about';
 import { about as cantileverHook } from './cantilever-hook/about';
+import { about as clearanceLadder } from './clearance-ladder/about';
 import type { About, Family, Guide } from './contract';
 import { about as foldedHook } from './folded-hook/about';
 import { about as hingedBox } from './hinged-box/about';
@@ -93,6 +94,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: hingedBox,
     load: () => import('./hinged-box').then((m) => m.default),
     loadGuide: () => import('./hinged-box/guide').then((m) => m.default),
+  },
+  {
+    about: clearanceLadder,
+    load: () => import('./clearance-ladder').then((m) => m.default),
+    loadGuide: () => import('./clearance-ladder/guide').then((m) => m.default),
   },
   {
     about: armLadder,

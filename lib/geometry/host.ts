@@ -25,6 +25,9 @@ export interface KernelHost {
   build(make: (kernel: Kernel) => readonly NamedSolid[], quality: Quality): BuiltBody[];
 }
 
+/** mm3 that faces lying on each other may leave of a common volume of nothing. */
+const ROUND_OFF = 1e-6;
+
 /** The solids of one build: hands out opaque handles, frees all of them at the end. */
 class Shelf {
   private readonly held = new Map<Solid, Manifold>();
@@ -36,7 +39,7 @@ class Shelf {
     const status = manifold.status();
     if (status !== 'NoError') throw new KernelError(operation, status);
     if (!mayBeEmpty && manifold.isEmpty()) throw new KernelError(operation, 'nothing is left');
-    if (manifold.volume() < 0) throw new KernelError(operation, 'the solid is inside out');
+    if (manifold.volume() < -ROUND_OFF) throw new KernelError(operation, 'the solid is inside out');
     return solid;
   }
 

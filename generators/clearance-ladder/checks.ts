@@ -1,0 +1,80 @@
+import { allowableStrain } from '@/lib/materials/allowable';
+import type { Material, Use } from '@/lib/materials/types';
+import { clearanceFor, type Fit } from '@/lib/printing/clearance';
+import { formatQuantity } from '@/lib/units';
+import { markFigure } from '../coupon';
+import { type Figure, judgedFigure, plainFigure, type Report, report, type Verdict } from '../report';
+import { gapsOf, markOf, type Values, widestGap } from './schema';
+import * as source from './sources';
+
+/** Where a gap lies in the ladder. */
+function placeOf(p: Values, gap: number): { verdict: Verdict; because: string } {
+  const gaps = gapsOf(p);
+  if (gap < gaps[0]!) {
+    return { verdict: 'over-limit', because: 'Tighter than the first hole: begin with a smaller gap.' };
+  }
+  if (gap > gaps.at(-1)!) {
+    return { verdict: 'over-limit', because: 'Wider than the last hole: add holes or a larger step.' };
+  }
+  const nearest = gaps.reduce((a, b) => (Math.abs(b - gap) < Math.abs(a - gap) ? b : a));
+  const edge = nearest === gaps[0] || nearest === gaps.at(-1);
+  return edge
+    ? {
+        verdict: 'close-to-limit',
+        because: `At the end of the ladder, marked ${markOf(nearest)}: what lies past it is not tried.`,
+      }
+    : { verdict: 'within-limit', because: `Nearest to the hole marked ${markOf(nearest)}.` };
+}
+
+function fitFigure(p: Values, material: Material, fit: Exclude<Fit, 'press'>): Figure {
+  const expected = clearanceFor(material, fit);
+  const common = { id: `${fit}-gap`, label: `Expected gap a side, ${fit} fit`, unit: 'mm' } as const;
+  if (!expected) {
+    const because = `Not known: ${material.shortName} is moulded, and this coupon is printed.`;
+    return fit === 'slip'
+      ? judgedFigure({ ...common, because, source: source.NO_TABLE })
+      : plainFigure({ ...common, because, source: source.NO_TABLE });
+  }
+  const place = placeOf(p, expected.value);
+  const given = { ...common, value: expected.value, because: place.because, source: expected.source };
+  return fit === 'slip'
+    ? judgedFigure({ ...given, limit: widestGap(p), verdict: place.verdict })
+    : plainFigure(given);
+}
+
+/** Report of a coupon: whether the fits sought lie inside its ladder. */
+export function check(p: Values, material: Material, use: Use): Report {
+  const gaps = gapsOf(p);
+  return report({
+    governing: 'slip-gap',
+    headline: ['snug-gap', 'free-gap', 'steps'],
+    figures: [
+      fitFigure(p, material, 'slip'),
+      fitFigure(p, material, 'snug'),
+      fitFigure(p, material, 'free'),
+      plainFigure({
+        id: 'steps',
+        label: 'Gaps tried',
+        unit: 'mm',
+        value: gaps.at(-1)! - gaps[0]!,
+        low: gaps[0]!,
+        high: gaps.at(-1)!,
+        because: `From ${formatQuantity(gaps[0]!, 'mm')} to ${formatQuantity(gaps.at(-1)!, 'mm')} a side in ${p.holes} steps; the figures are hundredths of a millimetre.`,
+        source: source.GEOMETRY,
+      }),
+      judgedFigure({
+        id: 'wall-between',
+        label: 'Wall between the widest holes',
+        unit: 'mm',
+        value: p.wall,
+        limit: 1.2,
+        limitKind: 'min',
+        because: 'Thin walls give and make a hole seem wider than it is.',
+        source: source.WALL,
+      }),
+      ...markFigure(p),
+    ],
+    curves: [],
+    allowable: allowableStrain(material, use),
+  });
+}
