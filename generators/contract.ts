@@ -115,6 +115,8 @@ export interface BendingPlane {
   readonly modulus: number | null;
   /** direction across the layers in the plane, rad from x, in the stance the use names; null where they lie in it */
   readonly layerNormal: number | null;
+  /** `family`: the part does more in use than this bending, so the picture keeps the family's motion */
+  readonly motion?: 'family';
   /** what the formula leaves out of this outline, shown as the likely reason where the two are far apart */
   readonly apart?: string;
 }

@@ -64,9 +64,10 @@ function poseBody(
 
 /**
  * The motion of a part as it was solved, at true scale: the body that bends takes the shape and the strain of the
- * finite elements, other bodies move as the family says. Points are found in the mesh once for each set of points.
+ * finite elements, other bodies move as the family says, all of them where the plane leaves the motion to it. Points are found in the mesh once for each set of points.
  */
 export function solvedMotion(family: Motion, plane: BendingPlane, solution: Solved): Motion {
+  if (plane.motion === 'family') return family;
   const known = new WeakMap<Float32Array, Seen>();
   const seen = (rest: Float32Array): Seen => {
     const found = known.get(rest) ?? look(plane, solution.mesh, rest);
