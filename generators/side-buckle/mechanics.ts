@@ -1,16 +1,8 @@
 import { secantModulus } from '@/lib/materials/secant';
 import type { Material } from '@/lib/materials/types';
-import { type Arm, guideForce, guideRootStrain, guideStrain } from '@/lib/mechanics/beam';
-import { filletConcentration } from '@/lib/mechanics/fillet';
+import { type Arm, guideForce, guideRootStrain } from '@/lib/mechanics/beam';
+import { type BentFlushArm, bendFlushArm } from '@/lib/mechanics/flush-arm';
 import { wedgeFactor } from '@/lib/mechanics/friction';
-import {
-  type BentArm,
-  bendArm,
-  type FlexibleArm,
-  highestStrain,
-  strainAt,
-} from '@/lib/mechanics/large-deflection';
-import { blockSprings, rootSection, widthStiffening } from '@/lib/mechanics/root';
 import { entryTravel, squeezeTravel } from './layout';
 import type { Values } from './schema';
 
@@ -23,34 +15,8 @@ export const armOf = (p: Values, reach: number): Arm => ({
   tipWidth: p.plugThickness,
 });
 
-/** The fillet stands on the inside only, the outside runs on: it stiffens the root about half as much. */
-const ONE_SIDED = 0.5;
-
-export function flexibleArm(p: Values, reach: number, poisson: number): FlexibleArm {
-  const arm = armOf(p, reach);
-  const fillet = ONE_SIDED * p.rootFillet;
-  const springs = blockSprings(p.plugThickness, rootSection(arm, fillet, poisson));
-  return { arm, fillet, springs, poisson, stiffening: widthStiffening(arm, poisson) };
-}
-
-export interface ArmStrain {
-  readonly flexible: FlexibleArm;
-  readonly bent: BentArm;
-  /** movement of the pushed place, mm */
-  readonly deflection: number;
-  readonly nominal: number;
-  readonly peak: number;
-  readonly handbook: number;
-}
-
-function bentBy(p: Values, reach: number, deflection: number, poisson: number): ArmStrain {
-  const flexible = flexibleArm(p, reach, poisson);
-  const bent = bendArm(flexible, deflection);
-  const nominal = strainAt(flexible, bent, p.rootFillet);
-  const atFillet = nominal * filletConcentration(Math.min(1, p.rootFillet / p.rootThickness));
-  const peak = Math.max(atFillet, highestStrain(flexible, bent, p.rootFillet));
-  return { flexible, bent, deflection, nominal, peak, handbook: guideStrain(armOf(p, reach), deflection) };
-}
+const bentBy = (p: Values, reach: number, deflection: number, poisson: number): BentFlushArm =>
+  bendFlushArm(armOf(p, reach), p.rootFillet, deflection, poisson);
 
 /** Where the finger presses, from the root, mm. */
 export const fingerReach = (p: Values): number => p.armLength + p.padLength / 2;
@@ -62,8 +28,8 @@ export function fingerTravel(p: Values, atEdge: number): number {
 }
 
 export interface BuckleStrain {
-  readonly entry: ArmStrain;
-  readonly squeeze: ArmStrain;
+  readonly entry: BentFlushArm;
+  readonly squeeze: BentFlushArm;
 }
 
 /** Pushing in, each barb pressed at its edge; squeezing, each pad pressed in its middle until the rail stops it. */
@@ -92,7 +58,7 @@ export interface BuckleForces {
   readonly inRange: boolean;
 }
 
-function acrossForce(p: Values, strain: ArmStrain, reach: number, material: Material) {
+function acrossForce(p: Values, strain: BentFlushArm, reach: number, material: Material) {
   const modulus = secantModulus(material, strain.nominal);
   const plain = secantModulus(material, strain.handbook);
   if (!modulus || !plain) return null;

@@ -1,16 +1,24 @@
 import type { Material } from '@/lib/materials/types';
 import { thicknessAt } from '@/lib/mechanics/beam';
+import type { BentFlushArm } from '@/lib/mechanics/flush-arm';
 import { stationValue, strainAt } from '@/lib/mechanics/large-deflection';
 import type { Motion, Posed } from '../contract';
 import { type BuckleLayout, entryTravel, layoutOf, squeezeTravel } from './layout';
-import { type ArmStrain, buckleStrain, fingerReach } from './mechanics';
+import { buckleStrain, fingerReach } from './mechanics';
 import type { Values } from './schema';
 
 /** The housing goes this much further than the barbs need, mm. */
 const AIR = 6;
 
 /** A point of an arm, `out` from the middle of the plug: sections turn with the middle line of the bent arm. */
-function bentPoint(p: Values, layout: BuckleLayout, arm: ArmStrain, share: number, x: number, out: number) {
+function bentPoint(
+  p: Values,
+  layout: BuckleLayout,
+  arm: BentFlushArm,
+  share: number,
+  x: number,
+  out: number,
+) {
   const along = x - layout.root;
   const reach = fingerReach(p);
   const s = Math.min(Math.max(along, 0), reach);
@@ -32,12 +40,12 @@ function bentPoint(p: Values, layout: BuckleLayout, arm: ArmStrain, share: numbe
 }
 
 /** Strain along the arm, raised where the fillet ends. */
-function raised(p: Values, { flexible, bent, nominal, peak }: ArmStrain, s: number): number {
+function raised(p: Values, { flexible, bent, nominal, peak }: BentFlushArm, s: number): number {
   const near = Math.max(0, 1 - Math.abs(s - p.rootFillet) / p.rootFillet) ** 2;
   return strainAt(flexible, bent, s) * (1 + (nominal > 0 ? peak / nominal - 1 : 0) * near);
 }
 
-function posePlug(p: Values, arm: ArmStrain, share: number, rest: Float32Array, out: Posed): void {
+function posePlug(p: Values, arm: BentFlushArm, share: number, rest: Float32Array, out: Posed): void {
   const layout = layoutOf(p);
   for (let i = 0; i < rest.length; i += 3) {
     const [x, y, z] = [rest[i]!, rest[i + 1]!, rest[i + 2]!];
