@@ -10,6 +10,7 @@ import { about as livingHinge } from './living-hinge/about';
 import { about as pegStrap } from './peg-strap/about';
 import { about as plugStopper } from './plug-stopper/about';
 import { about as pressLid } from './press-lid/about';
+import { about as rackStrap } from './rack-strap/about';
 import { about as rodClip } from './rod-clip/about';
 import { about as screwCap } from './screw-cap/about';
 import { about as screwPot } from './screw-pot/about';
@@ -44,6 +45,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: sideBuckle,
     load: () => import('./side-buckle').then((m) => m.default),
     loadGuide: () => import('./side-buckle/guide').then((m) => m.default),
+  },
+  {
+    about: rackStrap,
+    load: () => import('./rack-strap').then((m) => m.default),
+    loadGuide: () => import('./rack-strap/guide').then((m) => m.default),
   },
   {
     about: rodClip,

@@ -1,0 +1,60 @@
+import type { Preset } from '../contract';
+import type { Values } from './schema';
+
+export const presets: readonly Preset<Values>[] = [
+  {
+    id: 'spar-bundle-strap',
+    name: 'Spar bundle strap',
+    purpose: 'Keeps spare masts and spars together on the rack, opened by its tab at every outing.',
+    material: 'pp',
+    use: { opening: 'often', layers: 'along', temperature: 23 },
+    values: {},
+  },
+  {
+    id: 'sail-roll-strap',
+    name: 'Sail roll strap',
+    purpose: 'Soft TPU round a rolled sail: straight, wide, easy on the cloth.',
+    material: 'tpu-95a',
+    use: { opening: 'often', layers: 'along', temperature: 23 },
+    values: {
+      smallestBundle: 38,
+      largestBundle: 46,
+      printedAs: 'straight',
+      bandThickness: 1.6,
+      rootRadius: 0.45,
+      bandWidth: 10,
+      pitch: 4,
+      toothDepth: 1.4,
+      pawlLength: 13,
+      pawlThickness: 2.4,
+      pawlFillet: 1.2,
+      anvil: 2.4,
+      pull: 5,
+    },
+  },
+  {
+    id: 'charging-lead-strap',
+    name: 'Charging lead strap',
+    purpose: 'Holds coiled charging leads in the workshop, in PETG round a wide coil.',
+    material: 'petg',
+    use: { opening: 'sometimes', layers: 'along', temperature: 23 },
+    values: {
+      smallestBundle: 80,
+      largestBundle: 92,
+      bandThickness: 0.8,
+      rootRadius: 0.35,
+      bandWidth: 7,
+      pawlLength: 16,
+      pawlThickness: 1.4,
+      pull: 15,
+    },
+  },
+  {
+    id: 'buoy-line-strap',
+    name: 'Buoy line strap, permanent',
+    purpose: 'Closed once round the neck of a course buoy and cut off at the end of the season.',
+    material: 'pa-conditioned',
+    use: { opening: 'once', layers: 'along', temperature: 23 },
+    values: { smallestBundle: 48, largestBundle: 56, pawlThickness: 1.4, release: 'never', pull: 25 },
+  },
+];
