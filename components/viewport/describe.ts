@@ -18,10 +18,20 @@ export interface Scene {
   readonly allowable: number | null;
   readonly onBed: boolean;
   readonly cut: boolean;
+  /** the place of largest strain is not in what the cut left standing */
+  readonly peakCutAway?: boolean;
 }
 
 /** The picture in words, for those who do not see it. */
-export function describePicture({ bodies, moment, peak, allowable, onBed, cut }: Scene): string {
+export function describePicture({
+  bodies,
+  moment,
+  peak,
+  allowable,
+  onBed,
+  cut,
+  peakCutAway = false,
+}: Scene): string {
   const parts = bodies.map(
     ({ name, size, volume }) =>
       `${bodyWords(name)}, ${sizeWords(size)}, volume ${formatQuantity(volume, 'mm3')}`,
@@ -36,6 +46,7 @@ export function describePicture({ bodies, moment, peak, allowable, onBed, cut }:
           allowable === null ? 'not known' : percent(allowable)
         }.`
       : '',
+    peakCutAway ? 'The place of largest strain is cut away, so it is not marked.' : '',
   ];
   return sentences.filter(Boolean).join(' ');
 }

@@ -1,24 +1,44 @@
 'use client';
 import { type RefObject, useCallback, useRef, useState } from 'react';
+import type { Vec3 } from '@/lib/geometry/kernel';
 import { percent, pullWords } from './describe';
 import { drawDimensions } from './drawing/dimensions';
 import type { Extent, Project } from './drawing/views';
-import type { OverlayContent, Pin } from './hud/overlay';
+import type { OverlayContent } from './hud/overlay';
+import { type Moved, meshOf } from './mesh/arrange';
+import { diagonalOf } from './mesh/bounds';
+import { markOf } from './mesh/sight';
+import type { BodyStyle, Section } from './scene-props';
 import type { ViewportProps } from './types';
 import type { Arrangement } from './use-arrangement';
 import type { BuildState } from './use-build';
 
-const EMPTY: OverlayContent = { dimensions: [], pin: null };
+const EMPTY: OverlayContent = { dimensions: [], pin: null, cutAway: false };
 
-/** On the place of largest strain that is nearest to the eye. */
-function pinOf(shown: Arrangement | null, project: Project): Pin | null {
-  if (!shown?.peak) return null;
-  const { body, vertices, strain } = shown.peak;
-  const { positions: p } = shown.moved[body]!;
-  const nearest = vertices
-    .map((vertex) => project([p[3 * vertex]!, p[3 * vertex + 1]!, p[3 * vertex + 2]!]))
-    .reduce((best, one) => (one.depth > best.depth ? one : best));
-  return { ...nearest, text: `${percent(strain)} ${pullWords(strain)}` };
+/** Nearer than this share of its size to a vertex, the part does not hide it. */
+const SKIN = 0.004;
+
+export interface Staging {
+  readonly styles: Readonly<Record<string, BodyStyle>>;
+  readonly section: Section | null;
+}
+
+/** The mark of the largest strain where it can be seen; `cutAway` where the cut took all of that place. */
+function markPeak(
+  { peak, moved, now }: Arrangement,
+  { styles, section }: Staging,
+  project: Project,
+  eye: Vec3,
+): Pick<OverlayContent, 'pin' | 'cutAway'> {
+  const styleOf = (one: Moved) => styles[one.body.name] ?? 'solid';
+  if (!peak || styleOf(moved[peak.body]!) === 'hidden') return { pin: null, cutAway: false };
+  const size = diagonalOf(now);
+  const solids = moved.filter((one) => styleOf(one) === 'solid').map(meshOf);
+  const sight = { solids, eye, section, skin: SKIN * size };
+  const place = markOf(moved[peak.body]!.positions, peak.vertices, size, sight);
+  if (!place) return { pin: null, cutAway: true };
+  const text = `${percent(peak.strain)} ${pullWords(peak.strain)}`;
+  return { pin: { ...project(place.point), text, seen: place.seen }, cutAway: false };
 }
 
 type Wishes = Pick<ViewportProps, 'showDimensions' | 'onBed' | 'paint' | 'highlightField'>;
@@ -29,16 +49,17 @@ export function useOverlay(
   shown: Arrangement | null,
   { showDimensions, onBed, paint, highlightField = null }: Wishes,
   stage: RefObject<HTMLElement | null>,
+  staging: Staging,
 ) {
   const [overlay, setOverlay] = useState(EMPTY);
   const measured = useRef(0);
   const callouts = showDimensions && !onBed && shown?.nearRest ? build?.callouts : undefined;
   const pinned = paint === 'strain' && !onBed ? shown : null;
   const onFrame = useCallback(
-    (project: Project, size: Extent) => {
+    (project: Project, size: Extent, eye: Vec3) => {
       setOverlay({
+        ...(pinned ? markPeak(pinned, staging, project, eye) : EMPTY),
         dimensions: callouts ? drawDimensions(callouts, project, size, highlightField) : [],
-        pin: pinOf(pinned, project),
       });
       if (measured.current === askedAt || !stage.current) return;
       measured.current = askedAt;
@@ -47,7 +68,7 @@ export function useOverlay(
         dataset.pictureMs = (performance.now() - askedAt).toFixed(1);
       });
     },
-    [callouts, highlightField, pinned, askedAt, stage],
+    [callouts, highlightField, pinned, staging, askedAt, stage],
   );
   return { overlay, onFrame };
 }

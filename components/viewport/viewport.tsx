@@ -85,9 +85,11 @@ export default function Viewport(props: ViewportProps) {
     ghosted: showDimensions,
   });
   const knife = useCut(cut, shown?.now ?? null);
-  const { overlay, onFrame } = useOverlay(built, shown, props, stage);
   const facts = state.bodies ?? [];
   const styles = useMemo(() => stylesOf(facts, chosen, onBed || cut), [facts, chosen, onBed, cut]);
+  const section = flat ? null : knife.section;
+  const staging = useMemo(() => ({ styles, section }), [styles, section]);
+  const { overlay, onFrame } = useOverlay(built, shown, props, stage, staging);
   const end = scaleEnd(built.build?.motion?.peakStrain ?? 0, strainScale);
   const choose = useCallback((name: string, style: BodyStyle) => {
     setChosen((now) => ({ ...now, [name]: style }));
@@ -119,7 +121,7 @@ export default function Viewport(props: ViewportProps) {
             paint={onBed ? 'solid' : paint}
             scaleEnd={end}
             allowable={strainScale}
-            section={knife.section}
+            section={section}
             insets={insets}
             fitKey={`${family} ${onBed} ${flat}`}
             label={`${facts.map(({ name }) => name).join(' and ')}, drawn to scale`}
@@ -129,7 +131,7 @@ export default function Viewport(props: ViewportProps) {
             onLost={lose}
           />
         )}
-        <Overlay {...overlay} />
+        <Overlay dimensions={overlay.dimensions} pin={overlay.pin} />
       </div>
       <p id={descriptionId} className="sr-only">
         {describePicture({
@@ -138,7 +140,8 @@ export default function Viewport(props: ViewportProps) {
           peak: shown?.peak ?? null,
           allowable: strainScale,
           onBed,
-          cut,
+          cut: section !== null,
+          peakCutAway: overlay.cutAway,
         })}
       </p>
       <div
@@ -164,7 +167,7 @@ export default function Viewport(props: ViewportProps) {
             onStyle={choose}
           />
         )}
-        {knife.section && <CutControl choice={knife.choice} at={knife.section.at} onChoice={knife.choose} />}
+        {section && <CutControl choice={knife.choice} at={section.at} onChoice={knife.choose} />}
       </div>
     </section>
   );

@@ -5,15 +5,19 @@ export interface Pin {
   readonly x: number;
   readonly y: number;
   readonly text: string;
+  /** false where the part itself stands before the place: drawn in dashes, as hidden lines are */
+  readonly seen: boolean;
 }
 
 export interface OverlayContent {
   readonly dimensions: readonly DrawnDimension[];
   readonly pin: Pin | null;
+  /** the place of largest strain is in the part that was cut away */
+  readonly cutAway: boolean;
 }
 
 /** Dimension lines and the mark of the peak, over whichever picture is shown. */
-export function Overlay({ dimensions, pin }: OverlayContent) {
+export function Overlay({ dimensions, pin }: Omit<OverlayContent, 'cutAway'>) {
   return (
     <svg aria-hidden="true" className="pointer-events-none absolute inset-0 h-full w-full overflow-hidden">
       {dimensions.map((dimension) => (
@@ -70,14 +74,22 @@ function Dimension({ dimension }: { dimension: DrawnDimension }) {
   );
 }
 
-function PeakPin({ pin: { x, y, text } }: { pin: Pin }) {
+function PeakPin({ pin: { x, y, text, seen } }: { pin: Pin }) {
   const width = text.length * 6.9 + 14;
   const left = x > 240;
   const end = left ? x - 26 : x + 26;
   return (
-    <g>
-      <circle cx={x} cy={y} r={5} fill="none" stroke="var(--ink)" strokeWidth={1.6} />
-      <circle cx={x} cy={y} r={1.6} fill="var(--ink)" />
+    <g data-peak={seen ? 'seen' : 'behind'}>
+      <circle
+        cx={x}
+        cy={y}
+        r={5}
+        fill="none"
+        stroke="var(--ink)"
+        strokeWidth={1.6}
+        strokeDasharray={seen ? undefined : '3 2.2'}
+      />
+      {seen && <circle cx={x} cy={y} r={1.6} fill="var(--ink)" />}
       <path d={`M${left ? x - 5 : x + 5} ${y - 3}L${end} ${y - 22}`} stroke="var(--ink)" fill="none" />
       <rect x={left ? end - width : end} y={y - 33} width={width} height={21} rx={2} fill="var(--ink)" />
       <text

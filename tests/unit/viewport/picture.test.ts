@@ -129,6 +129,14 @@ describe('words for the picture', () => {
     expect(words).toContain('Largest strain 1.2\u202f% in compression; allowable 1.8\u202f%.');
   });
 
+  it('say that the place of largest strain is cut away, for then nothing marks it', () => {
+    const peak = { strain: 0.01, body: 0, vertices: [0] };
+    expect(describePicture({ ...base, peak, cut: true, peakCutAway: true })).toContain(
+      'The place of largest strain is cut away, so it is not marked.',
+    );
+    expect(describePicture({ ...base, peak, cut: true })).not.toContain('cut away');
+  });
+
   it('say that the allowable strain is not known rather than nothing', () => {
     const words = describePicture({ ...base, peak: { strain: 0.01, body: 0, vertices: [0] } });
     expect(words).toContain('allowable not known');
