@@ -39,7 +39,7 @@ function Body({ moved, style, look, ramp }: BodyProps) {
         frustumCulled={false}
         renderOrder={seeThrough ? 4 : 1}
       />
-      {seeThrough ? (
+      {seeThrough && (
         <mesh geometry={model.faces} frustumCulled={false} renderOrder={3}>
           <meshBasicMaterial
             colorWrite={false}
@@ -50,14 +50,18 @@ function Body({ moved, style, look, ramp }: BodyProps) {
             polygonOffsetUnits={2}
           />
         </mesh>
-      ) : (
-        <mesh geometry={model.faces} material={outline} frustumCulled={false} renderOrder={1} />
       )}
+      <mesh
+        geometry={model.faces}
+        material={outline}
+        frustumCulled={false}
+        renderOrder={seeThrough ? 3.5 : 1}
+      />
       <lineSegments geometry={model.creases} frustumCulled={false} renderOrder={seeThrough ? 5 : 2}>
         <lineBasicMaterial
           color={seeThrough ? look.rim : look.line}
           transparent
-          opacity={seeThrough ? 0.55 : 0.85}
+          opacity={seeThrough ? 0.75 : 0.85}
           clippingPlanes={look.planes}
         />
       </lineSegments>

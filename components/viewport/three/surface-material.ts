@@ -50,6 +50,9 @@ export interface SurfaceMaterial {
   apply(look: SurfaceLook): void;
 }
 
+/** Enough to be there over what it covers, little enough to see how that sits inside. */
+const SEE_THROUGH = { plain: 0.62, strained: 0.5 };
+
 const VERTEX_HEAD = /* glsl */ `
 attribute float strain;
 varying float vStrain;
@@ -140,7 +143,7 @@ export function surfaceMaterial(ramp: Texture): SurfaceMaterial {
     apply(look) {
       material.color.set(look.colour);
       material.transparent = look.seeThrough;
-      material.opacity = look.seeThrough ? 0.26 : 1;
+      material.opacity = look.seeThrough ? SEE_THROUGH[look.strained ? 'strained' : 'plain'] : 1;
       material.depthWrite = !look.seeThrough;
       material.clippingPlanes = look.planes;
       uniforms.uInk.value.set(look.line);
