@@ -122,7 +122,8 @@ export async function startMailBox({ smtpPort = 0, pagePort = 0 } = {}) {
 }
 
 if (process.argv[1]?.endsWith('mail-box.mjs')) {
-  const box = await startMailBox({ smtpPort: 3025, pagePort: 3026 });
+  const [smtpPort = 3025, pagePort = 3026] = process.argv.slice(2).map(Number);
+  const box = await startMailBox({ smtpPort, pagePort });
   console.log(
     `Set SMTP_URL=${box.smtpUrl} and MAIL_BOX_URL=${box.pageUrl}; what was sent stands at ${box.pageUrl}`,
   );
