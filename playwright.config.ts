@@ -2,6 +2,7 @@ import { existsSync } from 'node:fs';
 import { defineConfig } from '@playwright/test';
 
 const port = Number(process.env.E2E_PORT ?? 3210);
+const mail = { smtp: port + 1, page: port + 2 };
 const chromium = [process.env.CHROME_PATH, '/usr/bin/chromium'].find((place) => place && existsSync(place));
 
 export default defineConfig({
@@ -32,10 +33,24 @@ export default defineConfig({
       ],
     },
   },
-  webServer: {
-    command: `node node_modules/next/dist/bin/next start -H 127.0.0.1 -p ${port}`,
-    url: `http://127.0.0.1:${port}/api/health`,
-    reuseExistingServer: false,
-    timeout: 60_000,
-  },
+  webServer: [
+    {
+      name: 'mail',
+      command: `node lib/scripts/mail-box.mjs ${mail.smtp} ${mail.page}`,
+      url: `http://127.0.0.1:${mail.page}`,
+      reuseExistingServer: false,
+    },
+    {
+      name: 'site',
+      command: `node node_modules/next/dist/bin/next start -H 127.0.0.1 -p ${port}`,
+      url: `http://127.0.0.1:${port}/api/health`,
+      env: {
+        PORT: String(port),
+        SMTP_URL: `smtp://127.0.0.1:${mail.smtp}`,
+        MAIL_BOX_URL: `http://127.0.0.1:${mail.page}`,
+      },
+      reuseExistingServer: false,
+      timeout: 60_000,
+    },
+  ],
 });
