@@ -16,6 +16,7 @@ import { about as screwCap } from './screw-cap/about';
 import { about as screwPot } from './screw-pot/about';
 import { about as sideBuckle } from './side-buckle/about';
 import { about as torsionLatch } from './torsion-latch/about';
+import { about as webLadder } from './web-ladder/about';
 
 /** What the list knows of a family before it is loaded. */
 export interface FamilyEntry {
@@ -110,6 +111,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: armLadder,
     load: () => import('./arm-ladder').then((m) => m.default),
     loadGuide: () => import('./arm-ladder/guide').then((m) => m.default),
+  },
+  {
+    about: webLadder,
+    load: () => import('./web-ladder').then((m) => m.default),
+    loadGuide: () => import('./web-ladder/guide').then((m) => m.default),
   },
 ];
 
