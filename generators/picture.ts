@@ -31,17 +31,29 @@ function sizeOf(meshes: readonly TriMesh[]): PartInFigures['size'] {
   return [edge(0), edge(1), edge(2)];
 }
 
+const completed = (family: Family, parameters: unknown) => ({
+  ...family.parameters.defaults,
+  ...(parameters as object),
+});
+
+function figuresOf(family: Family, parameters: unknown, bodies: readonly BuiltBody[]): PartInFigures {
+  const volume = bodies.reduce((sum, body) => sum + body.volume, 0);
+  return { size: sizeOf(laidOut(family, completed(family, parameters), bodies)), volume };
+}
+
+/** Size on the bed and volume of a part. */
+export function measurePart(host: KernelHost, family: Family, parameters: unknown): PartInFigures {
+  return figuresOf(family, parameters, buildPart(host, family, { parameters, quality: 'preview' }));
+}
+
 /** A picture of a part as designed, two-body families assembled, with its size on the bed. */
 export function drawPart(
   host: KernelHost,
   family: Family,
   request: { readonly parameters: unknown; readonly size: Size; readonly view?: Direction },
 ): Drawn & PartInFigures {
-  const bodies = buildPart(host, family, { parameters: request.parameters, quality: 'preview' });
-  const values = { ...family.parameters.defaults, ...(request.parameters as object) };
+  const { parameters, size, view } = request;
+  const bodies = buildPart(host, family, { parameters, quality: 'preview' });
   const meshes = bodies.map(({ mesh }) => mesh);
-  const drawn = drawMeshes(meshes, request.size, request.view);
-  const volume = bodies.reduce((sum, body) => sum + body.volume, 0);
-  const { width, height, pixels } = drawn;
-  return { width, height, pixels, size: sizeOf(laidOut(family, values, bodies)), volume };
+  return { ...drawMeshes(meshes, size, view), ...figuresOf(family, parameters, bodies) };
 }

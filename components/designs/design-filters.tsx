@@ -1,8 +1,7 @@
 import { Search } from 'lucide-react';
-import { type ReactNode, useId } from 'react';
 import { Button } from '@/components/ui/button';
-import { classNames } from '@/components/ui/class-names';
 import { lineClass } from '@/components/ui/field-class';
+import { Labelled } from '@/components/ui/labelled';
 import { type Option, SelectField } from '@/components/ui/select-field';
 import { VERDICT_WORDS } from '@/generators/report';
 
@@ -14,25 +13,6 @@ export interface Chosen {
   readonly family?: string | undefined;
   readonly verdict?: string | undefined;
   readonly deleted: boolean;
-}
-
-/** A small label over its field, which gets the id it is given. */
-export function Labelled({
-  label,
-  className,
-  children,
-}: {
-  label: string;
-  className?: string;
-  children: (id: string) => ReactNode;
-}) {
-  const id = useId();
-  return (
-    <div className={classNames('grid gap-1 text-sm', className)}>
-      <label htmlFor={id}>{label}</label>
-      {children(id)}
-    </div>
-  );
 }
 
 /** What the list is narrowed to; a plain form, so that the address holds it. */

@@ -7,6 +7,7 @@ export interface Place {
 export const PLACES: readonly Place[] = [
   { href: '/design', name: 'Design' },
   { href: '/designs', name: 'My designs' },
+  { href: '/library', name: 'Club library' },
   { href: '/materials', name: 'Materials' },
   { href: '/guide', name: 'Guide' },
 ];

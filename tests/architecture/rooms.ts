@@ -25,6 +25,10 @@ export const ROOMS: readonly Room[] = [
     may: [...CORE, 'lib/materials', 'lib/mechanics', 'lib/geometry', 'lib/fea', 'lib/export', 'lib/printing'],
   },
   { path: 'db', may: [...CORE, 'lib/env.ts', 'lib/materials', 'generators'] },
+  {
+    path: 'db/seed',
+    may: [...CORE, 'lib/env.ts', 'db', 'lib/materials', 'generators', 'lib/geometry', 'lib/storage'],
+  },
   { path: 'lib/auth', may: [...CORE, 'lib/env.ts', 'db', 'lib/mail'] },
   { path: 'lib/mail', may: [...CORE, 'lib/env.ts', 'db'] },
   { path: 'lib/storage', may: [...CORE, 'lib/env.ts', 'db'] },
