@@ -15,6 +15,7 @@ import { about as rodClip } from './rod-clip/about';
 import { about as screwCap } from './screw-cap/about';
 import { about as screwPot } from './screw-pot/about';
 import { about as sideBuckle } from './side-buckle/about';
+import { about as softMount } from './soft-mount/about';
 import { about as torsionLatch } from './torsion-latch/about';
 import { about as webLadder } from './web-ladder/about';
 
@@ -116,6 +117,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: webLadder,
     load: () => import('./web-ladder').then((m) => m.default),
     loadGuide: () => import('./web-ladder/guide').then((m) => m.default),
+  },
+  {
+    about: softMount,
+    load: () => import('./soft-mount').then((m) => m.default),
+    loadGuide: () => import('./soft-mount/guide').then((m) => m.default),
   },
 ];
 
