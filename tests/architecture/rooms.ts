@@ -75,6 +75,8 @@ export const ROOMS: readonly Room[] = [
     may: [...CORE, 'generators', 'lib/geometry', 'lib/materials', 'lib/fea', 'components/ui'],
   },
   { path: 'components/ui', may: CORE },
+  // the record of the finite elements, written by a script and read by the guide
+  { path: 'public/verification', may: [] },
   {
     path: 'components',
     may: [
@@ -88,6 +90,7 @@ export const ROOMS: readonly Room[] = [
       'lib/printing',
       'lib/fea',
       'lib/mechanics',
+      'public/verification',
     ],
     types: ['lib/access', 'lib/forms'],
   },
