@@ -86,6 +86,8 @@ export interface Motion {
   readonly to: string;
   /** largest absolute strain at t = 1, for the colour scale; 0 where nothing strains */
   readonly peakStrain: number;
+  /** what shape and strain come from; left out: the family's formulas */
+  readonly by?: string;
   /** signed strain of the place to be marked at a moment; left out: the largest absolute one of the pose */
   readonly markedStrain?: (t: number) => number;
   pose(body: string, rest: Float32Array, t: number, out: Posed): void;

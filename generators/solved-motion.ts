@@ -77,6 +77,7 @@ export function solvedMotion(family: Motion, plane: BendingPlane, solution: Solv
   const peak = countedPeak(solution, plane);
   return {
     ...family,
+    by: 'finite elements',
     peakStrain: Math.max(solution.tension.strain, -solution.compression.strain),
     markedStrain: (t) => (t === 0 ? 0 : momentAt(solution, t).strain[peak.node]!),
     pose(body, rest, t, out) {

@@ -102,7 +102,12 @@ export function GuideArticle({ about, guide }: { about: About; guide: Guide }) {
             </div>
             <p className="mt-4 max-w-[68ch] text-muted">
               Lengths in mm, forces in N, stresses in MPa, strains as fractions, angles inside formulas in
-              radians.{' '}
+              radians. Where the part bends as a flat outline, the design page solves it by finite elements as
+              well and lets them carry the verdict:{' '}
+              <Link href="/guide/verification" className="underline underline-offset-4">
+                how far these can be trusted
+              </Link>
+              .{' '}
               <Link href="/about#marks" className="underline underline-offset-4">
                 What the marks of sources mean
               </Link>

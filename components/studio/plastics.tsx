@@ -6,6 +6,7 @@ import { Sheet, SheetTitle } from '@/components/ui/sheet';
 import { type Figure, VERDICT_WORDS } from '@/generators/report';
 import { figureOf } from '@/generators/sensitivity';
 import { formatQuantity } from '@/lib/units';
+import { useStanding } from './computed/standing-context';
 import { useReading, useSession, useSubject } from './session-context';
 import { useIdleMap } from './use-idle-map';
 import { VerdictIcon } from './verdict';
@@ -107,11 +108,15 @@ function Plastic({ id, standing }: { id: string; standing: Standing }) {
 /** Which plastic: the same part in each, by how much of the limit it uses. */
 export function Plastics() {
   const standings = useStandings();
+  const { basis } = useStanding();
   return (
     <Sheet labelledBy="plastics" className="px-5 pt-4 pb-2 sm:px-7">
       <SheetTitle id="plastics" aside={<span className="text-muted text-sm">share of the limit in use</span>}>
         The same part in other plastics
       </SheetTitle>
+      {basis.kind !== 'formula' && (
+        <p className="text-muted text-sm">All by the corrected formula, so that they compare alike.</p>
+      )}
       <ul className="mt-3">
         {standings.map(([id, standing]) => (
           <Plastic key={id} id={id} standing={standing} />

@@ -13,7 +13,11 @@ export const pullWords = (strain: number): string => (strain < 0 ? 'compression'
 
 export interface Scene {
   readonly bodies: readonly BodyFacts[];
-  readonly moment: { readonly label: string; readonly share: number } | null;
+  readonly moment: {
+    readonly label: string;
+    readonly share: number;
+    readonly by?: string | undefined;
+  } | null;
   readonly peak: Peak | null;
   readonly allowable: number | null;
   readonly onBed: boolean;
@@ -41,6 +45,7 @@ export function describePicture({
     onBed ? 'Laid on the print bed, layers level.' : '',
     cut ? 'Cut open to show the section.' : '',
     moment && moment.share > 0 ? `${moment.label} ${Math.round(100 * moment.share)} % of the way.` : '',
+    moment && moment.share > 0 && moment.by && !onBed ? `Bent shape by ${moment.by}, at true scale.` : '',
     peak && !onBed
       ? `Largest strain ${percent(peak.strain)} in ${pullWords(peak.strain)}; allowable ${
           allowable === null ? 'not known' : percent(allowable)

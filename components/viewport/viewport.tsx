@@ -136,7 +136,7 @@ export default function Viewport(props: ViewportProps) {
       <p id={descriptionId} className="sr-only">
         {describePicture({
           bodies: facts,
-          moment: motion && { label: motion.label, share: flex },
+          moment: motion && { label: motion.label, share: flex, by: motion.by },
           peak: shown?.peak ?? null,
           allowable: strainScale,
           onBed,
@@ -151,7 +151,12 @@ export default function Viewport(props: ViewportProps) {
         <div className="pointer-events-none flex flex-wrap items-start justify-between gap-2 *:pointer-events-auto">
           <ViewButtons commands={commands} />
           {paint === 'strain' && !onBed && (
-            <StrainLegend scaleEnd={end} allowable={strainScale} peak={Math.abs(shown?.peak?.strain ?? 0)} />
+            <StrainLegend
+              scaleEnd={end}
+              allowable={strainScale}
+              peak={Math.abs(shown?.peak?.strain ?? 0)}
+              by={built.build?.motion?.by ?? 'the formula'}
+            />
           )}
         </div>
         <Remark state={state} layerStep={shown?.bed?.layerStep ?? null} />

@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import Link from 'next/link';
 import { GuideIndex } from '@/components/site/guide-index';
 import { FAMILIES } from '@/generators';
 
@@ -26,6 +27,13 @@ export default async function GuideIndexPage() {
         and the range it holds in, and what to mind in printing.
       </p>
       <GuideIndex entries={entries} />
+      <p className="mt-8 max-w-prose text-lg">
+        Hooks, clips and hinges are also solved by finite elements while you change them.{' '}
+        <Link href="/guide/verification" className="font-semibold underline underline-offset-4">
+          How far the computed strain can be trusted
+        </Link>
+        , case by case.
+      </p>
     </main>
   );
 }

@@ -7,8 +7,10 @@ interface Axes {
   readonly y: Scale;
 }
 
-function axesOf({ points, band, x, y }: Curve): Axes {
-  const highs = [...points.map(([, value]) => value), ...(band ?? []).map(([, high]) => high)];
+type Points = Curve['points'];
+
+function axesOf({ points, band, x, y }: Curve, beside: Points): Axes {
+  const highs = [...points, ...beside, ...(band ?? [])].map(([, high]) => high);
   return {
     x: scaleOver(
       points.map(([value]) => shown(value, x.unit)),
@@ -24,8 +26,8 @@ function axesOf({ points, band, x, y }: Curve): Axes {
 const at = (axes: Axes, curve: Curve, x: number, y: number): string =>
   `${placeOn(axes.x, shown(x, curve.x.unit)).toFixed(2)} ${(100 - placeOn(axes.y, shown(y, curve.y.unit))).toFixed(2)}`;
 
-function linePath(axes: Axes, curve: Curve): string {
-  return `M${curve.points.map(([x, y]) => at(axes, curve, x, y)).join('L')}`;
+function linePath(axes: Axes, curve: Curve, points: Points = curve.points): string {
+  return `M${points.map(([x, y]) => at(axes, curve, x, y)).join('L')}`;
 }
 
 function bandPath(axes: Axes, curve: Curve): string | null {
@@ -39,9 +41,12 @@ function bandPath(axes: Axes, curve: Curve): string | null {
 const named = ({ label, unit }: Curve['x']): string =>
   UNIT_SYMBOL[unit] ? `${label}, ${UNIT_SYMBOL[unit]}` : label;
 
-/** A curve with its band, drawn to the width there is; labels are text, so they never shrink with the drawing. */
-export function CurvePlot({ curve }: { curve: Curve }) {
-  const axes = axesOf(curve);
+/**
+ * A curve with its band, drawn to the width there is; labels are text, so they never shrink with the drawing. `beside`
+ * is a thin line for comparison.
+ */
+export function CurvePlot({ curve, beside = [] }: { curve: Curve; beside?: Points }) {
+  const axes = axesOf(curve, beside);
   const band = bandPath(axes, curve);
   return (
     <figure className="grid grid-cols-[2.75rem_1fr] gap-x-2">
@@ -76,6 +81,14 @@ export function CurvePlot({ curve }: { curve: Curve }) {
           <path key={tick} d={`M${placeOn(axes.x, tick)} 100v2.5`} stroke="var(--ink)" />
         ))}
         {band && <path d={band} fill="var(--petrol-soft)" />}
+        {beside.length > 0 && (
+          <path
+            d={linePath(axes, curve, beside)}
+            stroke="var(--ink)"
+            strokeWidth="1.5"
+            strokeDasharray="5 4"
+          />
+        )}
         <path
           d={linePath(axes, curve)}
           stroke="var(--petrol)"

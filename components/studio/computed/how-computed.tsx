@@ -1,5 +1,6 @@
 'use client';
 
+import Link from 'next/link';
 import { type ReactNode, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { Segmented } from '@/components/ui/segmented';
@@ -173,7 +174,10 @@ function Body() {
       <p className="max-w-prose text-sm">
         {basis.kind === 'formula'
           ? basis.because
-          : 'The outline of the part is cut into triangles, held and pushed as in use, and brought to balance step by step.'}
+          : 'The outline of the part is cut into triangles, held and pushed as in use, and brought to balance step by step.'}{' '}
+        <Link href="/guide/verification" className="font-semibold underline underline-offset-4">
+          How far this can be trusted
+        </Link>
       </p>
       {plane && solution && <Solution solution={solution} plane={plane} />}
       {basis.kind === 'solving' && <p className="text-muted text-sm">Being solved.</p>}

@@ -80,7 +80,7 @@ export function MeshPicture({ solution, plane, allowable, bent }: MeshPicturePro
         )}
       </svg>
       <figcaption className="grid gap-2 text-sm">
-        {bent && <StrainLegend scaleEnd={end} allowable={allowable} peak={strain} />}
+        {bent && <StrainLegend scaleEnd={end} allowable={allowable} peak={strain} by="finite elements" />}
         <ul className="flex flex-wrap gap-x-5 gap-y-1 text-muted">
           <Key className="bg-ink">held</Key>
           <Key className="bg-petrol">pushed</Key>

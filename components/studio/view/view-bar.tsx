@@ -4,8 +4,11 @@ import { useId } from 'react';
 import { classNames } from '@/components/ui/class-names';
 import { SelectField } from '@/components/ui/select-field';
 import type { Motion, Stance } from '@/generators/contract';
+import { readingAt, readingWords, stepShares } from '../computed/reading';
+import { shapeOf } from '../computed/standing';
+import { useStanding } from '../computed/standing-context';
 import { useReading, useSession } from '../session-context';
-import { FlexSlider } from './flex-slider';
+import { FlexSlider, type SolvedSteps } from './flex-slider';
 import type { ViewState } from './view-state';
 
 function Look({ pressed, onPress, children }: { pressed: boolean; onPress: () => void; children: string }) {
@@ -70,6 +73,31 @@ function StanceChoice({
   );
 }
 
+/** The load steps of the shape shown and what they say of this moment; null while it is the formula's. */
+function useSolvedSteps(flex: number): SolvedSteps | null {
+  const shape = shapeOf(useStanding());
+  if (!shape) return null;
+  const { solution, plane } = shape;
+  return { shares: stepShares(solution), words: readingWords(readingAt(solution, plane, flex), plane) };
+}
+
+/** What was solved at the moment shown, in a line that stays as long as the part can be solved. */
+function SolvedLine({ solved }: { solved: SolvedSteps | null }) {
+  const { basis, plane } = useStanding();
+  if (!plane || basis.kind === 'formula') return null;
+  return (
+    <p className="border-hair border-t px-4 py-1.5 text-sm tabular-nums" data-solved-line="">
+      {solved ? (
+        <>
+          <span className="text-muted">Solved, at true scale:</span> {solved.words}
+        </>
+      ) : (
+        <span className="text-muted">Finite elements are being solved.</span>
+      )}
+    </p>
+  );
+}
+
 export function ViewBar({
   view,
   onView,
@@ -85,10 +113,13 @@ export function ViewBar({
   stance: Stance | null;
   onStance: (id: string) => void;
 }) {
+  const solved = useSolvedSteps(view.flex);
   return (
     <div className="border-hair border-t">
       <div className="flex flex-wrap items-center gap-x-5 gap-y-2 px-4 py-2">
-        {!view.onBed && <FlexSlider motion={motion} flex={view.flex} onFlex={(flex) => onView({ flex })} />}
+        {!view.onBed && (
+          <FlexSlider motion={motion} flex={view.flex} onFlex={(flex) => onView({ flex })} solved={solved} />
+        )}
         <fieldset className="flex flex-wrap gap-1.5">
           <legend className="sr-only">Show</legend>
           {motion.peakStrain > 0 && (
@@ -112,6 +143,7 @@ export function ViewBar({
           )}
         </fieldset>
       </div>
+      {!view.onBed && <SolvedLine solved={solved} />}
       {view.onBed && stance && <StanceChoice stances={stances} stance={stance} onStance={onStance} />}
     </div>
   );

@@ -8,17 +8,19 @@ interface LegendProps {
   readonly allowable: number | null;
   /** largest absolute strain shown, as a fraction */
   readonly peak: number;
+  /** what shape and strain come from */
+  readonly by: string;
 }
 
 const HATCH = `repeating-linear-gradient(135deg, ${PAINT_INK}80 0 1px, transparent 1px 6px)`;
 
 /** The scale of the strain colours, always beside the painted part: allowable above, largest strain below. */
-export function StrainLegend({ scaleEnd, allowable, peak }: LegendProps) {
+export function StrainLegend({ scaleEnd, allowable, peak, by }: LegendProps) {
   const share = (strain: number) => Math.min(1, strain / scaleEnd);
   const limit = allowable === null ? 'not known' : percent(allowable);
   return (
     <figure
-      aria-label={`Strain scale from 0 to ${percent(scaleEnd)}. Allowed ${limit}, largest now ${percent(peak)}.`}
+      aria-label={`Strain by ${by}: scale from 0 to ${percent(scaleEnd)}, pulled in warm colours, squeezed in hatched blue. Allowed ${limit}, largest now ${percent(peak)}.`}
       className="pointer-events-none m-0 rounded-sheet border border-hair bg-sheet/90 px-2.5 py-2 text-[12px] leading-none text-ink"
     >
       <div aria-hidden="true" className="grid grid-cols-[auto_12rem] gap-x-2">
@@ -53,6 +55,9 @@ export function StrainLegend({ scaleEnd, allowable, peak }: LegendProps) {
           )}
         </div>
       </div>
+      <p aria-hidden="true" className="mt-1.5 text-muted">
+        strain by {by}
+      </p>
     </figure>
   );
 }
