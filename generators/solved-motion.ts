@@ -43,6 +43,12 @@ function look({ placements, model }: BendingPlane, mesh: Mesh, rest: Float32Arra
   return { anchors: locate(mesh, points), sides };
 }
 
+/** Distance from the mesh, mm, past which a point belongs to what the plane leaves out, such as the foot of a clip. */
+const OUTSIDE = 0.1;
+
+const isOutside = ({ offsets }: Anchors, i: number): boolean =>
+  Math.hypot(offsets[2 * i]!, offsets[2 * i + 1]!) > OUTSIDE;
+
 /** Placements of one plane differ by shifts only, so the first gives the directions. */
 function poseBody(
   { placements: [at] }: BendingPlane,
@@ -58,13 +64,14 @@ function poseBody(
     for (let k = 0; k < 3; k++) {
       out.positions[3 * i + k] = rest[3 * i + k]! + at[k]! * sides[i]! * moved.x + at[4 + k]! * moved.y;
     }
-    out.strain[i] = moved.strain;
+    out.strain[i] = isOutside(anchors, i) ? 0 : moved.strain;
   }
 }
 
 /**
  * The motion of a part as it was solved, at true scale: the body that bends takes the shape and the strain of the
- * finite elements, other bodies move as the family says, all of them where the plane leaves the motion to it. Points are found in the mesh once for each set of points.
+ * finite elements, other bodies move as the family says, all of them where the plane leaves the motion to it. What the
+ * plane leaves out of the body is carried along unstrained. Points are found in the mesh once for each set of points.
  */
 export function solvedMotion(family: Motion, plane: BendingPlane, solution: Solved): Motion {
   if (plane.motion === 'family') return family;

@@ -271,6 +271,39 @@ describe('outline of the plane model', () => {
   });
 });
 
+describe('a report on the finite elements', () => {
+  const values = hook.parameters.defaults;
+  const { plane, solution, formula, report } = computed(hook, values, LINEAR_PLASTIC);
+
+  it('stays on the formula where the large movement was lost, and says so', () => {
+    const lost = withComputed(formula, plane, { ...solution, method: 'linear', fellBack: 'no balance' });
+    expect(lost.figures).toBe(formula.figures);
+    expect(lost.verdict).toBe(formula.verdict);
+    expect(lost.computed).toMatchObject({ fellBack: 'no balance', method: 'linear' });
+  });
+
+  it('has curves that end at the computed figures', () => {
+    const end = (given: typeof formula, id: string) =>
+      given.curves.find((one) => one.id === id)!.points.at(-1)![1];
+    expect(end(report, 'strain')).toBeCloseTo(figure(report, 'peak-strain'), 9);
+    const top = (given: typeof formula) =>
+      Math.max(...given.curves.find(({ id }) => id === 'insertion')!.points.map(([, y]) => y));
+    const ratio = figure(report, 'deflection-force') / figure(formula, 'deflection-force');
+    expect(top(report) / top(formula)).toBeCloseTo(ratio, 9);
+    const [upper, own] = [report, formula].map(
+      (one) => one.curves.find(({ id }) => id === 'insertion')!.band![3]![1],
+    );
+    expect(upper! / own!).toBeCloseTo(ratio, 9);
+  });
+
+  it('names what the family’s formula leaves out where the two are far apart', () => {
+    const values = { ...clip.parameters.defaults, ...clip.presets[0]!.values, tipThickness: 0.8 };
+    const { report: far } = computed(clip, values, LINEAR_PLASTIC);
+    expect(Math.abs(far.computed.difference!)).toBeGreaterThan(0.1);
+    expect(far.computed.likely).toMatch(/thins only from the fillet/);
+  });
+});
+
 describe('families without a plane model', () => {
   it('say so', () => {
     expect(bendingOf(torsionLatch, torsionLatch.parameters.defaults, TOUGH, DEFAULT_USE)).toEqual({
@@ -302,6 +335,25 @@ describe('solved motion', () => {
     family.pose('receiver', rest, 0.5, asFamily!);
     expect(own).toEqual(asFamily);
     expect(motion.peakStrain).toBeGreaterThanOrEqual(solution.tension.strain);
+  });
+
+  it('marks the strain the verdict counts at every load step, and says where it comes from', () => {
+    const { plane, solution } = computed(hook, hook.parameters.defaults, LINEAR_PLASTIC);
+    const motion = solvedMotion(hook.motion(hook.parameters.defaults, LINEAR_PLASTIC), plane, solution);
+    expect(motion.by).toBe('finite elements');
+    expect(motion.markedStrain!(0)).toBe(0);
+    expect(motion.markedStrain!(1)).toBeCloseTo(solution.tension.strain, 6);
+    expect(motion.markedStrain!(0.5)).toBeGreaterThan(0.4 * solution.tension.strain);
+  });
+
+  it('leaves the foot of a clip unstrained, which the plane has only above its stem', () => {
+    const values = clip.parameters.defaults;
+    const { plane, solution } = computed(clip, values, LINEAR_PLASTIC);
+    const motion = solvedMotion(clip.motion(values, LINEAR_PLASTIC), plane, solution);
+    const rest = Float32Array.of(values.stemWidth / 2 + 3, 0, values.footThickness / 2);
+    const out = { positions: new Float32Array(3), strain: new Float32Array(1) };
+    motion.pose('clip', rest, 1, out);
+    expect(out.strain[0]).toBe(0);
   });
 
   it('folds both leaves of a hinge alike', () => {
