@@ -1,6 +1,7 @@
 'use client';
 
 import { type ReactNode, use, useEffect, useEffectEvent, useRef, useState } from 'react';
+import { prepareSolver } from '@/components/viewport/solve-client';
 import type { ViewportState } from '@/components/viewport/types';
 import type { Family } from '@/generators/contract';
 import type { Material } from '@/lib/materials/types';
@@ -117,8 +118,10 @@ export interface StudioProps extends Given {
   readonly materials: readonly Material[];
 }
 
-const begin = (family: Family, materials: readonly Material[], query: string): Session =>
-  createSession(family, materials, startOf(family, query).typed);
+function begin(family: Family, materials: readonly Material[], query: string): Session {
+  if (family.bending) prepareSolver();
+  return createSession(family, materials, startOf(family, query).typed);
+}
 
 /** The design page of a family. */
 export function Studio({ family: id, materials, ...given }: StudioProps) {

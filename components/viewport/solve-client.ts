@@ -11,8 +11,6 @@ export interface Solve {
 export interface SolveClient {
   /** The solution, or null where a later request overtook this one. Never rejects: a lost worker is a reason. */
   solve(request: SolveRequest): Promise<Solve | null>;
-  /** Starts the worker and has the engine compile the solver. */
-  warmUp(): void;
   dispose(): void;
 }
 
@@ -24,8 +22,27 @@ export interface SolverPort {
   terminate(): void;
 }
 
-const startSolver = (): SolverPort =>
-  new Worker(new URL('./solve.worker.ts', import.meta.url), { type: 'module' });
+const spawn = (): SolverPort => new Worker(new URL('./solve.worker.ts', import.meta.url), { type: 'module' });
+
+/** Started before the page is alive, for the first client to take. */
+let spare: SolverPort | null = null;
+
+/** Has the worker load and the engine compile the solver while the page is still brought to life. */
+export function prepareSolver(): void {
+  if (typeof Worker === 'undefined' || spare) return;
+  const started = spawn();
+  started.addEventListener('error', () => {
+    if (spare === started) spare = null;
+  });
+  started.postMessage({ kind: 'warm-up' });
+  spare = started;
+}
+
+function startSolver(): SolverPort {
+  const worker = spare ?? spawn();
+  spare = null;
+  return worker;
+}
 
 interface Job {
   readonly id: number;
@@ -51,10 +68,6 @@ class LatestSolve implements SolveClient {
       this.waiting = { id: this.jobs, request, resolve };
       this.next();
     });
-  }
-
-  warmUp(): void {
-    if (!this.ended) this.port().postMessage({ kind: 'warm-up' });
   }
 
   dispose(): void {

@@ -1,6 +1,5 @@
-import { RECOMMENDED_MESH } from '@/lib/fea/mesh/options';
 import { cantileverModel } from '@/lib/fea/shapes/cantilever';
-import { NON_LINEAR } from '@/lib/fea/solve/options';
+import { LINEAR } from '@/lib/fea/solve/options';
 import { buffersOf, type SolveRequest, solveRequested } from '@/lib/fea/solve/request';
 import type { Solution } from '@/lib/fea/solve/solution';
 
@@ -15,8 +14,19 @@ export interface FromSolver {
   readonly took: number;
 }
 
-/** A small arm solved a few times, so that the engine has compiled the solver before the first part comes. */
-function warmUp(): void {
+/** Times a small arm is solved, so that the engine has compiled the solver before the first part comes. */
+const WARM_UPS = 6;
+
+let asked = false;
+
+/** One at a time, so that a part that comes meanwhile waits for one at most; none once a part has come. */
+function warmUp(left: number): void {
+  if (left === 0 || asked) return;
+  solveRequested(smallArm());
+  setTimeout(() => warmUp(left - 1));
+}
+
+function smallArm(): SolveRequest {
   const model = cantileverModel({
     length: 8,
     thickness: 2,
@@ -28,8 +38,7 @@ function warmUp(): void {
     deflection: 0.5,
   });
   const numbers = { modulus: 1500, poisson: 0.35, layers: null };
-  const options = { ...NON_LINEAR, mesh: RECOMMENDED_MESH, steps: 1 };
-  for (let i = 0; i < 4; i++) solveRequested({ model, numbers, options, allowable: null });
+  return { model, numbers, options: LINEAR, allowable: null };
 }
 
 function solve(job: number, request: SolveRequest): void {
@@ -45,6 +54,7 @@ function solve(job: number, request: SolveRequest): void {
 }
 
 self.addEventListener('message', (event: MessageEvent<ToSolver>) => {
-  if (event.data.kind === 'solve') solve(event.data.job, event.data.request);
-  else warmUp();
+  if (event.data.kind === 'warm-up') return warmUp(WARM_UPS);
+  asked = true;
+  solve(event.data.job, event.data.request);
 });

@@ -56,10 +56,10 @@ export function formulaBeside({ report, formula }: Standing, id: string): number
   return shown && own && shown !== own ? own.value : null;
 }
 
-/** The solution for large movement that the picture may take its shape from. */
+/** The solution for large movement that the picture may take its shape from; null where it takes the family's. */
 export function shapeOf({ basis, plane, solution }: Standing) {
   const final = basis.kind === 'computed' && !basis.pending && solution?.method === 'non-linear';
-  return final && plane ? { plane, solution } : null;
+  return final && plane && plane.motion !== 'family' ? { plane, solution } : null;
 }
 
 /** True for a figure that the finite elements are being asked for. */

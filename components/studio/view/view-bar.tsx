@@ -84,7 +84,7 @@ function useSolvedSteps(flex: number): SolvedSteps | null {
 /** What was solved at the moment shown, in a line that stays as long as the part can be solved. */
 function SolvedLine({ solved }: { solved: SolvedSteps | null }) {
   const { basis, plane } = useStanding();
-  if (!plane || basis.kind === 'formula') return null;
+  if (!plane || plane.motion === 'family' || basis.kind === 'formula') return null;
   return (
     <p className="border-hair border-t px-4 py-1.5 text-sm tabular-nums" data-solved-line="">
       {solved ? (

@@ -1,6 +1,11 @@
-import { describe, expect, it } from 'vitest';
+import { describe, expect, it, vi } from 'vitest';
 import type { FromSolver, ToSolver } from '@/components/viewport/solve.worker';
-import { createSolveClient, type SolveClient, type SolverPort } from '@/components/viewport/solve-client';
+import {
+  createSolveClient,
+  prepareSolver,
+  type SolveClient,
+  type SolverPort,
+} from '@/components/viewport/solve-client';
 import { cantileverModel } from '@/lib/fea/shapes/cantilever';
 import { LINEAR } from '@/lib/fea/solve/options';
 import type { SolveRequest } from '@/lib/fea/solve/request';
@@ -101,10 +106,34 @@ describe('solve client', () => {
     expect(await client.solve(request(11))).toBeNull();
   });
 
-  it('warms the worker up before the first request', () => {
-    const { client, workers } = setUp();
-    client.warmUp();
-    expect(workers[0]!.got).toEqual([{ kind: 'warm-up' }]);
+  it('answers with the reason when no worker can be had at all', async () => {
+    const client = createSolveClient(() => {
+      throw new Error('workers are not allowed here');
+    });
+    expect(await reasonOf(client.solve(request(10)))).toMatch(/workers are not allowed here/);
+  });
+
+  it('takes the worker that was started before the page was alive, and starts its own after that', () => {
+    const workers: FakeSolver[] = [];
+    vi.stubGlobal(
+      'Worker',
+      class extends FakeSolver {
+        constructor() {
+          super();
+          workers.push(this);
+        }
+      },
+    );
+    prepareSolver();
+    prepareSolver();
+    expect(workers.map(({ got }) => got)).toEqual([[{ kind: 'warm-up' }]]);
+    const [one, other] = [createSolveClient(), createSolveClient()];
+    void one.solve(request(10));
+    void other.solve(request(11));
+    expect(workers.map((worker) => worker.jobs())).toEqual([[1], [1]]);
+    one.dispose();
+    other.dispose();
+    vi.unstubAllGlobals();
   });
 
   it('sends requests that survive structured cloning unchanged', () => {
