@@ -30,7 +30,8 @@ function Strip({ cases, quantity, dot }: { cases: readonly Case[]; quantity: Qua
 
 function spreadWords(cases: readonly Case[], quantity: Quantity): string {
   const spread = spreadOf(cases, quantity);
-  return spread ? `${spread.count}, at most ${significant(spread.largest, 2)} %` : 'no reference';
+  if (spread) return `${spread.count}, at most ${significant(spread.largest, 2)} %`;
+  return cases.some((one) => one.exception !== null && one[quantity]) ? 'exception' : 'no reference';
 }
 
 /** One dot a case: how far computed and reference are apart, by what the case is about. */

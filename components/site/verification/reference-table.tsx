@@ -83,7 +83,7 @@ function Heads() {
 /** Every case with both figures, folded by group. */
 export function ReferenceTable() {
   return (
-    <div className="grid gap-2">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-2">
       {groups().map(([name, cases]) => (
         <details key={name} className="rounded-sheet border border-hair bg-sheet px-4 py-2 sm:px-6">
           <summary className="min-h-8 font-semibold">

@@ -20,7 +20,7 @@ const milliseconds = (time: number): string => `${significant(time, 2)} ms`;
 
 function Row({ term, children }: { term: string; children: ReactNode }) {
   return (
-    <div className="grid grid-cols-[10.5rem_1fr] gap-x-4 border-hair border-t py-1.5">
+    <div className="grid grid-cols-[7.5rem_1fr] sm:grid-cols-[10.5rem_1fr] gap-x-4 border-hair border-t py-1.5">
       <dt className="text-muted">{term}</dt>
       <dd>{children}</dd>
     </div>

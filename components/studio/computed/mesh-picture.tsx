@@ -24,7 +24,7 @@ function Lines({ drawing, bent }: { drawing: MeshDrawing; bent: boolean }) {
       {bent && (
         <path d={drawing.rest} stroke="var(--ink)" strokeWidth="1" strokeDasharray="4 3" opacity="0.6" />
       )}
-      <path d={drawing.held} stroke="var(--ink)" strokeWidth="5" />
+      <path d={drawing.held} stroke="var(--marker)" strokeWidth="5" />
       <path d={drawing.pushed} stroke="var(--petrol)" strokeWidth="5" />
     </g>
   );
@@ -80,9 +80,13 @@ export function MeshPicture({ solution, plane, allowable, bent }: MeshPicturePro
         )}
       </svg>
       <figcaption className="grid gap-2 text-sm">
-        {bent && <StrainLegend scaleEnd={end} allowable={allowable} peak={strain} by="finite elements" />}
+        {bent && (
+          <div className="w-fit">
+            <StrainLegend scaleEnd={end} allowable={allowable} peak={strain} by="finite elements" />
+          </div>
+        )}
         <ul className="flex flex-wrap gap-x-5 gap-y-1 text-muted">
-          <Key className="bg-ink">held</Key>
+          <Key className="bg-marker">held</Key>
           <Key className="bg-petrol">pushed</Key>
           {plane.model.mirrored && <li>Half of it; the other half is its mirror image.</li>}
         </ul>

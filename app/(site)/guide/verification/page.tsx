@@ -39,8 +39,8 @@ const Points = ({ points }: { points: readonly string[] }) => (
 function Figure({ value, words }: { value: string; words: string }) {
   return (
     <div className="min-w-40">
-      <dd className="font-bold font-heading text-5xl tracking-tight">{value}</dd>
       <dt className="mt-1 max-w-48 text-muted text-sm">{words}</dt>
+      <dd className="font-bold font-heading text-5xl tracking-tight">{value}</dd>
     </div>
   );
 }
@@ -81,7 +81,7 @@ export default function VerificationPage() {
         script from real runs of the same solver, with the same mesh.
       </p>
       <Summary />
-      <div className="grid gap-14">
+      <div className="grid grid-cols-[minmax(0,1fr)] gap-14">
         <section aria-labelledby="differences">
           <Heading id="differences">Against the references</Heading>
           <p className="mb-5 max-w-[68ch]">
