@@ -67,6 +67,13 @@ describe('what the verdict stands on', () => {
     expect(shapeOf(standing)).toBeNull();
   });
 
+  it('is the finite elements for a part whose picture keeps its own motion', () => {
+    const bending = { ...HOOK.bending, motion: 'family' } as Bending;
+    const standing = standingOf(FORMULA, bending, FINAL);
+    expect(standing.basis.kind).toBe('computed');
+    expect(shapeOf(standing)).toBeNull();
+  });
+
   it.each([
     [
       'nothing could be solved',
