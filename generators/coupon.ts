@@ -3,7 +3,7 @@ import { moved } from '@/lib/geometry/outline';
 import { translation } from '@/lib/geometry/placement';
 import type { Source } from '@/lib/materials/types';
 import { choice, length } from './parameters';
-import { type Figure, judgedFigure } from './report';
+import { type Figure, judgedFigure, type Verdict } from './report';
 
 /** How the steps of a coupon are marked. */
 export interface Marking {
@@ -110,3 +110,24 @@ export const markFigure = ({ marks, markHeight }: Marking): Figure[] =>
 /** Steps of a ladder: the first, then one step more each. */
 export const ladder = (first: number, step: number, count: number): number[] =>
   Array.from({ length: count }, (_, at) => Number((first + at * step).toFixed(6)));
+
+/** A gap in hundredths of a millimetre, two figures at least. */
+export const gapMark = (gap: number): string => String(Math.round(100 * gap)).padStart(2, '0');
+
+/** Where an expected gap lies among the gaps of a ladder, mm. */
+export function placeInLadder(gaps: readonly number[], gap: number): { verdict: Verdict; because: string } {
+  const [first, last] = [gaps[0]!, gaps.at(-1)!];
+  if (gap < first - 1e-9) {
+    return { verdict: 'over-limit', because: 'Tighter than the first step: begin with a smaller one.' };
+  }
+  if (gap > last + 1e-9) {
+    return { verdict: 'over-limit', because: 'Wider than the last step: add steps, or make them larger.' };
+  }
+  const nearest = gaps.reduce((a, b) => (Math.abs(b - gap) < Math.abs(a - gap) ? b : a));
+  return nearest === first || nearest === last
+    ? {
+        verdict: 'close-to-limit',
+        because: `At the end of the ladder, marked ${gapMark(nearest)}: what lies past it is not tried.`,
+      }
+    : { verdict: 'within-limit', because: `Nearest to the step marked ${gapMark(nearest)}.` };
+}

@@ -16,6 +16,7 @@ import { about as screwCap } from './screw-cap/about';
 import { about as screwPot } from './screw-pot/about';
 import { about as sideBuckle } from './side-buckle/about';
 import { about as softMount } from './soft-mount/about';
+import { about as threadLadder } from './thread-ladder/about';
 import { about as torsionLatch } from './torsion-latch/about';
 import { about as webLadder } from './web-ladder/about';
 
@@ -112,6 +113,11 @@ export const FAMILIES: readonly FamilyEntry[] = [
     about: armLadder,
     load: () => import('./arm-ladder').then((m) => m.default),
     loadGuide: () => import('./arm-ladder/guide').then((m) => m.default),
+  },
+  {
+    about: threadLadder,
+    load: () => import('./thread-ladder').then((m) => m.default),
+    loadGuide: () => import('./thread-ladder/guide').then((m) => m.default),
   },
   {
     about: webLadder,

@@ -2,29 +2,10 @@ import { allowableStrain } from '@/lib/materials/allowable';
 import type { Material, Use } from '@/lib/materials/types';
 import { clearanceFor, type Fit } from '@/lib/printing/clearance';
 import { formatQuantity } from '@/lib/units';
-import { markFigure } from '../coupon';
-import { type Figure, judgedFigure, plainFigure, type Report, report, type Verdict } from '../report';
-import { gapsOf, markOf, type Values, widestGap } from './schema';
+import { markFigure, placeInLadder } from '../coupon';
+import { type Figure, judgedFigure, plainFigure, type Report, report } from '../report';
+import { gapsOf, type Values, widestGap } from './schema';
 import * as source from './sources';
-
-/** Where a gap lies in the ladder. */
-function placeOf(p: Values, gap: number): { verdict: Verdict; because: string } {
-  const gaps = gapsOf(p);
-  if (gap < gaps[0]!) {
-    return { verdict: 'over-limit', because: 'Tighter than the first hole: begin with a smaller gap.' };
-  }
-  if (gap > gaps.at(-1)!) {
-    return { verdict: 'over-limit', because: 'Wider than the last hole: add holes or a larger step.' };
-  }
-  const nearest = gaps.reduce((a, b) => (Math.abs(b - gap) < Math.abs(a - gap) ? b : a));
-  const edge = nearest === gaps[0] || nearest === gaps.at(-1);
-  return edge
-    ? {
-        verdict: 'close-to-limit',
-        because: `At the end of the ladder, marked ${markOf(nearest)}: what lies past it is not tried.`,
-      }
-    : { verdict: 'within-limit', because: `Nearest to the hole marked ${markOf(nearest)}.` };
-}
 
 function fitFigure(p: Values, material: Material, fit: Exclude<Fit, 'press'>): Figure {
   const expected = clearanceFor(material, fit);
@@ -35,7 +16,7 @@ function fitFigure(p: Values, material: Material, fit: Exclude<Fit, 'press'>): F
       ? judgedFigure({ ...common, because, source: source.NO_TABLE })
       : plainFigure({ ...common, because, source: source.NO_TABLE });
   }
-  const place = placeOf(p, expected.value);
+  const place = placeInLadder(gapsOf(p), expected.value);
   const given = { ...common, value: expected.value, because: place.because, source: expected.source };
   return fit === 'slip'
     ? judgedFigure({ ...given, limit: widestGap(p), verdict: place.verdict })

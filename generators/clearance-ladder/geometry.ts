@@ -1,8 +1,8 @@
 import type { Kernel, Loop, NamedSolid, Profile, Solid, Vec2 } from '@/lib/geometry/kernel';
 import { arcPoints, boreRadius, inscribedArea } from '@/lib/geometry/outline';
 import { translation } from '@/lib/geometry/placement';
-import { withMarks } from '../coupon';
-import { columnAt, gapsOf, markOf, plateLength, rowsOf, tongueThickness, type Values } from './schema';
+import { gapMark, withMarks } from '../coupon';
+import { columnAt, gapsOf, plateLength, rowsOf, tongueThickness, type Values } from './schema';
 
 /** Free length at the floor, so that the grip and not the tip comes to rest, mm. */
 const SHORT = 0.5;
@@ -34,7 +34,7 @@ function plateProfile(p: Values, segments: number): Profile {
 
 function plate(p: Values, kernel: Kernel): Solid {
   const solid = kernel.extrude(plateProfile(p, kernel.quality.segmentsPerTurn), p.depth);
-  const marks = gapsOf(p).map((gap, at) => ({ text: markOf(gap), at: [columnAt(p, at), 0] as const }));
+  const marks = gapsOf(p).map((gap, at) => ({ text: gapMark(gap), at: [columnAt(p, at), 0] as const }));
   return withMarks(kernel, solid, p.depth, marks, p);
 }
 

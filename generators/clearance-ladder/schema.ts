@@ -1,4 +1,4 @@
-import { LEAST_UNDER_MARK, ladder, markFields, markRoom, markWidth } from '../coupon';
+import { gapMark, LEAST_UNDER_MARK, ladder, markFields, markRoom, markWidth } from '../coupon';
 import { count, defineParameters, length, type ValuesOf } from '../parameters';
 
 const fields = {
@@ -73,9 +73,6 @@ export type Values = ValuesOf<typeof fields>;
 export const gapsOf = (p: Values): number[] => ladder(p.firstGap, p.gapStep, p.holes);
 export const widestGap = (p: Values): number => gapsOf(p).at(-1)!;
 
-/** Hundredths of a millimetre, two figures at least. */
-export const markOf = (gap: number): string => String(Math.round(100 * gap)).padStart(2, '0');
-
 export const tongueThickness = (p: Values): number => p.pinDiameter / 2;
 /** From hole to hole along the row, mm. */
 export const pitchOf = (p: Values): number => p.pinDiameter + 2 * widestGap(p) + p.wall;
@@ -105,9 +102,9 @@ export const parameters = defineParameters({
       id: 'figures-fit',
       field: 'markHeight',
       severity: 'refuse',
-      holds: (p) => markWidth(markOf(widestGap(p)), p) <= pitchOf(p) + 1e-9,
+      holds: (p) => markWidth(gapMark(widestGap(p)), p) <= pitchOf(p) + 1e-9,
       message: (p) =>
-        `Height of the figures must be at most ${((p.markHeight * pitchOf(p)) / markWidth(markOf(widestGap(p)), p)).toFixed(1)} mm, or they run into each other`,
+        `Height of the figures must be at most ${((p.markHeight * pitchOf(p)) / markWidth(gapMark(widestGap(p)), p)).toFixed(1)} mm, or they run into each other`,
     },
     {
       id: 'under-figures',
