@@ -11,8 +11,8 @@ export const FIGURES: readonly Passage[] = [
     text: 'How far the plastic is stretched or squeezed at its worst place, in percent of its length. A part breaks by strain long before it breaks by force, so strain is what the limit stands on.',
   },
   {
-    head: 'Handbook and corrected',
-    text: 'The handbook figure is the plain formula as the design guides print it. The corrected one adds what that formula leaves out: a root that turns, fillets, shear, large deflection. Both are shown, the verdict stands on the corrected one. They differ by 20 to 60 % where parts are short or thick.',
+    head: 'Handbook, corrected, computed',
+    text: 'The handbook figure is the plain formula as the design guides print it. The corrected one adds what that formula leaves out: a root that turns, fillets, shear, large deflection. The two differ by 20 to 60 % where parts are short or thick. Where a part bends as a flat outline, a third figure is computed by finite elements a moment later and carries the verdict; elsewhere the corrected one does. The page marks which.',
   },
   {
     head: 'Allowed strain',
