@@ -22,7 +22,7 @@ const CAUTIONS: readonly { head: string; text: string }[] = [
 
 export function SiteFooter() {
   return (
-    <footer className="mt-auto border-hair border-t bg-paper">
+    <footer className="mt-auto break-inside-avoid border-hair border-t bg-paper">
       <div className="frame grid gap-x-10 gap-y-6 py-8 text-sm lg:grid-cols-[13rem_1fr]">
         <div className="flex items-start gap-3 text-muted">
           <LogoMark size={24} />
@@ -34,7 +34,7 @@ export function SiteFooter() {
             </p>
             <Link
               href="/about"
-              className="inline-flex min-h-9 items-center underline underline-offset-4 hover:text-ink pointer-coarse:min-h-11"
+              className="inline-flex min-h-9 items-center underline underline-offset-4 hover:text-ink pointer-coarse:min-h-11 print:hidden"
             >
               What the figures mean
             </Link>

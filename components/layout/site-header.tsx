@@ -7,7 +7,7 @@ import { ThemeSwitch } from './theme-switch';
 /** The head of every page. `account` is what stands at its right end. */
 export function SiteHeader({ account }: { account?: ReactNode }) {
   return (
-    <header className="border-hair border-b bg-paper">
+    <header className="border-hair border-b bg-paper print:hidden">
       <div className="frame flex flex-wrap items-center gap-x-6 py-2">
         <Link
           href="/"

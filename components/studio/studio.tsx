@@ -19,6 +19,7 @@ import { Faults, LinkNotes, Restored } from './head/notices';
 import { StartingPoints } from './head/starting-points';
 import { loadFamily } from './load-family';
 import { Plastics } from './plastics';
+import { PrintSheet } from './print-sheet';
 import { createSession, presetTyped, type Session } from './session';
 import { SessionProvider } from './session-context';
 import { DimensionSheet } from './sheet/dimension-sheet';
@@ -67,7 +68,8 @@ function Bench({ session, query, keep, local = true, title }: Given & { session:
   useKeeping(session, local);
   useUndoKeys(session);
   return (
-    <main className="frame grid grid-cols-[minmax(0,1fr)] gap-4 pt-5 pb-14">
+    <main className="frame grid grid-cols-[minmax(0,1fr)] gap-4 pt-5 pb-14 print:block print:p-0 print:[&>:not([data-print])]:hidden">
+      <PrintSheet title={title} />
       <div className="flex flex-wrap items-end justify-between gap-x-6 gap-y-3">
         <div className="flex flex-wrap items-baseline gap-x-6">
           <h1 className="font-bold text-4xl tracking-tight sm:text-5xl">{title ?? family.about.name}</h1>

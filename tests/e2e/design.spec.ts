@@ -183,6 +183,18 @@ test('keeps the verdict in sight while the sheet is scrolled on a phone', async 
   await phone.close();
 });
 
+test('prints one clean sheet: nothing to press, no bar twice', async ({ page }) => {
+  await openHook(page);
+  await page.emulateMedia({ media: 'print', colorScheme: 'dark' });
+  await expect(page.locator('[data-print]')).toBeVisible();
+  await expect(page.getByText(/\/design\/cantilever-hook\?material=/)).toBeVisible();
+  for (const control of await page.locator('button, select, input, [data-strip], nav').all()) {
+    await expect(control).toBeHidden();
+  }
+  const ink = await page.locator('body').evaluate((body) => getComputedStyle(body).color);
+  expect(ink).toBe('rgb(0, 0, 0)');
+});
+
 test('answers a part there is none of with a page that says so', async ({ page }) => {
   const answer = await page.goto('/design/no-such-part');
   expect(answer!.status()).toBe(404);
