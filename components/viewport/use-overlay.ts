@@ -70,5 +70,5 @@ export function useOverlay(
     },
     [callouts, highlightField, pinned, staging, askedAt, stage],
   );
-  return { overlay, onFrame };
+  return { overlay, drawn: overlay !== EMPTY, onFrame };
 }

@@ -20,6 +20,7 @@ import { useCut } from './use-cut';
 import { type Drawing, REMARKS, useDrawing } from './use-drawing';
 import { useInsets } from './use-insets';
 import { useOverlay } from './use-overlay';
+import { Waiting } from './waiting';
 
 const INSTRUCTIONS = '3-D view. Arrow keys turn, plus and minus zoom, F fits, 1 to 7 give standard views.';
 
@@ -89,7 +90,7 @@ export default function Viewport(props: ViewportProps) {
   const styles = useMemo(() => stylesOf(facts, chosen, onBed || cut), [facts, chosen, onBed, cut]);
   const section = flat ? null : knife.section;
   const staging = useMemo(() => ({ styles, section }), [styles, section]);
-  const { overlay, onFrame } = useOverlay(built, shown, props, stage, staging);
+  const { overlay, drawn, onFrame } = useOverlay(built, shown, props, stage, staging);
   const end = scaleEnd(built.build?.motion?.peakStrain ?? 0, strainScale);
   const choose = useCallback((name: string, style: BodyStyle) => {
     setChosen((now) => ({ ...now, [name]: style }));
@@ -111,6 +112,12 @@ export default function Viewport(props: ViewportProps) {
         className="absolute inset-0 focus-visible:outline-offset-[-3px]"
         onKeyDown={(event) => viewKey(event, commands)}
       >
+        {!drawn && state.status !== 'failed' && (
+          <Waiting
+            family={family}
+            words={state.status === 'loading' ? 'Making the shape…' : 'Drawing the part…'}
+          />
+        )}
         {palette && shown && drawing !== 'unknown' && (
           <Picture
             {...shown}

@@ -55,6 +55,15 @@ test('draws the part, not a blank canvas', async ({ page }) => {
   expect(await contrast(canvas)).toBeGreaterThan(8);
 });
 
+test('says at once that the picture is being made, and no more once it is drawn', async ({
+  page,
+  request,
+}) => {
+  expect(await (await request.get(HOOK)).text()).toContain('Setting up the view…');
+  await open(page);
+  await expect(page.locator('[data-waiting]')).toHaveCount(0);
+});
+
 test('draws nothing while nothing changes', async ({ page }) => {
   const stage = await open(page);
   const before = await frames(stage);

@@ -5,6 +5,7 @@ import { useMemo, useState } from 'react';
 import { useStore } from 'zustand';
 import { Sheet } from '@/components/ui/sheet';
 import type { ViewportState } from '@/components/viewport/types';
+import { Waiting } from '@/components/viewport/waiting';
 import type { Motion } from '@/generators/contract';
 import type { Report } from '@/generators/report';
 import { figureOf } from '@/generators/sensitivity';
@@ -16,9 +17,13 @@ import { InWords } from './in-words';
 import { ViewBar } from './view-bar';
 import { FIRST_VIEW } from './view-state';
 
+function SettingUp() {
+  return <Waiting family={useSession().family.about.id} words="Setting up the view…" />;
+}
+
 const Viewport = dynamic(() => import('@/components/viewport/viewport'), {
   ssr: false,
-  loading: () => <p className="grid h-full place-items-center text-muted">Setting up the view</p>,
+  loading: SettingUp,
 });
 
 /** The limit the picture's scale is marked with: that of the verdict where it is about strain. */
@@ -72,7 +77,7 @@ export function ViewPanel({
       <h2 id="picture" className="sr-only">
         The part
       </h2>
-      <div className="h-[20rem] sm:h-[27rem] lg:h-[clamp(20rem,100dvh-25rem,36rem)]">
+      <div className="relative h-[20rem] sm:h-[27rem] lg:h-[clamp(20rem,100dvh-25rem,36rem)]">
         <Viewport
           family={session.family.about.id}
           values={design.values}

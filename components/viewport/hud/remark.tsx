@@ -6,8 +6,7 @@ interface RemarkProps {
   readonly layerStep: number | null;
 }
 
-function wordsOf({ status, message }: ViewportState, layerStep: number | null): string | null {
-  if (status === 'loading') return 'Making the shape…';
+function wordsOf({ message }: ViewportState, layerStep: number | null): string | null {
   if (message) return message;
   return layerStep === null
     ? null
