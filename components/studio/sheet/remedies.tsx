@@ -10,7 +10,7 @@ import type { Figure } from '@/generators/report';
 import { figureOf, numbersOf } from '@/generators/sensitivity';
 import { entryText } from '@/generators/url-state';
 import { formatQuantity, UNIT_SYMBOL } from '@/lib/units';
-import { useCalibrated, useStandingReport } from '../computed/standing-context';
+import { useCalibrated, useStanding } from '../computed/standing-context';
 import { useSession } from '../session-context';
 import { useIdleMap } from '../use-idle-map';
 
@@ -101,7 +101,8 @@ function RemedyList({ list, over }: { list: readonly Remedy[]; over: boolean }) 
 
 /** Dimensions that would just meet the limit, each alone, to apply with one press. */
 export function Remedies() {
-  const report = useStandingReport();
+  const { report, basis } = useStanding();
+  const computed = basis.kind !== 'formula';
   const verdict = figureOf(report, report.governing)?.verdict;
   const over = verdict === 'over-limit';
   const found = useRemedies(over);
@@ -114,6 +115,7 @@ export function Remedies() {
         </h2>
         <span className="text-muted text-xs">
           {over ? 'each alone would just meet the limit' : 'each alone, as far as the limits allow'}
+          {computed && ', by the formula drawn to the computed figure'}
         </span>
       </div>
       <div
