@@ -54,7 +54,11 @@ function solve(job: number, request: SolveRequest): void {
 }
 
 self.addEventListener('message', (event: MessageEvent<ToSolver>) => {
-  if (event.data.kind === 'warm-up') return warmUp(WARM_UPS);
-  asked = true;
-  solve(event.data.job, event.data.request);
+  if (event.data.kind === 'solve') {
+    asked = true;
+    solve(event.data.job, event.data.request);
+  } else {
+    // a part that was sent while the worker loaded comes first
+    setTimeout(() => warmUp(WARM_UPS));
+  }
 });
