@@ -82,7 +82,7 @@ function handFigure({ p, mechanics }: ScrewContext): Figure {
   }
   const { low, high, tabled } = closing.hand;
   const because = tabled
-    ? `What hands put on a closure of ${p.majorDiameter} mm, interpolated from the table.`
+    ? `What hands put on a closure of ${formatQuantity(p.majorDiameter, 'mm')}, interpolated from the table.`
     : `Under the table's 18 mm: taken in proportion to the diameter.`;
   const from = tabled ? source.HAND : source.HAND_SMALL;
   return plainFigure({ ...common, value: (low + high) / 2, low, high, because, source: from });

@@ -1,7 +1,8 @@
+import { FADE } from '@/lib/geometry/thread';
 import type { Material, Use } from '@/lib/materials/types';
 import { SEAT_PRESSURE } from '@/lib/mechanics/screw-closure';
 import { jointOf } from '@/lib/mechanics/screw-sizes';
-import { turnsToFree } from '@/lib/mechanics/thread-joint';
+import { formatQuantity } from '@/lib/units';
 import { type Figure, plainFigure, type Report, report } from '../report';
 import type { Seat } from '../screw-context';
 import { screwCurves } from '../screw-curves';
@@ -46,8 +47,8 @@ function potFigures(p: Values): Figure[] {
       id: 'turns-to-open',
       label: 'Turns until the lid comes off',
       unit: 'turns',
-      value: turnsToFree(joint),
-      because: `With a lead of ${joint.thread.lead} mm; two starts take half the turns of one.`,
+      value: joint.engagedTurns + FADE,
+      because: `Until its ridges have left those of the pot, fading ends counted; it climbs ${formatQuantity(joint.thread.lead, 'mm')} a turn.`,
     }),
     figure({
       id: 'overall-height',

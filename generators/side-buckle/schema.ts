@@ -122,7 +122,7 @@ const fields = {
     min: 0.1,
     max: 3,
     step: 0.1,
-    default: 0.5,
+    default: 0.4,
     group: 'barb',
     help: 'How far the arms can be squeezed past clearing the edge before the rail in the housing stops them.',
   }),
