@@ -78,6 +78,7 @@ export function foldPose({ web, middle, peak, sign }: TurningWeb): FoldPose {
     const inside = Math.max(0, Math.min(1, s / web.length));
     if (inside !== s / web.length) return 0;
     const local = thicknessAt(web, Math.min(s, web.length - s));
+    if (Math.abs(height - middle) > local) return 0;
     const share = sample(bend.curvature, inside * (STATIONS - 1)) / highest;
     const lever = Math.max(-1, Math.min(1, (2 * (height - middle)) / local));
     return -sign * peak * share * (local / web.thickness) * lever;

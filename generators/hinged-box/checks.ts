@@ -5,7 +5,15 @@ import { selfLockingAngle } from '@/lib/mechanics/friction';
 import { webStrain } from '@/lib/mechanics/web';
 import { clearanceFor } from '@/lib/printing/clearance';
 import { formatQuantity, radians } from '@/lib/units';
-import { type Curve, type Figure, judgedFigure, plainFigure, type Report, report } from '../report';
+import {
+  type Curve,
+  type Figure,
+  judgedFigure,
+  plainFigure,
+  type Report,
+  report,
+  worstVerdict,
+} from '../report';
 import {
   type WebSubject,
   webBridge,
@@ -171,7 +179,6 @@ function fitFigures({ p, material, web }: Context): Figure[] {
       label: 'Clearance a side',
       unit: 'mm',
       value: wanted ? p.clearance : null,
-      handbook: wanted?.value ?? null,
       limit: wanted?.value ?? null,
       limitKind: 'min',
       because: wanted
@@ -229,11 +236,11 @@ function curves({ p, snap, material }: Context): Curve[] {
   return [folding, bending];
 }
 
-/** Value over limit; what is not known counts as more than any known share. */
-const used = ({ value, limit }: Figure): number =>
-  value === null || limit === null ? Number.POSITIVE_INFINITY : value / limit;
+/** True where the verdict of a figure is worse than that of another. */
+const worse = (one: Figure, other: Figure): boolean =>
+  one.verdict !== other.verdict && worstVerdict([one, other]) === one.verdict;
 
-/** Report of a box opened and shut. Web or catch governs, whichever uses more of its limit. */
+/** Report of a box opened and shut. The web governs, unless the verdict of the catch is worse. */
 export function check(p: Values, material: Material, use: Use): Report {
   const allowable = allowableStrain(material, use);
   const { layerHeight } = p;
@@ -251,7 +258,7 @@ export function check(p: Values, material: Material, use: Use): Report {
   const strains = webStrainFigures(web);
   const judged = strains.find(({ id }) => id === webGoverning(web))!;
   return report({
-    governing: used(snap) > used(judged) ? snap.id : judged.id,
+    governing: worse(snap, judged) ? snap.id : judged.id,
     headline: ['mating-force', 'separation-force', 'volume'],
     figures: [
       ...strains,

@@ -25,7 +25,6 @@ function gapFigure(p: Values, material: Material): Figure {
     label: 'Gap a side',
     unit: 'mm',
     value: wanted ? p.gap : null,
-    handbook: wanted?.value ?? null,
     limit: wanted?.value ?? null,
     limitKind: 'min',
     because: wanted
