@@ -1,13 +1,12 @@
-import { env, publicUrl } from '@/lib/env';
+import { env } from '@/lib/env';
 
 type Head = Pick<Headers, 'get'>;
 
-/** Where this site is reached: as configured, else at whatever host was asked for. */
-const ownHost = (head: Head): string =>
-  env().PUBLIC_URL ? new URL(publicUrl()).host : (head.get('host') ?? '');
-
-function hostOf(origin: string): string | null {
-  return URL.canParse(origin) ? new URL(origin).host : null;
+/** Whether an origin is this site's: the configured one, or without one whatever host was asked for. */
+function isOwn(origin: string, head: Head): boolean {
+  const { PUBLIC_URL } = env();
+  if (PUBLIC_URL !== undefined) return origin === PUBLIC_URL;
+  return URL.canParse(origin) && new URL(origin).host === head.get('host');
 }
 
 /**
@@ -19,5 +18,5 @@ export function fromOwnPage(head: Head): boolean {
   const origin = head.get('origin');
   if (site === null && origin === null) return head.get('cookie') === null;
   if (site !== null && site !== 'same-origin' && site !== 'none') return false;
-  return origin === null || hostOf(origin) === ownHost(head);
+  return origin === null || isOwn(origin, head);
 }

@@ -5,22 +5,18 @@ import { deliverDue } from './deliver';
 import { smtpSender } from './transport';
 
 const EVERY = 3000;
-const STARTED = Symbol.for('bendwell.mail-worker');
 
 /**
- * Starts the sending of mail in this process, once. Without a mail server mail waits in the outbox. A fault is reported
- * and the worker goes on.
+ * Starts the sending of mail in this process. Without a mail server mail waits in the outbox. A fault is reported and the
+ * worker goes on.
  */
-export function startMailWorker(report: (error: unknown) => void): boolean {
+export function startMailWorker(report: (error: unknown) => void): void {
   const { SMTP_URL } = env();
-  const here = globalThis as { [STARTED]?: boolean };
-  if (SMTP_URL === undefined || here[STARTED]) return false;
-  here[STARTED] = true;
+  if (SMTP_URL === undefined) return;
   const sender = smtpSender(SMTP_URL);
   const turn = async () => {
     await deliverDue(database(), sender).catch(report);
     setTimeout(turn, EVERY).unref();
   };
   void turn();
-  return true;
 }

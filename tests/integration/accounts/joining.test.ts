@@ -1,12 +1,15 @@
 import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { acceptInvitationAction } from '@/app/(account)/accept-invite/actions';
 import { signInAction } from '@/app/(account)/sign-in/actions';
+import { confirmAddressAction } from '@/app/(account)/verify-email/actions';
 import { inviteAction, withdrawAction } from '@/app/(club)/admin/invitations/actions';
+import { addInvitation } from '@/db/queries/invitations';
 import { rateLimits } from '@/db/schema/limits';
 import { outbox } from '@/db/schema/mail';
-import { invitations, users } from '@/db/schema/members';
+import { invitations, type Role, users } from '@/db/schema/members';
 import { readAudit } from '@/lib/access/audit';
 import { listInvitations } from '@/lib/access/invitations';
+import { digest, newSecret } from '@/lib/auth/secret';
 import { currentViewer } from '@/lib/auth/session';
 import { Browser } from '../../support/browser';
 import { demoClub, signedIn, tokenTo } from '../../support/demo-club';
@@ -143,5 +146,20 @@ describe('an invitation', () => {
     await accept(token);
     const answer = await new Browser().submit(signInAction, { email, password: PASSWORD });
     expect(answer.goesTo).toBe('/account');
+  });
+
+  it('printed instead of mailed proves no address: the first admin still has to confirm theirs', async () => {
+    const email = newAddress();
+    const token = newSecret();
+    const createdAt = new Date();
+    const expiresAt = new Date(createdAt.getTime() + DAY);
+    const roles: Role[] = ['member', 'admin'];
+    addInvitation(db, { tokenHash: digest(token), email, roles, invitedBy: null, createdAt, expiresAt });
+    const browser = new Browser();
+    await accept(token, browser);
+    const before = await browser.within(() => currentViewer());
+    expect(before).toMatchObject({ emailVerified: false, roles: ['admin', 'member'] });
+    await browser.submit(confirmAddressAction, { token: tokenTo(db, email) });
+    expect(await browser.within(() => currentViewer())).toMatchObject({ emailVerified: true });
   });
 });
