@@ -1,7 +1,7 @@
 const BROWSERS = [
   [/Edg\//, 'Edge'],
   [/Firefox\//, 'Firefox'],
-  [/(Chrome|CriOS)\//, 'Chrome or a kin of it'],
+  [/(Chrome|CriOS)\//, 'Chromium'],
   [/Safari\//, 'Safari'],
 ] as const;
 

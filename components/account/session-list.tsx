@@ -20,10 +20,13 @@ function SessionRow({ session, here, end }: { session: OwnSession; here: boolean
         </p>
       </div>
       {!here && (
-        <ActionForm action={end} label={`End ${device}`}>
+        <ActionForm action={end}>
           <input type="hidden" name="id" value={session.id} />
           <SubmitButton look="line" small>
             End it
+            <span className="sr-only">
+              : {device}, since <Moment at={session.since} />
+            </span>
           </SubmitButton>
         </ActionForm>
       )}

@@ -27,10 +27,11 @@ function State({ mail, sendAgain }: { mail: MailSummary; sendAgain: FormAction }
       )}
       {mail.lastError && <span className="break-words text-muted text-sm">{mail.lastError}</span>}
       {mail.state === 'given-up' && (
-        <ActionForm action={sendAgain} label={`Send to ${mail.recipient} again`}>
+        <ActionForm action={sendAgain}>
           <input type="hidden" name="id" value={mail.id} />
           <SubmitButton look="line" small>
             Send again
+            <span className="sr-only"> to {mail.recipient}</span>
           </SubmitButton>
         </ActionForm>
       )}

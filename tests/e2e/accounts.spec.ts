@@ -60,7 +60,9 @@ test('invites, accepts, suspends: from the mail to the closed door', async ({ br
   await admin.getByRole('link', { name: 'Invitations' }).click();
   await admin.getByLabel('E-mail address').fill(email);
   await admin.getByRole('button', { name: 'Send the invitation' }).click();
-  await expect(main(admin).getByText(`An invitation to ${email} is on its way.`)).toBeFocused();
+  const notice = main(admin).locator('[data-notice]');
+  await expect(notice).toHaveText(`An invitation to ${email} is on its way.`);
+  await expect(notice).toBeFocused();
 
   await admin.getByRole('link', { name: 'Outgoing mail' }).click();
   const mailBox = await admin.getByRole('link', { name: 'Read what was sent' }).getAttribute('href');
