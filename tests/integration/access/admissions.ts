@@ -1,5 +1,8 @@
+import { database } from '@/db/client';
+import { insertPreset, insertVersion } from '@/db/queries/presets';
 import { createDesign, deleteDesign } from '@/lib/access/designs';
 import type { Member } from '@/lib/access/policy';
+import { decide } from '@/lib/access/review';
 
 /** Who gets in: anyone; whoever has the role; or the member a thing belongs to, and nobody else. */
 export type Admission = 'anyone' | 'member' | 'librarian' | 'admin' | 'owner';
@@ -21,6 +24,56 @@ async function deletedDesign(owner: Member) {
   return { id };
 }
 const designState = async (owner: Member) => ({ ...(await design(owner)), state: '1' });
+/** A version as handed in, without the drawing and measuring of the part. */
+async function handedIn(owner: Member) {
+  const { family, material, use, parameters, verdict } = await createDesign(owner, { ...LID, name: 'Lid' });
+  const at = new Date();
+  const slug = `lid-${crypto.randomUUID()}`;
+  const author = { authorId: owner.id, authorName: owner.name };
+  const preset = insertPreset(database(), { slug, ...author, createdAt: at, changedAt: at });
+  const words = {
+    title: 'Lid',
+    purpose: 'A box',
+    printingNotes: '',
+    tags: [],
+    licence: 'CC-BY-4.0',
+  } as const;
+  const figures = { kind: 'hinges', strainShare: null, sizeX: 40, sizeY: 30, sizeZ: 2, mass: null } as const;
+  const version = insertVersion(database(), {
+    presetId: preset.id,
+    ...words,
+    tags: [],
+    ...{ family, material, use, verdict },
+    values: { ...parameters },
+    ...figures,
+    enclosure: null,
+    startedFrom: null,
+    handedInAt: at,
+  });
+  return { slug, versionId: version.id };
+}
+
+let waiting: ReturnType<typeof handedIn> | undefined;
+let published: ReturnType<typeof handedIn> | undefined;
+
+/** A version that waits for a librarian, the same for every call. */
+async function waitingVersion(owner: Member) {
+  waiting ??= handedIn(owner);
+  return { id: (await waiting).versionId };
+}
+
+async function publish(owner: Member) {
+  const version = await handedIn(owner);
+  decide({ ...owner, id: 'demo-tomas', roles: ['librarian', 'member'] }, version.versionId, 'publish', '');
+  return version;
+}
+
+/** A preset of the library, the same for every call. */
+async function publishedPreset(owner: Member) {
+  published ??= publish(owner);
+  return { slug: (await published).slug };
+}
+
 const given = (params: Readonly<Record<string, string>>) => async () => params;
 
 const anyone: Entry = { admission: 'anyone' };
@@ -45,14 +98,21 @@ export const PAGES: Readonly<Record<string, Entry>> = {
   '(club)/admin/members/[id]': { admission: 'admin', params: given({ id: 'demo-ines' }) },
   '(club)/materials': anyone,
   '(club)/materials/[id]': { admission: 'anyone', params: given({ id: 'pla' }) },
+  '(library)/library': anyone,
+  '(library)/library/[slug]': { admission: 'anyone', params: publishedPreset },
+  '(library)/review': { admission: 'librarian' },
+  '(library)/review/[id]': { admission: 'librarian', params: waitingVersion },
   '(site)': anyone,
   '(site)/about': anyone,
   '(site)/guide': anyone,
+  '(site)/guide/verification': anyone,
   '(site)/guide/[family]': { admission: 'anyone', params: hook },
   '(studio)/design': anyone,
   '(studio)/design/[family]': { admission: 'anyone', params: hook },
   '(studio)/designs': member,
   '(studio)/designs/[id]': ownDesign,
+  '(studio)/designs/[id]/history': ownDesign,
+  '(studio)/designs/[id]/publish': ownDesign,
 };
 
 export const HANDLERS: Readonly<Record<string, Entry>> = {
@@ -128,6 +188,26 @@ export const ACTIONS: Readonly<Record<string, Entry>> = {
   },
   '(club)/admin/invitations#withdrawAction': { admission: 'admin', fields: { id: 'none' } },
   '(club)/admin/mail#sendAgainAction': { admission: 'admin', fields: { id: 'none' } },
+  '(library)/library/[slug]#reportAction': {
+    admission: 'member',
+    fields: { slug: 'none', version: '1', worked: 'yes', material: 'pla', printer: 'The bench', note: '' },
+  },
+  '(library)/library/[slug]#startAction': { admission: 'member', fields: { slug: 'none', version: '1' } },
+  '(library)/review#againAction': { admission: 'librarian', fields: { id: 'none' } },
+  '(library)/review#publishAction': { admission: 'librarian', fields: { id: 'none', note: '' } },
+  '(library)/review#sendBackAction': { admission: 'librarian', fields: { id: 'none', note: 'Why' } },
+  '(library)/review#retireAction': { admission: 'librarian', fields: { slug: 'none', note: 'Why' } },
+  '(studio)/designs/[id]/publish#handInAction': {
+    admission: 'member',
+    fields: {
+      designId: 'none',
+      title: 'Lid',
+      purpose: 'A box',
+      printingNotes: '',
+      tags: '',
+      licence: 'CC-BY-4.0',
+    },
+  },
   '(club)/admin/members/[id]#giveRolesAction': { admission: 'admin', fields: { id: 'none', roles: [] } },
   '(club)/admin/members/[id]#suspendAction': { admission: 'admin', fields: { id: 'none', reason: 'Why' } },
   '(club)/admin/members/[id]#restoreAction': { admission: 'admin', fields: { id: 'none' } },
