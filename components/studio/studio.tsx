@@ -24,6 +24,7 @@ import { createSession, presetTyped, type Session } from './session';
 import { SessionProvider } from './session-context';
 import { DimensionSheet } from './sheet/dimension-sheet';
 import { Remedies } from './sheet/remedies';
+import { UseStrip } from './sheet/use-strip';
 import { useKeeping } from './use-keeping';
 import { useUndoKeys } from './use-undo-keys';
 import { ViewPanel } from './view/view-panel';
@@ -92,7 +93,10 @@ function Bench({ session, query, keep, local = true, title }: Given & { session:
           <ViewPanel stance={stance} onStance={setStance} state={picture} onState={setPicture} />
           <Remedies />
         </div>
-        <DimensionSheet />
+        <div className="grid min-w-0 gap-4">
+          <UseStrip />
+          <DimensionSheet />
+        </div>
       </div>
       <ChecksList />
       <HowComputed />

@@ -176,6 +176,10 @@ test('keeps the verdict in sight while the sheet is scrolled on a phone', async 
   });
   const page = await phone.newPage();
   await openHook(page);
+  const top = async (selector: string) => (await page.locator(selector).boundingBox())!.y;
+  expect(await top('[data-viewport]')).toBeLessThan(await top('#field-material'));
+  const plastic = await page.locator('#field-material').boundingBox();
+  expect(plastic!.width).toBeGreaterThan(290);
   await field(page, 'Clearance').scrollIntoViewIfNeeded();
   await expect(page.locator('[data-strip]')).toBeInViewport();
   const overflow = await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth);

@@ -8,7 +8,6 @@ import { BasisLine } from '../computed/basis-line';
 import { formulaBeside, type Standing } from '../computed/standing';
 import { useSolving } from '../computed/standing-context';
 import { useReading } from '../session-context';
-import { UseStrip } from '../sheet/use-strip';
 import { SourceNote } from '../source-note';
 import { marginWords, VerdictIcon, VerdictMark } from '../verdict';
 import { BandScale, BandStripScale } from './band-scale';
@@ -179,7 +178,6 @@ export function StrainBand({ volume = null }: { volume?: number | null }) {
             <Stuff volume={volume} />
           </dl>
         </div>
-        <UseStrip />
         <p role="status" className="sr-only">
           {spoken(figure)}
         </p>

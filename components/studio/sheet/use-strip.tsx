@@ -64,7 +64,7 @@ function LayersRow() {
 export function UseStrip() {
   const temperature = useReading((reading) => reading.design.use.temperature);
   return (
-    <fieldset className="grid grid-cols-2 gap-x-2 border-hair border-t px-3 pt-1 pb-2 sm:gap-x-4 sm:px-5 lg:grid-cols-[2fr_1fr_1fr_1.2fr] max-sm:[&>div:first-of-type]:col-span-2 max-sm:[&>div:last-of-type]:col-span-2">
+    <fieldset className="grid grid-cols-2 gap-x-2 rounded-sheet border border-hair bg-sheet px-2 pt-1 pb-2 shadow-lift sm:px-3 [&>div:first-of-type]:col-span-2 [&>div:last-of-type]:col-span-2">
       <legend className="sr-only">Plastic and use</legend>
       <MaterialRow />
       <ChoiceRow name="opening" field={USE_FIELDS.opening} layout="stack" />

@@ -4,6 +4,7 @@ import { StrainBand } from '@/components/studio/band/strain-band';
 import { StandingProvider } from '@/components/studio/computed/standing-context';
 import { createSession, presetTyped } from '@/components/studio/session';
 import { SessionProvider } from '@/components/studio/session-context';
+import { UseStrip } from '@/components/studio/sheet/use-strip';
 import type { Family, Stance } from '@/generators/contract';
 import { judgedFigure, type Report, report } from '@/generators/report';
 import { ROUND_PLASTIC, TINY } from '../generators/tiny-family';
@@ -25,6 +26,7 @@ function bandOf(
     <SessionProvider value={session}>
       <StandingProvider>
         <StrainBand volume={volume} />
+        <UseStrip />
       </StandingProvider>
     </SessionProvider>,
   );
@@ -39,6 +41,13 @@ const words = (html: string): string =>
 const peak = (given: object) => (was: Report) => ({ figures: [{ ...was.figures[0]!, ...given }] });
 
 describe('the strain band', () => {
+  it('holds figures only, so that on a phone the picture comes before the fields', () => {
+    const html = bandOf(() => ({}));
+    const band = html.slice(0, html.indexOf('</section>'));
+    expect(band).toContain('Mass, printed solid');
+    expect(band).not.toMatch(/<(select|input)\b/);
+  });
+
   it('gives strain, limit and verdict in words, with every factor of the limit', () => {
     const text = words(bandOf(() => ({})));
     // 1.5 * 1.2 * 2 / 20^2 = 0.9 % of 4 % * 0.6 = 2.4 %
