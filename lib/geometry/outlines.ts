@@ -116,7 +116,7 @@ export function createOutlines(module: ManifoldModule, quality: Quality): Outlin
       require('text', PRINTABLE.test(text) &&
         text.trim() !== '', 'only plain printable characters can be drawn');
       require('text', positive(width) && height > width, 'the letters must be higher than their stroke');
-      const segments = Math.max(8, segmentsPerTurn / 4);
+      const segments = quality.name === 'export' ? 12 : 8;
       return profileOf('text', module.region(letterStrokes(text, height, width, segments)));
     },
   };
