@@ -3,7 +3,7 @@ import type { Material, Use } from '@/lib/materials/types';
 import { clearanceFor, type Fit } from '@/lib/printing/clearance';
 import { formatQuantity } from '@/lib/units';
 import { markFigure, placeInLadder } from '../coupon';
-import { type Figure, judgedFigure, plainFigure, type Report, report } from '../report';
+import { type Curve, type Figure, judgedFigure, plainFigure, type Report, report } from '../report';
 import { gapsOf, type Values, widestGap } from './schema';
 import * as source from './sources';
 
@@ -21,6 +21,16 @@ function fitFigure(p: Values, material: Material, fit: Exclude<Fit, 'press'>): F
   return fit === 'slip'
     ? judgedFigure({ ...given, limit: widestGap(p), verdict: place.verdict })
     : plainFigure(given);
+}
+
+function gapCurve(p: Values): Curve {
+  return {
+    id: 'gap-over-hole',
+    label: 'Gap a side, hole by hole',
+    x: { label: 'Hole', unit: 'count' },
+    y: { label: 'Gap a side', unit: 'mm' },
+    points: gapsOf(p).map((gap, at) => [at + 1, gap] as const),
+  };
 }
 
 /** Report of a coupon: whether the fits sought lie inside its ladder. */
@@ -55,7 +65,7 @@ export function check(p: Values, material: Material, use: Use): Report {
       }),
       ...markFigure(p),
     ],
-    curves: [],
+    curves: [gapCurve(p)],
     allowable: allowableStrain(material, use),
   });
 }

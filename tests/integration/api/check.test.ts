@@ -24,7 +24,7 @@ describe('a check', () => {
     expect(['within-limit', 'close-to-limit', 'over-limit', 'not-known']).toContain(verdict);
     expect(figures.map(({ id }) => id)).toContain(governing);
     expect(new Set(figures.map(({ id }) => id)).size).toBe(figures.length);
-    expect(curves.length).toBeGreaterThanOrEqual(1);
+    if (verdict !== 'not-known') expect(curves.length).toBeGreaterThanOrEqual(1);
     expect(Object.keys(parameters).length).toBeGreaterThan(5);
     expect(use).toEqual({ opening: 'often', layers: 'along', temperature: 23 });
     for (const figure of figures) {
