@@ -211,8 +211,22 @@ function printFigure({ p }: Context): Figure[] {
 
 const STEPS = 24;
 
+/** What any mount sends on, by how much faster than itself it is shaken: for plastics without figures of their own. */
+function anyMount(): Curve {
+  return {
+    id: 'transmitted-over-ratio',
+    label: 'Share of the shaking that arrives, any mount',
+    x: { label: 'Shaking over natural frequency', unit: 'ratio' },
+    y: { label: 'Share', unit: 'ratio' },
+    points: Array.from({ length: 3 * STEPS + 1 }, (_, i) => {
+      const ratio = (3 * i) / (3 * STEPS);
+      return [ratio, transmissibility(ratio, DAMPING.soft[1])] as const;
+    }),
+  };
+}
+
 function curves({ p, carried }: Context): Curve[] {
-  if (!carried) return [];
+  if (!carried) return [anyMount()];
   const most = Math.max(2 * p.shaking, 3 * carried.frequency);
   const sent: Curve = {
     id: 'transmitted-over-frequency',

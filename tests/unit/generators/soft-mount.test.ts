@@ -67,6 +67,7 @@ describe('soft mount: verdicts', () => {
     expect(report.verdict).toBe('not-known');
     expect(figure(report, 'natural-frequency').value).toBeNull();
     expect(figure(report, 'peak-strain').because).toMatch(/rubber-like/);
+    expect(report.curves.map(({ id }) => id)).toEqual(['transmitted-over-ratio']);
     expect(value(checked('petg', S_SPRING), 'natural-frequency')).toBeGreaterThan(0);
   });
 
