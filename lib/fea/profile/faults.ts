@@ -26,6 +26,7 @@ function chainFault(loop: readonly Segment[], scale: number): string | null {
   for (let i = 0; i < loop.length; i++) {
     const s = loop[i]!;
     const next = loop[(i + 1) % loop.length]!;
+    if (!(s.size > 0)) return `the edge length wished for at "${s.tag}" is not a positive number`;
     if (segmentLength(s) < SHORTEST * scale) return `the edge "${s.tag}" has no length`;
     const gap = Math.abs(next.x0 - s.x1) + Math.abs(next.y0 - s.y1);
     if (!(gap <= JOINT * scale)) return `the profile is open behind the edge "${s.tag}"`;

@@ -24,6 +24,14 @@ describe('fault of a profile', () => {
     expect(profileFault({ loops: [rounded] })).toBeNull();
   });
 
+  it('refuses an edge length that is no positive number, such as JSON leaves of an endless one', () => {
+    for (const size of [null, 0, Number.NaN]) {
+      const [first, ...others] = box(0, 0, 4, 3);
+      const spoilt = { ...first!, size: size as number };
+      expect(profileFault({ loops: [[spoilt, ...others]] })).toMatch(/"edge0" is not a positive number/);
+    }
+  });
+
   it('names the edges of a bow tie', () => {
     const bow = loopOf([
       [0, 0],
