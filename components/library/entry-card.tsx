@@ -3,7 +3,7 @@ import Link from 'next/link';
 import { VerdictMark } from '@/components/studio/verdict';
 import type { LibraryEntry } from '@/lib/access/library';
 import { Drawing } from './drawing';
-import { reportWords, shareWords } from './words';
+import { reportWords } from './words';
 
 export interface Entry extends LibraryEntry {
   readonly familyName: string;
@@ -12,8 +12,7 @@ export interface Entry extends LibraryEntry {
 
 /** A preset as the library lists it. */
 export function EntryCard({ entry }: { entry: Entry }) {
-  const { slug, title, purpose, familyName, materialName, verdict, strainShare, worked, failed, favourites } =
-    entry;
+  const { slug, title, purpose, familyName, materialName, verdict, worked, failed, favourites } = entry;
   return (
     <li className="relative flex flex-col overflow-hidden rounded-sheet border border-hair bg-sheet shadow-lift focus-within:border-ink hover:border-edge">
       <Drawing
@@ -36,7 +35,7 @@ export function EntryCard({ entry }: { entry: Entry }) {
         </p>
         <p className="line-clamp-3">{purpose}</p>
         <div className="mt-auto flex flex-wrap items-center justify-between gap-x-4 gap-y-2 pt-2 text-sm">
-          <VerdictMark verdict={verdict} more={strainShare === null ? undefined : shareWords(strainShare)} />
+          <VerdictMark verdict={verdict} />
           <span className="flex items-center gap-3 text-muted">
             <span className="inline-flex items-center gap-1">
               <Wrench aria-hidden="true" size={15} />

@@ -12,9 +12,6 @@ export const enclosureWords = (enclosure: keyof typeof ENCLOSURE_WORDS | null): 
 export const sizeWords = (size: readonly [number, number, number]): string =>
   `${size.map((edge) => significant(edge, 3)).join(' × ')} mm`;
 
-export const shareWords = (share: number | null): string =>
-  share === null ? 'share of the limit not known' : `${Math.round(share * 100)} % of the limit`;
-
 export const reportWords = (worked: number, failed: number): string => {
   if (worked + failed === 0) return 'No reports yet';
   return `Worked for ${worked}${failed > 0 ? `, not for ${failed}` : ''}`;

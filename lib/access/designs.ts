@@ -228,7 +228,7 @@ export async function restoreState(
   return write({ ownerId: owner.id, id, revision: given.revision, content, apart: true });
 }
 
-export function designPicture(viewer: Viewer, id: string): Promise<Picture> {
+export async function designPicture(viewer: Viewer, id: string): Promise<Picture> {
   const { family, parameters } = getDesign(viewer, id);
   return pictureOf({ family, values: parameters });
 }

@@ -193,7 +193,7 @@ export function removeReport(viewer: Viewer, slug: string, number: number): void
 }
 
 /** A design of the member's own that starts where the preset stands. */
-export function startFrom(viewer: Viewer, slug: string, number?: number): Promise<Design> {
+export async function startFrom(viewer: Viewer, slug: string, number?: number): Promise<Design> {
   const member = permit(viewer, 'design.own');
   const { version } = publicPreset(slug, number);
   const { family, material, use, values, title } = version;

@@ -65,7 +65,7 @@ export async function getReview(viewer: Viewer, id: string): Promise<Review> {
   };
 }
 
-export function reviewPicture(viewer: Viewer, id: string): Promise<Picture> {
+export async function reviewPicture(viewer: Viewer, id: string): Promise<Picture> {
   permit(viewer, 'preset.review');
   const { row } = versionRow(id);
   return pictureOf({ family: row.family, values: row.values });
