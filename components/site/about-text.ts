@@ -32,6 +32,29 @@ export const FIGURES: readonly Passage[] = [
   },
 ];
 
+export const KEEPING: readonly Passage[] = [
+  {
+    head: 'Without an account',
+    text: 'Nothing of yours is stored on the server. Your work stays in this browser and in the link; the library is open to read, to print and to start from.',
+  },
+  {
+    head: 'Kept designs',
+    text: 'Signed in, a design is saved as you change it. A run of changes is one state of its history; any state can be compared and restored. Deleted designs can be brought back for 30 days.',
+  },
+  {
+    head: 'The club library',
+    text: 'A design handed in is checked by a librarian. A published version is never changed, only followed by another, so that what somebody printed stays what it was. It stays under its author’s name when the author leaves.',
+  },
+  {
+    head: 'Reports',
+    text: 'Worked or not, with printer, plastic and a note: once from a member for a version. They tell of that print on that printer, and prove nothing for yours.',
+  },
+  {
+    head: 'Photos',
+    text: 'Photos are made smaller and written afresh. Place, camera and everything else beside the picture is dropped.',
+  },
+];
+
 export const MARKS: readonly { readonly mark: Mark; readonly text: string }[] = [
   { mark: 'verified', text: 'We have read the value or formula in the publication that is named.' },
   { mark: 'computed', text: 'The formula is published; the number was worked out here from it.' },

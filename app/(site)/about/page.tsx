@@ -1,5 +1,5 @@
 import type { Metadata } from 'next';
-import { CAUTIONS, FIGURES, FONTS, MARKS } from '@/components/site/about-text';
+import { CAUTIONS, FIGURES, FONTS, KEEPING, MARKS, type Passage } from '@/components/site/about-text';
 import { SourceMark } from '@/components/site/source-mark';
 
 const title = 'What the figures mean';
@@ -18,6 +18,17 @@ const Heading = ({ id, children }: { id: string; children: string }) => (
   </h2>
 );
 
+const Passages = ({ passages }: { passages: readonly Passage[] }) => (
+  <dl className="grid gap-x-12 gap-y-7 md:grid-cols-2 xl:grid-cols-3">
+    {passages.map(({ head, text }) => (
+      <div key={head}>
+        <dt className="font-bold font-heading text-xl tracking-tight">{head}</dt>
+        <dd className="mt-1 max-w-[60ch]">{text}</dd>
+      </div>
+    ))}
+  </dl>
+);
+
 export default function AboutPage() {
   return (
     <main className="frame pt-8 pb-20">
@@ -30,14 +41,7 @@ export default function AboutPage() {
       <div className="grid gap-14">
         <section aria-labelledby="figures">
           <Heading id="figures">Reading a check</Heading>
-          <dl className="grid gap-x-12 gap-y-7 md:grid-cols-2 xl:grid-cols-3">
-            {FIGURES.map(({ head, text }) => (
-              <div key={head}>
-                <dt className="font-bold font-heading text-xl tracking-tight">{head}</dt>
-                <dd className="mt-1 max-w-[60ch]">{text}</dd>
-              </div>
-            ))}
-          </dl>
+          <Passages passages={FIGURES} />
         </section>
         <section aria-labelledby="marks">
           <Heading id="marks">Marks of sources</Heading>
@@ -54,6 +58,10 @@ export default function AboutPage() {
               </div>
             ))}
           </dl>
+        </section>
+        <section aria-labelledby="keeping">
+          <Heading id="keeping">What is kept, and passed on</Heading>
+          <Passages passages={KEEPING} />
         </section>
         <section aria-labelledby="cautions">
           <Heading id="cautions">Cautions</Heading>
