@@ -94,7 +94,7 @@ export function PhotoField() {
         </span>
       )}
       <div role="alert" className="grid gap-1">
-        {[...faults, state.errors.photos].map((fault) => (
+        {[...faults, ...[state.errors.photos ?? []].flat()].map((fault) => (
           <FieldError key={fault} id={`${id}-error`}>
             {fault}
           </FieldError>
