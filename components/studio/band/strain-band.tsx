@@ -42,8 +42,8 @@ function Governing({ figure, report }: { figure: Figure; report: Report }) {
 function Headline({ figure }: { figure: Figure }) {
   const banded = figure.low !== null && figure.high !== null && figure.low !== figure.high;
   return (
-    <div className="xl:max-w-36">
-      <dt className="mb-1.5 text-muted text-sm leading-tight">{figure.label}</dt>
+    <div>
+      <dt className="mb-1.5 xl:max-w-36 text-muted text-sm leading-tight">{figure.label}</dt>
       <dd>
         <BigFigure value={figure.value} unit={figure.unit} size="text-[2.1rem]" />
         {banded && (
@@ -116,8 +116,8 @@ function Stuff({ volume }: { volume: number | null }) {
   const mass = volume === null ? null : (volume / 1000) * material.density.value;
   const price = material.price;
   return (
-    <div className="xl:max-w-36">
-      <dt className="mb-1.5 text-muted text-sm leading-tight">Mass, printed solid</dt>
+    <div>
+      <dt className="mb-1.5 xl:max-w-36 text-muted text-sm leading-tight">Mass, printed solid</dt>
       <dd>
         {mass === null ? (
           <>
