@@ -78,7 +78,7 @@ test('two tabs meet in a choice and not in a loss', async ({ context, page }) =>
   await expect(page).toHaveURL(/\/designs\/[0-9a-f-]+$/);
   const other = await context.newPage();
   await other.goto(page.url());
-  const width = (one: Page) => one.getByRole('spinbutton', { name: 'Leaf width' });
+  const width = (one: Page) => one.getByRole('spinbutton', { name: 'Width along the fold' });
   await expect(width(other)).toBeVisible();
 
   const saved = page.waitForResponse((answer) => answer.request().method() === 'PUT' && answer.ok());
