@@ -13,7 +13,7 @@ export const generateStaticParams = () => FAMILIES.map(({ about }) => ({ family:
 
 export async function generateMetadata({ params }: Props): Promise<Metadata> {
   const about = familyEntry((await params).family)?.about;
-  if (!about) return {};
+  if (!about) return { title: 'Not found' };
   const title = `${about.name}: how it works`;
   const description = `${about.summary} How it fails, the formulas with their sources, how to print it.`;
   return { title, description, openGraph: { title, description, type: 'article', siteName: 'Bendwell' } };

@@ -14,7 +14,7 @@ interface Props {
 
 export async function generateMetadata({ params }: Props): Promise<Metadata> {
   const entry = familyEntry((await params).family);
-  return entry ? { title: entry.about.name, description: entry.about.summary } : {};
+  return entry ? { title: entry.about.name, description: entry.about.summary } : { title: 'Not found' };
 }
 
 export default async function DesignPage({ params, searchParams }: Props) {
