@@ -1,4 +1,5 @@
 import type { Kernel, Loop, Solid, Vec2 } from './kernel';
+import { loopArea } from './loops';
 import { rotation } from './placement';
 import { type FormPoint, type Ridge, ridgeMesh, ridgeVolume } from './thread';
 
@@ -187,12 +188,6 @@ export function capBody(kernel: Kernel, cap: CapShape, ridge: Ridge): Solid {
   const shell = kernel.subtract(block, [turnedWall(kernel, cavitySection(cap, segmentsPerTurn, PAST))]);
   return kernel.union([shell, kernel.fromMesh(ridgeMesh(ridge, segmentsPerTurn))]);
 }
-
-const loopArea = (loop: Loop): number =>
-  loop.reduce((sum, [x, y], at) => {
-    const [nextX, nextY] = loop[(at + 1) % loop.length]!;
-    return sum + (x * nextY - nextX * y) / 2;
-  }, 0);
 
 export const capVolume = (cap: CapShape, ridge: Ridge, segments: number): number =>
   loopArea(cap.outline) * (cap.top - cap.mouth) -
