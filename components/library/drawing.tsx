@@ -1,4 +1,5 @@
 import { classNames } from '@/components/ui/class-names';
+import { FinishedImage } from '@/components/ui/finished-image';
 
 /** A part as the server draws it, on the tone that suits its colours in both palettes. */
 export function Drawing({
@@ -13,14 +14,12 @@ export function Drawing({
   eager?: boolean;
 }) {
   return (
-    // biome-ignore lint/performance/noImgElement: drawn on the server at the size it is shown
-    <img
+    <FinishedImage
       src={src}
       alt={alt}
       width={400}
       height={300}
       loading={eager ? 'eager' : 'lazy'}
-      decoding="async"
       className={classNames('h-auto w-full bg-[color-mix(in_oklab,var(--sheet),var(--edge)_18%)]', className)}
     />
   );

@@ -6,6 +6,7 @@ import { useForm } from '@/components/forms/action-form';
 import { FieldError } from '@/components/forms/field-error';
 import { Button } from '@/components/ui/button';
 import { lineClass } from '@/components/ui/field-class';
+import { FinishedImage } from '@/components/ui/finished-image';
 import type { Photo } from '@/lib/access/photos';
 
 const MOST = 6;
@@ -23,8 +24,7 @@ function Line({ photo, number, onRemove }: { photo: Photo; number: number; onRem
   const id = useId();
   return (
     <li className="grid grid-cols-[6rem_1fr_auto] items-center gap-3">
-      {/* biome-ignore lint/performance/noImgElement: made smaller when it was uploaded */}
-      <img
+      <FinishedImage
         src={`/api/v1/photos/${photo.id}`}
         alt=""
         width={photo.width}

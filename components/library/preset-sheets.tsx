@@ -2,6 +2,7 @@ import { Download } from 'lucide-react';
 import Link from 'next/link';
 import { When } from '@/components/designs/when';
 import { buttonClass } from '@/components/ui/button';
+import { FinishedImage } from '@/components/ui/finished-image';
 import { Sheet, SheetTitle } from '@/components/ui/sheet';
 import type { Preset, PresetVersion } from '@/lib/access/presets';
 
@@ -62,14 +63,11 @@ export function Photos({ version }: { version: PresetVersion }) {
       {version.photos.map(({ id, alt, width, height }) => (
         <li key={id}>
           <a href={`/api/v1/photos/${id}`} className="block">
-            {/* biome-ignore lint/performance/noImgElement: made smaller when it was uploaded */}
-            <img
+            <FinishedImage
               src={`/api/v1/photos/${id}`}
               alt={alt}
               width={width}
               height={height}
-              loading="lazy"
-              decoding="async"
               className="aspect-4/3 h-auto w-full rounded-sheet border border-hair bg-sheet object-cover"
             />
           </a>

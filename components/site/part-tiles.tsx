@@ -1,19 +1,17 @@
 import Link from 'next/link';
 import { KindGlyph } from '@/components/studio/kind-glyph';
 import { classNames } from '@/components/ui/class-names';
+import { FinishedImage } from '@/components/ui/finished-image';
 import { type About, KIND_NAME, type Kind } from '@/generators/contract';
 
 const KINDS = Object.keys(KIND_NAME) as Kind[];
 
 export const PartPicture = ({ about, className }: { about: About; className?: string }) => (
-  // biome-ignore lint/performance/noImgElement: a drawing written when the site is built, with nothing to resize
-  <img
+  <FinishedImage
     src={`/guide/${about.id}/part.svg`}
     alt={`${about.name}, drawn from the first preset`}
     width={480}
     height={360}
-    loading="lazy"
-    decoding="async"
     className={className}
   />
 );

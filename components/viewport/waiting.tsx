@@ -1,13 +1,16 @@
 import { LoaderCircle } from 'lucide-react';
+import { FinishedImage } from '@/components/ui/finished-image';
 
 /** What stands in for the picture until it is drawn: the part as the guide shows it, faint, and what is being done. */
 export function Waiting({ family, words }: { family: string; words: string }) {
   return (
     <div data-waiting="" className="pointer-events-none absolute inset-0 grid place-items-center">
-      {/* biome-ignore lint/performance/noImgElement: a drawing written when the site is built, with nothing to resize */}
-      <img
+      <FinishedImage
         src={`/guide/${family}/part.svg`}
         alt=""
+        width={480}
+        height={360}
+        loading="eager"
         className="absolute inset-0 m-auto h-4/5 w-4/5 object-contain opacity-30 grayscale"
       />
       <p
